@@ -6,6 +6,24 @@ export default {
 	preprocess: vitePreprocess(),
 	kit: {
 		adapter: adapter({ out: 'build/app' }),
+		// A deep link must find its files without the server that it came from.
 		paths: { relative: false },
+		// Written into each page as a meta element with the hash of the one inline script that starts it;
+		// src/start.mjs adds the headers that a meta element cannot carry.
+		csp: {
+			mode: 'hash',
+			directives: {
+				'default-src': ['none'],
+				'script-src': ['self'],
+				'style-src': ['self'],
+				'font-src': ['self'],
+				'img-src': ['self', 'blob:', 'data:'],
+				'connect-src': ['self'],
+				'worker-src': ['self'],
+				'manifest-src': ['self'],
+				'base-uri': ['none'],
+				'form-action': ['self'],
+			},
+		},
 	},
 };

@@ -44,4 +44,5 @@ function refuseWhatJsonCannotCarry(value: unknown, at: string): void {
 	}
 }
 
-const isWellFormed = (text: string): boolean => !/[\ud800-\udbff](?![\udc00-\udfff])|(?<![\ud800-\udbff])[\udc00-\udfff]/.test(text);
+const isWellFormed = (text: string): boolean =>
+	!/[\ud800-\udbff](?![\udc00-\udfff])|(?<![\ud800-\udbff])[\udc00-\udfff]/.test(text);

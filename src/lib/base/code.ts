@@ -13,7 +13,7 @@ export function readableCode(sha256Hex: string, length: 16 | 8 | 6): string {
 	for (const byte of bytes) bits = (bits << 8n) | BigInt(byte);
 	const total = BigInt(bytes.length * 8);
 	let code = '';
-	for (let i = 1n; i <= BigInt(length); i++) code += ALPHABET[Number((bits >> (total - 5n * i)) & 31n)];
+	for (let i = 1n; i <= BigInt(length); i++) code += ALPHABET.charAt(Number((bits >> (total - 5n * i)) & 31n));
 	return length === 6 ? code : (code.match(/.{4}/g) ?? []).join('-');
 }
 

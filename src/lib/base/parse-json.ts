@@ -30,7 +30,7 @@ function scan(text: string): JsonError | undefined {
 	const open: { names: Set<string> | undefined; expectsName: boolean }[] = [];
 	for (let i = 0; i < text.length; i++) {
 		const top = open.at(-1);
-		switch (text[i]) {
+		switch (text.charAt(i)) {
 			case '{':
 			case '[':
 				if (open.length >= MAX_DEPTH) return { kind: 'too-deep', at: i, limit: MAX_DEPTH };

@@ -1,0 +1,69 @@
+import js from '@eslint/js';
+import svelte from 'eslint-plugin-svelte';
+import { defineConfig } from 'eslint/config';
+import globals from 'globals';
+import ts from 'typescript-eslint';
+import svelteConfig from './svelte.config.js';
+
+/**
+ * Rules of the house that a linter can hold; the import order and the plan are held by test/architecture.
+ *
+ * @type {import('eslint').Linter.RulesRecord}
+ */
+const house = {
+	'no-warning-comments': ['error', { terms: ['todo', 'fixme', 'xxx', 'hack'], location: 'anywhere' }],
+	'no-restricted-syntax': [
+		'error',
+		{ selector: 'ExportDefaultDeclaration', message: 'Named exports only (rule 23).' },
+		{ selector: 'ExportSpecifier[exported.name="default"]', message: 'Named exports only (rule 23).' },
+		{ selector: 'TSEnumDeclaration', message: 'A union of literals instead of an enum (rule 23).' },
+		{ selector: 'ForInStatement', message: 'Object.entries: for-in also walks the prototype.' },
+	],
+	eqeqeq: 'error',
+	'no-console': 'error',
+	'no-eval': 'error',
+	'prefer-const': 'error',
+	curly: ['error', 'multi-line'],
+	'@typescript-eslint/switch-exhaustiveness-check': ['error', { considerDefaultExhaustiveForUnions: true }],
+	'@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports' }],
+	'@typescript-eslint/consistent-type-definitions': ['error', 'type'],
+	'@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
+	'@typescript-eslint/no-confusing-void-expression': ['error', { ignoreArrowShorthand: true }],
+	'@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
+};
+
+export default defineConfig(
+	{ ignores: ['build/', '.svelte-kit/', '.cache/', 'static/', 'data/'] },
+	{ linterOptions: { reportUnusedDisableDirectives: 'error' } },
+	js.configs.recommended,
+	ts.configs.strictTypeChecked,
+	ts.configs.stylisticTypeChecked,
+	svelte.configs.recommended,
+	{
+		languageOptions: {
+			globals: globals['shared-node-browser'],
+			parserOptions: { projectService: true, extraFileExtensions: ['.svelte'] },
+		},
+		rules: house,
+	},
+	{
+		files: ['**/*.svelte', '**/*.svelte.ts'],
+		languageOptions: { globals: globals.browser, parserOptions: { parser: ts.parser, svelteConfig } },
+		rules: { 'svelte/no-at-html-tags': 'error', 'svelte/require-each-key': 'error' },
+	},
+	{
+		// Programs of the terminal talk to it, and plain JavaScript cannot say every type.
+		files: ['**/*.mjs', '*.js', 'src/cli/**'],
+		languageOptions: { globals: globals.node },
+		rules: { 'no-console': 'off' },
+	},
+	{
+		// These tools demand a default export.
+		files: ['*.config.js', '*.config.ts'],
+		rules: { 'no-restricted-syntax': 'off' },
+	},
+	{
+		files: ['test/**'],
+		rules: { '@typescript-eslint/no-non-null-assertion': 'off' },
+	},
+);
