@@ -1,0 +1,21 @@
+import { fail, type Result } from '../base';
+import type { CalcResult, Calculator, Refusal } from './calculator';
+
+/** Every calculator ever released, by id@version. A line is never taken out: old records recompute with it. */
+export const CATALOGUE: { readonly [idAtVersion: string]: Calculator } = {};
+
+/** The newest version of a calculator, for a new step; a step that is already approved names its version. */
+export function latest(id: string): Calculator | undefined {
+	const versions = Object.values(CATALOGUE).filter((calculator) => calculator.id === id);
+	return versions.reduce<Calculator | undefined>(
+		(newest, each) => (each.version > (newest?.version ?? 0) ? each : newest),
+		undefined,
+	);
+}
+
+export function runCalculator(idAtVersion: string, inputs: unknown): Result<CalcResult, readonly Refusal[]> {
+	const calculator = Object.hasOwn(CATALOGUE, idAtVersion) ? CATALOGUE[idAtVersion] : undefined;
+	return calculator === undefined
+		? fail([{ kind: 'unknown-calculator', calc: idAtVersion, known: Object.keys(CATALOGUE) }])
+		: calculator.run(inputs);
+}

@@ -1,0 +1,23 @@
+/**
+ * calc: engineering calculators, one per file, each with its equation, units, range and source.
+ * Pure: same inputs, same answer; what cannot be calculated is refused as data, never clamped.
+ * May import: base, quantity.
+ */
+export type {
+	BudgetRow,
+	CalcNote,
+	CalcResult,
+	Calculator,
+	CalcValue,
+	InputSource,
+	InputSpec,
+	OutputSpec,
+	Plot,
+	PlotAxis,
+	PlotCurve,
+	PlotMark,
+	Refusal,
+	Verdict,
+} from './calculator';
+export { CATALOGUE, latest, runCalculator } from './catalogue';
+export { CONSTANTS, OXYGEN_IN_AIR } from './constants';
