@@ -23,6 +23,7 @@ export default {
 				'manifest-src': ['self'],
 				'base-uri': ['none'],
 				'form-action': ['self'],
+				'frame-ancestors': ['none'],
 			},
 		},
 	},
