@@ -3,6 +3,7 @@
  * Pure: no clock, no chance, no storage.
  * May import: nothing of the house.
  */
+export type { DeepReadonly } from './readonly';
 export { fail, ok, unreachable, type Result } from './result';
 export { concat, fromBase64, fromHex, fromUtf8, sameBytes, toBase64, toHex, utf8 } from './bytes';
 export { sha256, sha256Hex } from './sha256';

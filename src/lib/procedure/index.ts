@@ -1,0 +1,19 @@
+/**
+ * procedure: the controlled template of gates, steps and hold points: its schema, how it is parsed and checked, the library.
+ * Pure: a procedure is data; SPEC.md says what every field means.
+ * May import: base, quantity, calc, plant.
+ */
+export {
+	ProcedureSchema,
+	type Binding,
+	type Gate,
+	type LapsedBy,
+	type LimitUse,
+	type Permissive,
+	type PlantEventKind,
+	type Procedure,
+	type StartType,
+	type Step,
+	type StepKind,
+	type Validity,
+} from './schema';
