@@ -49,7 +49,12 @@ export default defineConfig(
 	{
 		files: ['**/*.svelte', '**/*.svelte.ts'],
 		languageOptions: { globals: globals.browser, parserOptions: { parser: ts.parser, svelteConfig } },
-		rules: { 'svelte/no-at-html-tags': 'error', 'svelte/require-each-key': 'error' },
+		rules: {
+			'svelte/no-at-html-tags': 'error',
+			'svelte/require-each-key': 'error',
+			'prefer-const': 'off',
+			'svelte/prefer-const': 'error',
+		},
 	},
 	{
 		// Programs of the terminal talk to it; plain JavaScript cannot say every type to the linter.

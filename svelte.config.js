@@ -16,6 +16,8 @@ export default {
 				'default-src': ['none'],
 				'script-src': ['self'],
 				'style-src': ['self'],
+				// The one style attribute that SvelteKit writes: it hides its announcer, which tells screen readers of a new page.
+				'style-src-attr': ['unsafe-hashes', 'sha256-S8qMpvofolR8Mpjy4kQvEm7m1q8clzU4dfDH0AmvZjo='],
 				'font-src': ['self'],
 				'img-src': ['self', 'blob:', 'data:'],
 				'connect-src': ['self'],
