@@ -17,3 +17,14 @@ export {
 	type StepKind,
 	type Validity,
 } from './schema';
+export { readCondition, type Condition, type ConditionFinding } from './condition';
+export {
+	evaluatePermissive,
+	readingFor,
+	type NewestReading,
+	type PermissiveInputs,
+	type PermissiveValue,
+	type Unknown,
+	type UnknownBecause,
+	type WhyUnknown,
+} from './permissive';

@@ -1,8 +1,8 @@
 import * as v from 'valibot';
 import type { DeepReadonly } from '../base';
 import { BasisSchema } from '../plant';
-import { BindingSchema, LimitUseSchema, StepSchema } from './step';
-import { GateNumber, LapsedBySchema, ValiditySchema } from './validity';
+import { type BindingSchema, type LimitUseSchema, StepSchema } from './step';
+import { GateNumber, type LapsedBySchema, type ValiditySchema } from './validity';
 
 const Id = v.pipe(v.string(), v.regex(/^[A-Za-z0-9][A-Za-z0-9._-]{0,63}$/));
 const Text = v.pipe(v.string(), v.minLength(1), v.maxLength(2000));
