@@ -29,53 +29,63 @@ export function readCondition(permissive: Permissive): Result<Condition, readonl
 		if (!(error instanceof ParseError)) throw error;
 		return fail([unreadable(error)]);
 	}
-	const findings: ConditionFinding[] = [];
-	const walk = walker(permissive, findings);
-	walk.truth(parsed.ast);
-	for (const name of Object.keys(walk.known)) {
-		if (!walk.used.has(name)) findings.push({ kind: 'condition-unused-name', at: 0, name });
-	}
+	const walk = new Walk(permissive);
+	walk.truth(parsed.ast, NOTHING);
+	const findings = [...walk.findings, ...walk.unused()];
 	return findings.length > 0 ? fail(findings) : ok((names) => parsed({ ...names }) === true);
 }
 
-/** What an expression is: a truth, a bare number, or a reading (or list of readings) of one quantity in one unit. */
-type Kind = 'truth' | 'number' | { readonly reading: string } | { readonly list: string } | undefined;
-type Names = { readonly [name: string]: Kind };
+/** What an expression is: a truth, a bare number, or a reading (or a list of readings) of one quantity in one unit. */
+type Kind = 'truth' | 'number' | { readonly reading: string } | { readonly list: string } | 'refused';
+type Names = ReadonlyMap<string, Kind>;
 
-function walker(permissive: Permissive, findings: ConditionFinding[]) {
-	const known: Names = {
-		...Object.fromEntries(
-			Object.entries(permissive.readings).map(([name, use]) => [
+class Walk {
+	readonly findings: ConditionFinding[] = [];
+	readonly #known: Names;
+	readonly #used = new Set<string>();
+
+	constructor({ readings, facts = {} }: Permissive) {
+		this.#known = new Map<string, Kind>([
+			...Object.entries(readings).map(([name, use]): [string, Kind] => [
 				name,
 				{ reading: [use.quantity, ...(use.basis === undefined ? [] : [use.basis]), `in ${use.unit}`].join(' ') },
 			]),
-		),
-		...Object.fromEntries(Object.keys(permissive.facts ?? {}).map((name) => [name, 'truth' as const])),
-	};
-	const used = new Set<string>();
-	const refuse = (node: ASTNode, what: string): undefined => {
-		findings.push({ kind: 'condition-not-allowed', at: node.start, what });
-		return undefined;
-	};
+			...Object.keys(facts).map((name): [string, Kind] => [name, 'truth']),
+		]);
+	}
 
-	const kindOf = (node: ASTNode, bound: Names): Kind => {
+	unused(): readonly ConditionFinding[] {
+		const names = [...this.#known.keys()].filter((name) => !this.#used.has(name));
+		return names.map((name) => ({ kind: 'condition-unused-name', at: 0, name }));
+	}
+
+	truth(node: ASTNode, bound: Names): void {
+		const kind = this.#kindOf(node, bound);
+		if (kind === 'truth' || kind === 'refused') return;
+		this.findings.push({ kind: 'condition-not-a-truth', at: node.start, found: wordsOf(kind) });
+	}
+
+	#refuse(node: ASTNode, what: string): 'refused' {
+		this.findings.push({ kind: 'condition-not-allowed', at: node.start, what });
+		return 'refused';
+	}
+
+	#kindOf(node: ASTNode, bound: Names): Kind {
 		switch (node.op) {
 			case 'value':
 				if (typeof node.args === 'number' || typeof node.args === 'bigint') return 'number';
-				{ refuse(node, `a ${node.args === null ? 'null' : typeof node.args} literal`); return; }
+				return this.#refuse(node, `the literal ${node.input.slice(node.start, node.end)}`);
 			case 'id':
-				return nameKind(node, node.args, bound);
+				return this.#name(node, node.args, bound);
 			case '-_':
-				{ kindOf(node.args, bound) === 'number' ? 'number' : refuse(node, 'arithmetic with a reading'); return; }
+				return this.#kindOf(node.args, bound) === 'number' ? 'number' : this.#refuse(node, 'arithmetic');
 			case '!_':
-				truth(node.args, bound);
+				this.truth(node.args, bound);
 				return 'truth';
 			case '&&':
 			case '||':
-				node.args.forEach((each) => truth(each, bound));
-				return 'truth';
 			case '?:':
-				node.args.forEach((each) => truth(each, bound));
+				for (const part of node.args) this.truth(part, bound);
 				return 'truth';
 			case '<':
 			case '<=':
@@ -83,74 +93,67 @@ function walker(permissive: Permissive, findings: ConditionFinding[]) {
 			case '>=':
 			case '==':
 			case '!=':
-				compare(node, ...node.args, bound);
-				return 'truth';
+				return this.#comparison(node, node.args, bound);
 			case 'list':
-				return listKind(node, node.args, bound);
+				return this.#list(node, node.args, bound);
 			case 'rcall':
-				return macroKind(node, node.args, bound);
+				return this.#macro(node, node.args, bound);
 			case 'call':
-				{ refuse(node, node.args[0]); return; }
+				return this.#refuse(node, node.args[0]);
 			default:
-				{ refuse(node, node.op); return; }
+				return this.#refuse(node, node.op);
 		}
-	};
+	}
 
-	const nameKind = (node: ASTNode, name: string, bound: Names): Kind => {
-		if (Object.hasOwn(bound, name)) return bound[name];
-		used.add(name);
-		if (Object.hasOwn(known, name)) return known[name];
-		findings.push({ kind: 'condition-unknown-name', at: node.start, name, known: Object.keys(known) });
-		return undefined;
-	};
+	#name(node: ASTNode, name: string, bound: Names): Kind {
+		this.#used.add(name);
+		const kind = bound.get(name) ?? this.#known.get(name);
+		if (kind !== undefined) return kind;
+		this.findings.push({ kind: 'condition-unknown-name', at: node.start, name, known: [...this.#known.keys()] });
+		return 'refused';
+	}
 
-	const compare = (node: ASTNode, left: ASTNode, right: ASTNode, bound: Names) => {
-		const kinds = [kindOf(left, bound), kindOf(right, bound)] as const;
-		if (kinds.includes(undefined)) return;
-		const [a, b] = kinds.map(wordsOf) as [string, string];
-		if (!kinds.some(isReading)) refuse(node, `comparing ${a} with ${b}`);
-		else if (!kinds.includes('number') && a !== b)
-			findings.push({ kind: 'condition-unlike-quantities', at: node.start, left: a, right: b });
-	};
-
-	const listKind = (node: ASTNode, items: readonly ASTNode[], bound: Names): Kind => {
-		const kinds = items.map((item) => kindOf(item, bound));
-		if (kinds.includes(undefined)) return undefined;
-		const [first] = kinds;
-		if (!isReading(first) || !kinds.every(isReading)) { refuse(node, 'a list of anything but readings'); return; }
-		const odd = kinds.findIndex((kind) => wordsOf(kind) !== first.reading);
-		if (odd === -1) return { list: first.reading };
-		const at = items[odd]?.start ?? node.start;
-		findings.push({ kind: 'condition-unlike-quantities', at, left: first.reading, right: wordsOf(kinds[odd]) });
-		return undefined;
-	};
-
-	const macroKind = (
-		node: ASTNode,
-		[macro, target, args]: readonly [string, ASTNode, readonly ASTNode[]],
-		bound: Names,
-	): Kind => {
-		const [variable, body] = args;
-		if (!MACROS.has(macro) || variable?.op !== 'id' || body === undefined) { refuse(node, macro); return; }
-		if (Object.keys(bound).length > 0) {
-			findings.push({ kind: 'condition-nested-macro', at: node.start, what: macro });
-			return undefined;
-		}
-		if (Object.hasOwn(known, variable.args)) { refuse(variable, `a second meaning of ${variable.args}`); return; }
-		const list = kindOf(target, bound);
-		if (list === undefined) return 'truth';
-		if (typeof list !== 'object' || !('list' in list)) { refuse(target, `${macro} of ${wordsOf(list)}`); return; }
-		truth(body, { [variable.args]: { reading: list.list } });
+	#comparison(node: ASTNode, [left, right]: readonly [ASTNode, ASTNode], bound: Names): Kind {
+		const a = this.#kindOf(left, bound);
+		const b = this.#kindOf(right, bound);
+		if (a === 'refused' || b === 'refused') return 'refused';
+		const readings = [a, b].filter(isReading);
+		if (readings.length === 0 || ![a, b].every((kind) => kind === 'number' || isReading(kind)))
+			return this.#refuse(node, `comparing ${wordsOf(a)} with ${wordsOf(b)}`);
+		if (readings.length === 2 && wordsOf(a) !== wordsOf(b)) return this.#unlike(node, a, b);
 		return 'truth';
-	};
+	}
 
-	const truth = (node: ASTNode, bound: Names = {}) => {
-		const kind = kindOf(node, bound);
-		if (kind !== undefined && kind !== 'truth')
-			findings.push({ kind: 'condition-not-a-truth', at: node.start, found: wordsOf(kind) });
-	};
+	#unlike(node: ASTNode, left: Kind, right: Kind): 'refused' {
+		const words = { left: wordsOf(left), right: wordsOf(right) };
+		this.findings.push({ kind: 'condition-unlike-quantities', at: node.start, ...words });
+		return 'refused';
+	}
 
-	return { truth, known, used };
+	#list(node: ASTNode, items: readonly ASTNode[], bound: Names): Kind {
+		const kinds = items.map((item) => ({ item, kind: this.#kindOf(item, bound) }));
+		if (kinds.some(({ kind }) => kind === 'refused')) return 'refused';
+		const first = kinds[0]?.kind;
+		if (first === undefined || !isReading(first) || !kinds.every(({ kind }) => isReading(kind)))
+			return this.#refuse(node, 'a list of anything but readings');
+		const odd = kinds.find(({ kind }) => wordsOf(kind) !== first.reading);
+		return odd === undefined ? { list: first.reading } : this.#unlike(odd.item, first, odd.kind);
+	}
+
+	#macro(node: ASTNode, [macro, target, args]: readonly [string, ASTNode, readonly ASTNode[]], bound: Names): Kind {
+		const [variable, body] = args;
+		if (!MACROS.has(macro) || variable?.op !== 'id' || body === undefined) return this.#refuse(node, macro);
+		if (bound !== NOTHING) {
+			this.findings.push({ kind: 'condition-nested-macro', at: node.start, what: macro });
+			return 'refused';
+		}
+		if (this.#known.has(variable.args)) return this.#refuse(variable, `a second meaning of ${variable.args}`);
+		const list = this.#kindOf(target, bound);
+		if (list === 'refused') return 'refused';
+		if (typeof list !== 'object' || !('list' in list)) return this.#refuse(target, `${macro} of ${wordsOf(list)}`);
+		this.truth(body, new Map([[variable.args, { reading: list.list }]]));
+		return 'truth';
+	}
 }
 
 const isReading = (kind: Kind): kind is { readonly reading: string } => typeof kind === 'object' && 'reading' in kind;
@@ -167,10 +170,12 @@ const unreadable = (error: ParseError): ConditionFinding => {
 		: { kind: 'condition-unreadable', at, expected: error.summary };
 };
 
+const NOTHING: Names = new Map();
+const MACROS = new Set(['all', 'exists']);
+
 /** Far above what a gate needs, far below what can stall a tablet. */
 const MAX_NODES = 500;
 const MAX_DEPTH = 32;
-const MACROS = new Set(['all', 'exists']);
 const LANGUAGE = new Environment({
 	unlistedVariablesAreDyn: true,
 	limits: { maxAstNodes: MAX_NODES, maxDepth: MAX_DEPTH },

@@ -67,7 +67,20 @@ const shared = {
 	checks: v.exactOptional(Id),
 	/** The site's sentence for "if this lapses with feed on". */
 	withFeedOn: v.exactOptional(Text),
-	cautions: v.exactOptional(v.array(v.picklist(['asphyxiation', 'poisoning', 'ignition', 'hot surface', 'moving parts', 'pressure', 'dust explosion', 'no lone work']))),
+	cautions: v.exactOptional(
+		v.array(
+			v.picklist([
+				'asphyxiation',
+				'poisoning',
+				'ignition',
+				'hot surface',
+				'moving parts',
+				'pressure',
+				'dust explosion',
+				'no lone work',
+			]),
+		),
+	),
 	photo: v.exactOptional(v.picklist(['asked', 'needed'])),
 };
 
@@ -77,7 +90,9 @@ const step = <const K extends string, E extends v.ObjectEntries>(kind: K, entrie
 export const StepSchema = v.variant('kind', [
 	step('confirm', { confirms: v.array(v.strictObject({ id: Id, text: Text })) }),
 	step('line-up', {
-		rows: v.array(v.strictObject({ id: Id, element: v.exactOptional(Id), title: Text, required: Text, choices: v.array(Text) })),
+		rows: v.array(
+			v.strictObject({ id: Id, element: v.exactOptional(Id), title: Text, required: Text, choices: v.array(Text) }),
+		),
 	}),
 	step('reading', { fields: v.array(Field) }),
 	/** All places on one page, with their limit. */
@@ -98,7 +113,15 @@ export const StepSchema = v.variant('kind', [
 		]),
 	}),
 	/** One row for every enclosed volume: measured, swept with its outlet read, or shut off and inerted by itself. */
-	step('coverage', { rows: v.array(v.strictObject({ id: Id, volume: Id, answers: v.array(v.picklist(['measured', 'swept, outlet read', 'shut off, inerted by itself'])) })) }),
+	step('coverage', {
+		rows: v.array(
+			v.strictObject({
+				id: Id,
+				volume: Id,
+				answers: v.array(v.picklist(['measured', 'swept, outlet read', 'shut off, inerted by itself'])),
+			}),
+		),
+	}),
 	step('choice', { options: v.array(v.strictObject({ id: Id, title: Text, passes: v.boolean() })) }),
 	step('photo', { shows: Text }),
 	step('timed hold', { holdMinutes: v.pipe(v.number(), v.minValue(0)), fields: v.exactOptional(v.array(Field)) }),
