@@ -1,8 +1,11 @@
 import { fail, type Result } from '../base';
 import type { CalcResult, Calculator, Refusal } from './calculator';
+import { sweepPurge } from './purge/sweep-purge';
 
 /** Every calculator ever released, by id@version. A line is never taken out: old records recompute with it. */
-export const CATALOGUE: { readonly [idAtVersion: string]: Calculator } = {};
+export const CATALOGUE: { readonly [idAtVersion: string]: Calculator } = {
+	'sweep-purge@1': sweepPurge,
+};
 
 /** The newest version of a calculator, for a new step; a step that is already approved names its version. */
 export function latest(id: string): Calculator | undefined {

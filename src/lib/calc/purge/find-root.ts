@@ -17,13 +17,13 @@ export function findRoot(f: (x: number) => number, a: number, b: number): number
 	if (f1 === 0) return x1;
 	if (f2 === 0) return x2;
 	if (!(f1 * f2 < 0)) throw new RangeError(`no change of sign between ${a} and ${b}`);
-	let [x3, f3] = [x1, f1];
 	let part = 0.5;
 	for (let i = 0; i < 200; i++) {
 		const x = x1 + part * (x2 - x1);
 		const y = f(x);
-		[x3, f3] = [x1, f1];
-		if (y > 0 !== f1 > 0) [x3, f3, x2, f2] = [x2, f2, x1, f1];
+		const crossed = y > 0 !== f1 > 0;
+		const [x3, f3] = crossed ? [x2, f2] : [x1, f1];
+		if (crossed) [x2, f2] = [x1, f1];
 		[x1, f1] = [x, y];
 		const best = Math.abs(f1) < Math.abs(f2) ? x1 : x2;
 		const limit = (2 * Number.EPSILON * Math.abs(best) + Number.MIN_VALUE) / Math.abs(x2 - x1);
