@@ -3,4 +3,18 @@
  * Pure: a description is data, pinned by its hash in every start-up.
  * May import: base, quantity.
  */
-export { BasisSchema, MeasureSchema, PlantSchema, SourceSchema, type Basis, type Measure, type Plant, type Source } from './schema';
+export {
+	BasisSchema,
+	MeasureSchema,
+	PlantSchema,
+	SourceSchema,
+	type Basis,
+	type Measure,
+	type Plant,
+	type Source,
+} from './schema';
+export { readShape, type ShapeError } from './shape';
+export { checkPlant, parsePlant } from './check-plant';
+export type { PlantFinding } from './finding';
+export { calibrationEnds, isInCalibration } from './calibration';
+export { differenceOf } from './difference';

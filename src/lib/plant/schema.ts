@@ -13,7 +13,16 @@ export const BasisSchema = v.picklist(['wet', 'dry']);
 
 /** Where a limit or a datum comes from. `common practice` is said wherever the value is shown. */
 export const SourceSchema = v.strictObject({
-	kind: v.picklist(['clause', 'report', 'drawing', 'supplier', 'site', 'common practice', 'from memory', 'demonstration']),
+	kind: v.picklist([
+		'clause',
+		'report',
+		'drawing',
+		'supplier',
+		'site',
+		'common practice',
+		'from memory',
+		'demonstration',
+	]),
 	text: v.string(),
 	edition: v.exactOptional(v.string()),
 	enteredBy: v.exactOptional(v.string()),
@@ -24,7 +33,26 @@ const Text = v.pipe(v.string(), v.minLength(1), v.maxLength(2000));
 const Point = v.strictObject({ x: v.number(), y: v.number() });
 
 /** Placing on the process sketch: a grid of 100 x 60 units, origin top left. */
-const Place = v.strictObject({ x: v.number(), y: v.number(), width: v.exactOptional(v.number()), height: v.exactOptional(v.number()) });
+const Place = v.strictObject({
+	x: v.number(),
+	y: v.number(),
+	width: v.exactOptional(v.number()),
+	height: v.exactOptional(v.number()),
+});
+
+const Outline = v.picklist([
+	'hot gas generator',
+	'mill',
+	'bag filter',
+	'fan',
+	'bin',
+	'silo',
+	'chute',
+	'screw',
+	'duct',
+	'stack',
+	'vessel',
+]);
 
 /** An enclosed volume: every one of them stands in the coverage table of a purge. */
 const EnclosedVolume = v.strictObject({
@@ -32,19 +60,7 @@ const EnclosedVolume = v.strictObject({
 	title: Text,
 	volume: MeasureSchema,
 	/** Outline of the process sketch. */
-	outline: v.picklist([
-		'hot gas generator',
-		'mill',
-		'bag filter',
-		'fan',
-		'bin',
-		'silo',
-		'chute',
-		'screw',
-		'duct',
-		'stack',
-		'vessel',
-	]),
+	outline: Outline,
 	/** A dead leg is not swept by the circuit gas: it needs its own answer in the coverage table. */
 	deadLeg: v.boolean(),
 	/** Steel walls that can be the coldest place of the gas. */
@@ -52,9 +68,13 @@ const EnclosedVolume = v.strictObject({
 	sketch: Place,
 });
 
+/** Drawn for orientation and open to the air: raw-fuel bin, stack. Not part of what is purged. */
+const Surrounding = v.strictObject({ id: Id, title: Text, outline: Outline, sketch: Place });
+
 const Duct = v.strictObject({
 	id: Id,
 	title: Text,
+	/** A volume, a surrounding, an inert source, or `outside`. */
 	from: Id,
 	to: Id,
 	diameter: MeasureSchema,
@@ -82,7 +102,7 @@ const MeasuringPoint = v.strictObject({
 	unit: v.string(),
 	/** The basis belongs to the point, never to the step sheet. */
 	basis: v.exactOptional(BasisSchema),
-	/** Id of the volume, duct or inert source that is read. */
+	/** Id of the volume, duct, surrounding or inert source that is read, or `outside`. */
 	at: Id,
 	medium: v.picklist(['process gas', 'hot gas', 'inert gas', 'ambient', 'steel', 'oil', 'fuel', 'none']),
 	range: v.strictObject({ from: v.number(), to: v.number() }),
@@ -93,7 +113,10 @@ const MeasuringPoint = v.strictObject({
 	lag: v.exactOptional(MeasureSchema),
 	t90: v.exactOptional(MeasureSchema),
 	instrument: v.exactOptional(Id),
+	/** Centre of the bubble. */
 	sketch: Point,
+	/** Where its leader meets the plant; absent: the middle of `at`. */
+	tap: v.exactOptional(Point),
 });
 
 const Venturi = v.strictObject({
@@ -119,7 +142,11 @@ const InertSource = v.strictObject({
 	oxygen: MeasureSchema,
 	/** The inert gas meter: only a flow read here may count as admitted. */
 	meter: Id,
-	stock: v.strictObject({ content: MeasureSchema, reserve: MeasureSchema, minimumPressure: v.exactOptional(MeasureSchema) }),
+	stock: v.strictObject({
+		content: MeasureSchema,
+		reserve: MeasureSchema,
+		minimumPressure: v.exactOptional(MeasureSchema),
+	}),
 	sketch: Place,
 });
 
@@ -140,6 +167,8 @@ const Fuel = v.strictObject({
 	moisture: v.exactOptional(v.strictObject({ feed: MeasureSchema, product: MeasureSchema })),
 	feedRate: v.exactOptional(MeasureSchema),
 	maximumOutletTemperature: v.exactOptional(MeasureSchema),
+	/** The measuring point at the mill outlet that this maximum is for. */
+	outletPoint: v.exactOptional(Id),
 });
 
 /** A limit is data of the unit: value, unit, source, edition, who entered it. Never a constant in code. */
@@ -152,6 +181,8 @@ const Limit = v.strictObject({
 	atLeast: v.exactOptional(MeasureSchema),
 	/** Kept between the reading and the limit (JCGM 106); the reading passes at the limit less the guard. */
 	guard: v.exactOptional(MeasureSchema),
+	/** Measuring points that the limit is for: limits of one point must leave something between them. */
+	appliesTo: v.exactOptional(v.array(Id)),
 	source: SourceSchema,
 });
 
@@ -188,6 +219,7 @@ export const PlantSchema = v.strictObject({
 		}),
 	),
 	volumes: v.array(EnclosedVolume),
+	surroundings: v.exactOptional(v.array(Surrounding)),
 	ducts: v.array(Duct),
 	elements: v.array(Element),
 	points: v.array(MeasuringPoint),
