@@ -20,7 +20,7 @@ function refuseWhatJsonCannotCarry(value: unknown, at: string): void {
 	};
 	switch (typeof value) {
 		case 'string':
-			if (!isWellFormed(value)) refuse('a lone surrogate');
+			if (!value.isWellFormed()) refuse('a lone surrogate');
 			return;
 		case 'number':
 			if (!Number.isFinite(value)) refuse(String(value));
@@ -29,12 +29,14 @@ function refuseWhatJsonCannotCarry(value: unknown, at: string): void {
 			return;
 		case 'object':
 			if (value === null) return;
-			if (Array.isArray(value)) value.forEach((item, i) => refuseWhatJsonCannotCarry(item, `${at}[${i}]`));
-			else {
+			if (Array.isArray(value)) {
+				// Not forEach: it passes over the holes of a list.
+				for (const [i, item] of value.entries()) refuseWhatJsonCannotCarry(item, `${at}[${i}]`);
+			} else {
 				const prototype: unknown = Object.getPrototypeOf(value);
 				if (prototype !== Object.prototype && prototype !== null) refuse('an object of a class');
 				for (const [key, item] of Object.entries(value)) {
-					if (!isWellFormed(key)) refuse('a lone surrogate in a name');
+					if (!key.isWellFormed()) refuse('a lone surrogate in a name');
 					refuseWhatJsonCannotCarry(item, `${at}.${key}`);
 				}
 			}
@@ -43,6 +45,3 @@ function refuseWhatJsonCannotCarry(value: unknown, at: string): void {
 			refuse(typeof value);
 	}
 }
-
-const isWellFormed = (text: string): boolean =>
-	!/[\ud800-\udbff](?![\udc00-\udfff])|(?<![\ud800-\udbff])[\udc00-\udfff]/.test(text);
