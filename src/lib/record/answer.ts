@@ -6,7 +6,14 @@ const Id = v.string();
 
 /** What broke or holds back a proof: always a fact of the record, so that "why not yet?" ends at something that happened. */
 export const CauseSchema = v.variant('kind', [
-	v.strictObject({ kind: v.literal('plant event'), event: EventId, what: Id, item: v.exactOptional(Id), begin: InstantSchema, end: v.nullable(InstantSchema) }),
+	v.strictObject({
+		kind: v.literal('plant event'),
+		event: EventId,
+		what: Id,
+		item: v.exactOptional(Id),
+		begin: InstantSchema,
+		end: v.nullable(InstantSchema),
+	}),
 	v.strictObject({ kind: v.literal('age'), minutes: v.number(), since: InstantSchema }),
 	/** The age was spent on a released gate and counts again, because that gate lapsed or a new proof relies on this one. */
 	v.strictObject({ kind: v.literal('age counts again'), minutes: v.number(), since: InstantSchema, gate: v.number() }),
@@ -14,7 +21,12 @@ export const CauseSchema = v.variant('kind', [
 	/** The reading that would close a watch gap does not say that the flow trend was unbroken. */
 	v.strictObject({ kind: v.literal('flow not shown'), entry: EventId }),
 	v.strictObject({ kind: v.literal('relies on'), step: Id }),
-	v.strictObject({ kind: v.literal('instrument finding'), event: EventId, instrument: Id, lastGood: v.nullable(InstantSchema) }),
+	v.strictObject({
+		kind: v.literal('instrument finding'),
+		event: EventId,
+		instrument: Id,
+		lastGood: v.nullable(InstantSchema),
+	}),
 	v.strictObject({ kind: v.literal('measuring point changed'), event: EventId, point: Id }),
 	v.strictObject({ kind: v.literal('outcome'), entry: EventId, outcome: v.string() }),
 	v.strictObject({ kind: v.literal('rows missing'), rows: v.array(Id) }),
@@ -50,7 +62,14 @@ export const PermissiveStandingSchema = v.strictObject({
 	value: v.picklist(['TRUE', 'FALSE', 'unknown']),
 	because: v.array(v.string()),
 	readings: v.array(
-		v.strictObject({ name: Id, point: Id, typed: v.exactOptional(v.string()), unit: v.string(), observed: v.exactOptional(InstantSchema), entry: v.exactOptional(EventId) }),
+		v.strictObject({
+			name: Id,
+			point: Id,
+			typed: v.exactOptional(v.string()),
+			unit: v.string(),
+			observed: v.exactOptional(InstantSchema),
+			entry: v.exactOptional(EventId),
+		}),
 	),
 });
 
@@ -67,7 +86,13 @@ export const GateStandingSchema = v.strictObject({
 			v.strictObject({ kind: v.literal('step'), step: Id, state: v.string() }),
 			v.strictObject({ kind: v.literal('lower gate'), gate: v.number(), state: v.string() }),
 			v.strictObject({ kind: v.literal('deviation'), deviation: Id, event: EventId }),
-			v.strictObject({ kind: v.literal('refusal'), event: EventId, reason: v.string(), answered: v.boolean(), unchanged: v.array(Id) }),
+			v.strictObject({
+				kind: v.literal('refusal'),
+				event: EventId,
+				reason: v.string(),
+				answered: v.boolean(),
+				unchanged: v.array(Id),
+			}),
 			v.strictObject({ kind: v.literal('permissive'), permissive: Id, value: v.string() }),
 			v.strictObject({ kind: v.literal('needs release again'), since: InstantSchema }),
 		]),
@@ -94,7 +119,8 @@ export const ReproofItemSchema = v.strictObject({
 	gate: v.number(),
 	title: v.string(),
 	minutes: v.number(),
-	state: v.picklist(['failed', 'lapsed']),
+	/** "not yet" only for a step that was never proved and that a lapsed one relies on. */
+	state: v.picklist(['failed', 'lapsed', 'not yet']),
 	why: v.array(CauseSchema),
 	rows: v.exactOptional(v.array(Id)),
 	/** Minutes from now at which it can begin and end, for the people present. */
@@ -125,7 +151,15 @@ export const AnswerSchema = v.strictObject({
 		/** Longest path over relies-on and gate order, for the people present. */
 		earliestFinishMinutes: v.number(),
 	}),
-	deviations: v.array(v.strictObject({ deviation: Id, state: v.picklist(['open', 'dispositioned']), blocks: v.union([v.number(), v.literal('hand-over'), v.literal('nothing')]), raised: InstantSchema, closed: v.exactOptional(InstantSchema) })),
+	deviations: v.array(
+		v.strictObject({
+			deviation: Id,
+			state: v.picklist(['open', 'dispositioned']),
+			blocks: v.union([v.number(), v.literal('hand-over'), v.literal('nothing')]),
+			raised: InstantSchema,
+			closed: v.exactOptional(InstantSchema),
+		}),
+	),
 	plantEvents: v.array(
 		v.strictObject({
 			event: EventId,

@@ -124,9 +124,7 @@ export const StatementSchema = v.strictObject({
 	clock: v.picklist(['agreed', 'not agreed']),
 	declaration: Words,
 	answersRefusal: v.exactOptional(Text),
-	copy: v.exactOptional(
-		v.union([v.strictObject({ made: EventId }), v.strictObject({ skipped: Words })]),
-	),
+	copy: v.exactOptional(v.union([v.strictObject({ made: EventId }), v.strictObject({ skipped: Words })])),
 });
 
 const GateAct = {
@@ -138,7 +136,9 @@ const GateAct = {
 const Finding = v.strictObject({
 	instrument: Id,
 	/** As-found error with its sign: reading minus true value. Negative reads low. */
-	asFound: v.exactOptional(v.strictObject({ error: v.string(), unit: v.string(), tolerance: v.exactOptional(v.string()) })),
+	asFound: v.exactOptional(
+		v.strictObject({ error: v.string(), unit: v.string(), tolerance: v.exactOptional(v.string()) }),
+	),
 	/** Last good check; absent: the newest passing check before this finding. */
 	lastGood: v.exactOptional(InstantSchema),
 	note: v.exactOptional(Text),
@@ -164,7 +164,14 @@ export const START_UP_BODIES = {
 	'entry withdrawn': v.strictObject({ entry: EventId, reason: Words }),
 	'not applicable agreed': v.strictObject({ entry: EventId, reason: v.exactOptional(Text) }),
 	'series attached': v.strictObject({
-		points: v.array(v.strictObject({ point: Id, column: v.exactOptional(Text), unit: v.string(), basis: v.exactOptional(BasisSchema) })),
+		points: v.array(
+			v.strictObject({
+				point: Id,
+				column: v.exactOptional(Text),
+				unit: v.string(),
+				basis: v.exactOptional(BasisSchema),
+			}),
+		),
 		from: InstantSchema,
 		to: InstantSchema,
 		samples: Count,
@@ -214,7 +221,11 @@ export const START_UP_BODIES = {
 	'witness invited': v.strictObject({ step: Id, party: Words, due: InstantSchema }),
 	'witness attended': v.strictObject({ step: Id, witness: Words }),
 	'witness waived': v.strictObject({ step: Id, by: Words, reason: Words }),
-	note: v.strictObject({ text: Words, step: v.exactOptional(Id), attachments: v.exactOptional(v.array(AttachmentSchema)) }),
+	note: v.strictObject({
+		text: Words,
+		step: v.exactOptional(Id),
+		attachments: v.exactOptional(v.array(AttachmentSchema)),
+	}),
 	'shift hand-over': v.strictObject({
 		from: v.array(Id),
 		to: v.array(Id),
@@ -271,12 +282,27 @@ export const START_UP_BODIES = {
 
 /** Every kind of event of a site's log. */
 export const SITE_BODIES = {
-	'instrument registered': v.strictObject({ instrument: Id, serial: Text, point: v.exactOptional(Id), due: v.exactOptional(v.string()) }),
-	'instrument checked': v.strictObject({ instrument: Id, passes: v.boolean(), asFound: v.exactOptional(Text), asLeft: v.exactOptional(Text) }),
+	'instrument registered': v.strictObject({
+		instrument: Id,
+		serial: Text,
+		point: v.exactOptional(Id),
+		due: v.exactOptional(v.string()),
+	}),
+	'instrument checked': v.strictObject({
+		instrument: Id,
+		passes: v.boolean(),
+		asFound: v.exactOptional(Text),
+		asLeft: v.exactOptional(Text),
+	}),
 	'instrument finding': Finding,
 	/** An instrument engineer confirms that a value stays inside limit and guard with the error applied. */
 	'value confirmed': v.strictObject({ finding: EventId, entry: EventId, reason: Words }),
-	'person enrolled': v.strictObject({ person: Id, name: Text, roles: v.array(Id), certificate: v.exactOptional(v.string()) }),
+	'person enrolled': v.strictObject({
+		person: Id,
+		name: Text,
+		roles: v.array(Id),
+		certificate: v.exactOptional(v.string()),
+	}),
 	'device enrolled': v.strictObject({ device: Id, certificate: v.exactOptional(v.string()) }),
 	'training recorded': v.strictObject({ person: Id, training: Words, until: v.exactOptional(v.string()) }),
 	'trust list issued': v.strictObject({ sequence: Count, list: v.record(v.string(), v.unknown()) }),
@@ -284,8 +310,18 @@ export const SITE_BODIES = {
 	'plant described': v.strictObject({ plant: Pinned, changedPoints: v.array(Id) }),
 	'procedure approved': v.strictObject({ procedure: Pinned, roles: v.array(Id) }),
 	'fuel data recorded': v.strictObject({ fuel: Text, hash: v.exactOptional(Hash) }),
-	'temporary state': v.strictObject({ state: Words, owner: v.exactOptional(Id), until: v.exactOptional(InstantSchema), ended: v.exactOptional(v.boolean()) }),
-	'archive receipt': v.strictObject({ dossier: Hash, heads: v.record(v.string(), EventId), archiveNumber: Count, previous: v.nullable(Hash) }),
+	'temporary state': v.strictObject({
+		state: Words,
+		owner: v.exactOptional(Id),
+		until: v.exactOptional(InstantSchema),
+		ended: v.exactOptional(v.boolean()),
+	}),
+	'archive receipt': v.strictObject({
+		dossier: Hash,
+		heads: v.record(v.string(), EventId),
+		archiveNumber: Count,
+		previous: v.nullable(Hash),
+	}),
 } as const;
 
 export type StartUpKind = keyof typeof START_UP_BODIES;

@@ -1,0 +1,28 @@
+/**
+ * record: the append-only log of a start-up, and what stands by it: events, chains, knowledge, standing, gates, merging.
+ * Pure: the same events and instant give the same answer, in whatever order they came. SPEC.md has the rules.
+ * May import: base, quantity, identity, calc, plant, procedure.
+ */
+export { standing } from './standing';
+export type { ActJudged, Cause, GateStanding, PermissiveStanding, ReproofItem, Standing, StepStanding } from './answer';
+export { AnswerSchema } from './answer';
+export {
+	allOf,
+	fromChecked,
+	isEventKind,
+	isOf,
+	parseEventLine,
+	parseEvents,
+	printEventLine,
+	type BodyOf,
+	type EventError,
+	type EventKind,
+	type EventOf,
+	type RecordEvent,
+} from './event';
+export { SITE_BODIES, START_UP_BODIES, type SiteKind, type StartUpKind } from './bodies';
+export { nextEnvelope, textOf, unsignedEvent, type Draft } from './write';
+export { checkChains, headCode, headsOf, type ChainFinding } from './chain';
+export { EnvelopeSchema, type Envelope } from './envelope';
+export { inOrder, Knowledge, merge } from './knowledge';
+export { MINUTE, millis, offsetMinutes, printInstant, type Millis } from './instants';
