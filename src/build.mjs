@@ -51,7 +51,13 @@ function build(product, { quiet }) {
 	const { status, stdout, stderr } = spawnSync(
 		process.execPath,
 		[vite, 'build', ...(product === 'cli' ? ['--mode', 'cli'] : []), ...(quiet ? ['--logLevel', 'error'] : [])],
-		{ cwd: HOUSE, stdio: quiet ? 'pipe' : 'inherit', encoding: 'utf8' },
+		{
+			cwd: HOUSE,
+			stdio: quiet ? 'pipe' : 'inherit',
+			encoding: 'utf8',
+			// Whoever starts us: a test runner's own setting would make a build for development.
+			env: { ...process.env, NODE_ENV: 'production' },
+		},
 	);
 	if (status !== 0) throw new Error(`The build failed.\n${quiet ? stdout + stderr : ''}`);
 	writeFileSync(stampOf(product), sources);

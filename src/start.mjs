@@ -2,7 +2,7 @@
  * Serves the built app: `npm start`. PORT chooses the port. Only this machine is served, unless HOST comes together
  * with TLS_CERT and TLS_KEY: without https a browser gives an app from another machine neither storage nor cryptography.
  */
-import { readFileSync } from 'node:fs';
+import { existsSync, readFileSync } from 'node:fs';
 import http from 'node:http';
 import https from 'node:https';
 import { URL } from 'node:url';
@@ -53,7 +53,7 @@ function readSettings({ PORT, HOST, TLS_CERT, TLS_KEY }) {
 		throw new Error('TLS_CERT and TLS_KEY come together: the files of one certificate and its key.');
 	const tls =
 		TLS_CERT !== undefined && TLS_KEY !== undefined
-			? { cert: readFileSync(TLS_CERT), key: readFileSync(TLS_KEY) }
+			? { cert: readNamed('TLS_CERT', TLS_CERT), key: readNamed('TLS_KEY', TLS_KEY) }
 			: undefined;
 	const host = HOST === undefined || HOST === '' || LOCAL.includes(HOST) ? undefined : HOST;
 	if (host !== undefined && tls === undefined) {
@@ -63,6 +63,15 @@ function readSettings({ PORT, HOST, TLS_CERT, TLS_KEY }) {
 		);
 	}
 	return { port, host, tls };
+}
+
+/**
+ * @param {string} setting
+ * @param {string} path
+ */
+function readNamed(setting, path) {
+	if (!existsSync(path)) throw new Error(`${setting}: there is no file ${path}.`);
+	return readFileSync(path);
 }
 
 /** @param {Settings} settings */
