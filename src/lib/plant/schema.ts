@@ -107,14 +107,16 @@ const MeasuringPoint = v.strictObject({
 	medium: v.picklist(['process gas', 'hot gas', 'inert gas', 'ambient', 'steel', 'oil', 'fuel', 'none']),
 	range: v.strictObject({ from: v.number(), to: v.number() }),
 	resolution: v.exactOptional(MeasureSchema),
-	/** Expanded uncertainty (k = 2) of a reading, in the point's unit. */
+	/** Expanded uncertainty (k = 2) of a reading: a difference, K for degC, mbar for mbar(g). */
 	uncertainty: v.exactOptional(MeasureSchema),
 	principle: v.exactOptional(v.string()),
 	lag: v.exactOptional(MeasureSchema),
 	t90: v.exactOptional(MeasureSchema),
 	instrument: v.exactOptional(Id),
-	/** Centre of the bubble. */
-	sketch: Point,
+	/** Centre of the bubble; absent: not drawn. */
+	sketch: v.exactOptional(Point),
+	/** Side of the bubble on which its value is written. */
+	side: v.exactOptional(v.picklist(['left', 'right'])),
 	/** Where its leader meets the plant; absent: the middle of `at`. */
 	tap: v.exactOptional(Point),
 });
@@ -122,7 +124,7 @@ const MeasuringPoint = v.strictObject({
 const Venturi = v.strictObject({
 	tag: Id,
 	title: Text,
-	variant: v.picklist(['as cast', 'machined', 'rough welded']),
+	variant: v.picklist(['as_cast', 'machined', 'rough_welded']),
 	pipeDiameter: MeasureSchema,
 	throatDiameter: MeasureSchema,
 	expansion: v.strictObject({ value: v.number(), unit: v.literal('1/K') }),
