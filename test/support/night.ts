@@ -131,7 +131,7 @@ export function tellNight(
 	const before = (minutes: number): void => extras(teller, minutes, until, ids);
 	for (const event of ordered) {
 		// What T-1 recorded after 04:50 reached T-2 only at 06:30, but was entered in its own time.
-		if (event.dev === 'T-1') continue;
+		if (event.dev === 'T-1' || event.n === 84) continue;
 		if (event.known > until) break;
 		before(event.known);
 		tell(teller, event, ids);

@@ -10,13 +10,18 @@ import type { InnerCause, StepTrack } from './step-track';
  */
 export type NotEnoughNow = ReadonlyMap<string, InnerCause>;
 
-/** Ages count again when the gate that they had been spent on lost its release (ST4); a `while` needs its condition TRUE. */
+/**
+ * A watch is needed again, and what must be fresh at a gate's release is again, when that gate lost its release (ST4). A
+ * proof of a lower gate, once that gate was released on it, counts again only for a new proof that relies on it; the
+ * re-proof list asks for that. A `while` needs its condition TRUE.
+ */
 export function notEnoughNow(played: Played, permissives: readonly PermissiveStanding[]): NotEnoughNow {
 	const found = new Map<string, InnerCause>();
 	for (const track of played.steps.values()) {
 		const { validity, id } = track.step;
 		const holder = played.gates.find(({ gate }) => gate.number === track.until);
-		if (holder !== undefined && holder.release === undefined && spentAndRunOut(track, played))
+		const neededAgain = track.isWatch || track.until === track.step.gate;
+		if (neededAgain && holder !== undefined && holder.release === undefined && spentAndRunOut(track, played))
 			found.set(id, countsAgain(track));
 		if (validity.kind !== 'while' || !track.required || track.status.state !== 'stands') continue;
 		const value = permissives.find(({ permissive }) => permissive === validity.permissive)?.value ?? 'unknown';
