@@ -23,6 +23,7 @@ export {
 export { SITE_BODIES, START_UP_BODIES, type SiteKind, type StartUpKind } from './bodies';
 export { nextEnvelope, textOf, unsignedEvent, type Draft } from './write';
 export { checkChains, headCode, headsOf, type ChainFinding } from './chain';
+export { headText, keyFor, rightFor, type KeyNeeded } from './signing-rules';
 export { EnvelopeSchema, type Envelope } from './envelope';
 export { inOrder, Knowledge, merge } from './knowledge';
 export { MINUTE, millis, offsetMinutes, printInstant, type Millis } from './instants';
