@@ -1,15 +1,21 @@
 import type { BudgetRow } from './calculator';
 
-/** An input of a model with its expanded uncertainty (k = 2), both in `unit`. */
+/** An input of a model with its expanded uncertainty (k = 2), both in `unit`; without U when nobody stated one. */
 export type Uncertain = {
 	readonly name: string;
 	readonly symbol?: string;
 	readonly value: number;
-	readonly U: number;
+	readonly U?: number;
 	readonly unit: string;
 };
 export type Numbers = { readonly [name: string]: number };
-export type Propagated = { readonly U: Numbers; readonly budget: readonly BudgetRow[] };
+export type Propagated = {
+	/** Only for results whose every input has a stated uncertainty: a sum with a part missing would look too good. */
+	readonly U: Numbers;
+	readonly budget: readonly BudgetRow[];
+	/** Inputs without a stated uncertainty that some result depends on. */
+	readonly unstated: readonly string[];
+};
 
 /**
  * Expanded uncertainty of results whose inputs are uncertain: how far the flow, or a clearance, can be from what was read.
@@ -25,31 +31,37 @@ export type Propagated = { readonly U: Numbers; readonly budget: readonly Budget
  */
 export function propagate(model: (values: Numbers) => Numbers, inputs: readonly Uncertain[]): Propagated {
 	const centre = Object.fromEntries(inputs.map((input) => [input.name, input.value]));
-	const slopes = inputs
-		.filter((input) => input.U > 0)
-		.map((input) => {
-			const step = input.U * STEP;
-			const above = model({ ...centre, [input.name]: input.value + step });
-			const below = model({ ...centre, [input.name]: input.value - step });
-			return { input, slope: (output: string) => ((above[output] ?? 0) - (below[output] ?? 0)) / (2 * step) };
-		});
-	const outputs = Object.keys(model(centre));
-	const U = Object.fromEntries(
-		outputs.map((output) => [output, Math.hypot(...slopes.map(({ input, slope }) => slope(output) * input.U))]),
-	);
-	const budget = outputs.flatMap((output) =>
-		slopes.flatMap(({ input, slope }): BudgetRow[] => {
-			const sensitivity = slope(output);
-			const { name, symbol, unit } = input;
-			const total = U[output] ?? 0;
-			if (sensitivity === 0 || total === 0) return [];
-			const share = ((sensitivity * input.U) / total) ** 2;
-			return [
-				{ output, input: name, ...(symbol === undefined ? {} : { symbol }), U: input.U, unit, sensitivity, share },
-			];
-		}),
-	);
-	return { U, budget };
+	const slopes = inputs.filter((input) => input.U !== 0).map((input) => slopesOf(model, centre, input));
+	const unstated = slopes.filter(({ input }) => input.U === undefined);
+	const outputs = Object.keys(model(centre)).filter((output) => unstated.every(({ slope }) => slope(output) === 0));
+	const rows = outputs.map((output) => {
+		const parts = slopes
+			.map(({ input, slope }) => ({ input, sensitivity: slope(output), part: slope(output) * (input.U ?? 0) }))
+			.filter(({ part }) => part !== 0);
+		return { output, parts, U: Math.hypot(...parts.map(({ part }) => part)) };
+	});
+	return {
+		U: Object.fromEntries(rows.map(({ output, U }) => [output, U])),
+		budget: rows.flatMap(({ output, parts, U }) =>
+			parts.map(({ input: { name, value: _, ...input }, sensitivity, part }) => ({
+				...input,
+				output,
+				input: name,
+				U: input.U ?? 0,
+				sensitivity,
+				share: (part / U) ** 2,
+			})),
+		),
+		unstated: unstated.filter(({ slope }) => Object.keys(model(centre)).some(slope)).map(({ input }) => input.name),
+	};
+}
+
+/** How each result follows one input; where no uncertainty is stated, only whether it follows at all. */
+function slopesOf(model: (values: Numbers) => Numbers, centre: Numbers, input: Uncertain) {
+	const step = STEP * (input.U ?? Math.max(Math.abs(input.value), STEP));
+	const above = model({ ...centre, [input.name]: input.value + step });
+	const below = model({ ...centre, [input.name]: input.value - step });
+	return { input, slope: (output: string) => ((above[output] ?? 0) - (below[output] ?? 0)) / (2 * step) };
 }
 
 const STEP = 1e-3;

@@ -104,3 +104,28 @@ while len(cases) < 40:
     if result["Re_D"] >= 2e5 and inputs["x"]["H2O"] * inputs["p1"] < 47e3:
         cases.append({"type": kind, "inputs": inputs, "expect": result})
 write(FOLDER / "random.json", cases)
+
+# The way back: the difference pressure or the throat for 80 % of the flow.
+inverse = []
+for name in ("V05", "V07", "V12", "V16"):
+    case = json.loads(next(FOLDER.glob(f"{name}*.json")).read_text(encoding="utf-8"))
+    i, meter = case["inputs"], METER[case["type"]]
+    qm = 0.8 * case["expect"]["qm"]
+    gas = {"rho": i["rho1"], "mu": i["mu"], "k": i["kappa"]}
+    p2 = differential_pressure_meter_solver(D=i["D"], D2=i["d"], P1=i["p1"], P2=None, m=qm, meter_type=meter, **gas)
+    d = differential_pressure_meter_solver(D=i["D"], D2=None, P1=i["p1"], P2=i["p1"] - i["dp"], m=qm, meter_type=meter, **gas)
+    inverse.append({"of": name, "C": case["expect"]["C"], "inputs": i, "qm": qm, "dp": i["p1"] - p2, "d": d})
+write(FOLDER / "inverse.json", inverse)
+
+# Expansibility alone, with exponents at and near one; kappa = 1 is the limit form of fluids.
+from fluids.flow_meter import nozzle_expansibility
+
+write(
+    FOLDER / "expansibility.json",
+    [
+        {"beta": beta, "tau": tau, "kappa": kappa, "epsilon": nozzle_expansibility(D=1, Do=beta, P1=1e5, P2=tau * 1e5, k=kappa)}
+        for beta in (0.3, 0.5, 0.6, 0.75)
+        for tau in (0.75, 0.9, 0.99, 0.999)
+        for kappa in (1, 1.1, 1.285, 1.4, 1.667)
+    ],
+)

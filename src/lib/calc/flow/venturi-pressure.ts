@@ -1,0 +1,121 @@
+import { fail, ok, type Result } from '../../base';
+import { absolutePressure, si } from '../../quantity';
+import type { CalcNote, Refusal } from '../calculator';
+import { LIVE_SIGNAL } from '../constants';
+import type { Uncertain } from '../uncertainty';
+import { characteristicSeen, differencePressureOf } from './flow-signal';
+import { meanOfRoots, PULSATION_LIMIT } from './mean-of-roots';
+import type { VenturiGiven } from './venturi-inputs';
+
+/** Upstream pressure as the inputs of the model that make it up: absolute, or gauge and barometer. */
+export function upstreamPressure(given: VenturiGiven): Result<readonly Uncertain[], readonly Refusal[]> {
+	const { pressure, pressureGauge, barometer } = given;
+	if ((pressure === undefined) === (pressureGauge === undefined)) {
+		return fail([{ kind: 'one-of', inputs: ['pressure', 'pressureGauge'], given: pressure === undefined ? 0 : 2 }]);
+	}
+	if (pressure !== undefined) return ok([{ ...pressure, name: 'pressure', symbol: 'p1', unit: 'Pa(a)' }]);
+	if (pressureGauge === undefined || barometer === undefined) {
+		return fail([{ kind: 'gauge-without-barometer', input: 'pressureGauge', needs: 'barometer' }]);
+	}
+	const absolute = absolutePressure(pressureGauge.value, barometer.value);
+	if (!absolute.ok) return fail([{ input: 'pressureGauge', ...absolute.error }]);
+	return ok([
+		{ ...pressureGauge, name: 'pressureGauge', symbol: 'p_g', unit: 'Pa(g)' },
+		{ ...barometer, name: 'barometer', symbol: 'p_b', unit: 'Pa(a)' },
+	]);
+}
+
+export type DifferencePressure = { readonly dp: Uncertain; readonly notes: readonly CalcNote[] };
+
+/**
+ * The difference pressure that counts, from one reading, a series or a signal: none below the low-flow cut-off, refused
+ * when negative, since the root of its size would hide a reverse flow.
+ */
+export function differencePressure(given: VenturiGiven): Result<DifferencePressure, readonly Refusal[]> {
+	const read = given.signal === undefined || given.dp !== undefined ? byReading(given) : bySignal(given);
+	if (!read.ok) return read;
+	const { dp, notes } = read.value;
+	const span = given.dpSpan?.value;
+	if (span !== undefined && dp.value > span * RANGE_END) {
+		return fail([{ kind: 'above-span', input: dp.name, value: dp.value, span, unit: 'Pa' }]);
+	}
+	const cutOff = span === undefined ? 0 : span * given.lowFlowCutOff.value;
+	const cutOffNote = { cutOff, part: given.lowFlowCutOff.value, dp: dp.value };
+	if (dp.value < 0 && !(-dp.value < cutOff)) {
+		return fail([{ kind: 'negative-difference-pressure', input: dp.name, value: dp.value, unit: 'Pa' }]);
+	}
+	if (dp.value <= 0 || dp.value < cutOff) {
+		return ok({
+			dp: { ...dp, value: 0 },
+			notes: [...notes, { kind: 'below-low-flow-cut-off', level: 'outside scope', ...cutOffNote }],
+		});
+	}
+	const printed: readonly CalcNote[] =
+		span === undefined ? [] : [{ kind: 'low-flow-cut-off', level: 'remark', ...cutOffNote }];
+	return ok({ dp, notes: [...notes, ...printed] });
+}
+
+function byReading(given: VenturiGiven): Result<DifferencePressure, readonly Refusal[]> {
+	const { dp, dpSeries } = given;
+	if ((dp === undefined) === (dpSeries === undefined)) {
+		return fail([{ kind: 'one-of', inputs: ['dp', 'dpSeries', 'signal'], given: dp === undefined ? 0 : 2 }]);
+	}
+	if (dp !== undefined) {
+		return ok({ dp: { ...dp, name: 'dp', symbol: 'dp', unit: 'Pa' }, notes: characteristicNotes(given, dp.value) });
+	}
+	const series = dpSeries ?? [];
+	const reversed = series.flatMap(({ value }, i): Refusal[] =>
+		value < 0 ? [{ kind: 'negative-difference-pressure', input: `dpSeries[${i}]`, value, unit: 'Pa' }] : [],
+	);
+	if (reversed.length > 0) return fail(reversed);
+	const { dp: value, pulsation, overread } = meanOfRoots(series.map((reading) => reading.value));
+	const scatter = (2 * pulsation * value) / Math.sqrt(series.length);
+	const systematic = series.map((reading) => reading.U ?? NaN).reduce((most, U) => Math.max(most, U), 0);
+	const notes: readonly CalcNote[] = [
+		{ kind: 'mean-of-roots', level: 'remark', readings: series.length, pulsation, overread },
+		...(pulsation > PULSATION_LIMIT
+			? [{ kind: 'pulsating-flow', level: 'outside scope', pulsation, limit: PULSATION_LIMIT } as const]
+			: []),
+	];
+	const U = Number.isNaN(systematic) ? {} : { U: Math.hypot(systematic, scatter) };
+	return ok({ dp: { name: 'dpSeries', symbol: 'dp', value, unit: 'Pa', ...U }, notes });
+}
+
+function bySignal(given: VenturiGiven): Result<DifferencePressure, readonly Refusal[]> {
+	const { signal, dpSpan, transmitter, dpSeries } = given;
+	if (signal === undefined || dpSeries !== undefined) {
+		return fail([{ kind: 'one-of', inputs: ['dp', 'dpSeries', 'signal'], given: 2 }]);
+	}
+	if (dpSpan === undefined) return fail([{ kind: 'missing-input', input: 'dpSpan', neededBy: 'signal' }]);
+	if (!(signal.value >= LIVE_SIGNAL.min && signal.value <= LIVE_SIGNAL.max)) {
+		return fail([{ kind: 'signal-fault', input: 'signal', value: signal.value, unit: 'A', ...LIVE_SIGNAL }]);
+	}
+	const at = (current: number) => differencePressureOf(current, dpSpan.value, transmitter);
+	const U =
+		signal.U === undefined ? {} : { U: Math.abs(at(signal.value + signal.U) - at(signal.value - signal.U)) / 2 };
+	return ok({
+		dp: { name: 'signal', symbol: 'dp', value: at(signal.value), unit: 'Pa', ...U },
+		notes: characteristicNotes(given, undefined),
+	});
+}
+
+/** Whether the root is taken twice: by what the two ends are set to, and by a second reading when there is one. */
+function characteristicNotes(given: VenturiGiven, dp: number | undefined): readonly CalcNote[] {
+	const { signal, dpSpan, transmitter, controlSystem } = given;
+	const notes: CalcNote[] = [];
+	if (transmitter === 'root' && controlSystem === 'root')
+		notes.push({ kind: 'root-taken-twice', level: 'outside scope' });
+	if (signal !== undefined && dpSpan !== undefined && dp !== undefined) {
+		const seen = characteristicSeen(signal.value, dpSpan.value, dp);
+		const agrees = seen === transmitter || seen === 'cannot tell';
+		notes.push({ kind: 'characteristic-seen', level: agrees ? 'remark' : 'outside scope', seen, setTo: transmitter });
+	}
+	return notes;
+}
+
+/** 20.5 mA: beyond it the sensor is out of its range. */
+const RANGE_END = (LIVE_SIGNAL.max - 4e-3) / 16e-3;
+
+/** Upstream pressure of a set of model values. */
+export const pressureOf = (values: { readonly [name: string]: number }): number =>
+	si('pressure-absolute', values['pressure'] ?? (values['pressureGauge'] ?? NaN) + (values['barometer'] ?? NaN));

@@ -1,0 +1,103 @@
+import type { CalcNote } from '../calculator';
+import { STEEL_EXPANSION, T_20 } from '../constants';
+import type { Coefficient } from './discharge-coefficient';
+import type { VenturiGiven } from './venturi-inputs';
+import { isInside, VENTURI_TYPES, type Limits } from './venturi-types';
+
+/** What the limits are judged by. */
+export type VenturiFacts = {
+	readonly D: number;
+	readonly beta: number;
+	readonly reynolds: number;
+	readonly dp: number;
+	readonly pressure: number;
+	readonly kappa: number;
+	readonly coefficient: Coefficient;
+	/** What the constant of the type would have given, for comparison where it does not hold. */
+	readonly massFlowAtConstant: number;
+};
+
+/** Everything that takes a result out of the standard's scope, and what else a reader must know about it. */
+export function venturiScope(given: VenturiGiven, facts: VenturiFacts): readonly CalcNote[] {
+	return [...limitNotes(given, facts), ...readingNotes(given, facts), ...installationNotes(given, facts)];
+}
+
+function limitNotes(given: VenturiGiven, facts: VenturiFacts): readonly CalcNote[] {
+	const limits: Limits = VENTURI_TYPES[given.type];
+	const { edition } = limits;
+	const judged = [
+		{ limit: 'D', value: facts.D, unit: 'm', range: limits.D },
+		{ limit: 'beta', value: facts.beta, unit: '1', range: limits.beta },
+		{ limit: 'Re_D', value: facts.reynolds, unit: '1', range: limits.Re_D },
+	];
+	const outside = judged
+		.filter(({ value, range }) => !isInside(value, range))
+		.map(({ range: [min, max], ...each }): CalcNote => ({
+			kind: 'outside-limit',
+			level: 'outside scope',
+			...each,
+			min,
+			max,
+			edition,
+		}));
+	const { coefficient, massFlowAtConstant } = facts;
+	if (coefficient.from === 'standard') return outside;
+	const { C, U = null, from } = coefficient;
+	return [
+		...outside,
+		{
+			kind: 'coefficient-not-of-the-standard',
+			level: 'outside scope',
+			C,
+			U,
+			from,
+			constant: limits.C,
+			massFlowAtConstant,
+		},
+	];
+}
+
+function readingNotes(given: VenturiGiven, { dp, pressure, kappa }: VenturiFacts): readonly CalcNote[] {
+	const notes: CalcNote[] = [];
+	const { dpSpan, dpZero, temperature, temperatureTaken, thermalExpansion } = given;
+	if (dpSpan !== undefined && dp < LEAST_PART * dpSpan.value) {
+		notes.push({ kind: 'dp-low-in-span', level: 'outside scope', dp, span: dpSpan.value, least: LEAST_PART });
+	}
+	if (dpZero !== undefined && dpZero.value !== 0) {
+		const flowError = Math.sqrt(Math.max(0, dp + dpZero.value) / dp) - 1;
+		const level = Math.abs(flowError) > ZERO_EFFECT ? 'outside scope' : 'remark';
+		notes.push({ kind: 'zero-shifted', level, dpZero: dpZero.value, flowError });
+	}
+	if (temperatureTaken === 'downstream') {
+		const colderByAtMost = temperature.value * (1 - (1 - dp / pressure) ** ((kappa - 1) / kappa));
+		notes.push({ kind: 'temperature-from-downstream', level: 'warning', colderByAtMost });
+	}
+	const growth = 2 * STEEL_EXPANSION * Math.abs(temperature.value - T_20);
+	if (thermalExpansion === undefined && growth > GROWTH_EFFECT) {
+		notes.push({ kind: 'diameters-taken-as-hot', level: 'warning', flowErrorIfFromDrawing: growth });
+	}
+	return notes;
+}
+
+function installationNotes(given: VenturiGiven, { D }: VenturiFacts): readonly CalcNote[] {
+	const notes: CalcNote[] = [];
+	const { dpCalibration, dust, flowCalibration, throatCondition, straightLength, straightLengthNeeded } = given;
+	if (dpCalibration === 'none') notes.push({ kind: 'no-calibration-certificate', level: 'outside scope' });
+	if (dust === 'present' && flowCalibration === 'none') notes.push({ kind: 'dust-laden', level: 'outside scope' });
+	if (throatCondition === 'worn or built up') notes.push({ kind: 'throat-changed', level: 'outside scope' });
+	if (straightLength !== undefined && straightLengthNeeded !== undefined) {
+		const has = straightLength.value / D;
+		const needs = straightLengthNeeded.value;
+		if (has < needs) notes.push({ kind: 'straight-length-short', level: 'outside scope', has, needs });
+	}
+	const unknown = Object.entries({ dpCalibration, dust, throatCondition, straightLength, straightLengthNeeded })
+		.filter(([, value]) => value === undefined)
+		.map(([name]) => name);
+	if (unknown.length > 0) notes.push({ kind: 'installation-not-stated', level: 'remark', inputs: unknown });
+	return notes;
+}
+
+/** Below this part of the span the root makes too much of the transmitter's error (common practice). */
+const LEAST_PART = 0.05;
+const ZERO_EFFECT = 0.01;
+const GROWTH_EFFECT = 1e-3;
