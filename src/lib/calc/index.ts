@@ -21,3 +21,4 @@ export type {
 } from './calculator';
 export { CATALOGUE, latest, runCalculator } from './catalogue';
 export { CONSTANTS, OXYGEN_IN_AIR } from './constants';
+export { allowedOxygen } from './purge/allowed-oxygen';

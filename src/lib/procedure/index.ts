@@ -5,7 +5,6 @@
  */
 export {
 	ProcedureSchema,
-	type Binding,
 	type Gate,
 	type LapsedBy,
 	type LimitUse,
@@ -17,6 +16,7 @@ export {
 	type StepKind,
 	type Validity,
 } from './schema';
+export type { Binding } from './binding';
 export { readCondition, type Condition, type ConditionFinding } from './condition';
 export {
 	evaluatePermissive,
@@ -28,3 +28,10 @@ export {
 	type UnknownBecause,
 	type WhyUnknown,
 } from './permissive';
+export { checkProcedure, parseProcedure } from './check-procedure';
+export type { Against } from './check-names';
+export type { ProcedureFinding, UnknownThing } from './finding';
+export { fieldsOf, type Field } from './fields';
+export { bindInputs, type Around, type MissingInput } from './bind-inputs';
+export type { BoundReading, BoundRow, BoundSeries, Lookup } from './lookup';
+export { atPlantPath } from './plant-path';

@@ -1,7 +1,7 @@
 import * as v from 'valibot';
 import type { DeepReadonly } from '../base';
 import { BasisSchema } from '../plant';
-import { type BindingSchema, type LimitUseSchema, StepSchema } from './step';
+import { StepSchema, type LimitUseSchema } from './step';
 import { GateNumber, type LapsedBySchema, type ValiditySchema } from './validity';
 
 const Id = v.pipe(v.string(), v.regex(/^[A-Za-z0-9][A-Za-z0-9._-]{0,63}$/));
@@ -103,5 +103,4 @@ export type LapsedBy = DeepReadonly<v.InferOutput<typeof LapsedBySchema>>;
 export type Permissive = DeepReadonly<v.InferOutput<typeof PermissiveSchema>>;
 export type PlantEventKind = DeepReadonly<v.InferOutput<typeof PlantEventKindSchema>>;
 export type StartType = DeepReadonly<v.InferOutput<typeof StartTypeSchema>>;
-export type Binding = DeepReadonly<v.InferOutput<typeof BindingSchema>>;
 export type LimitUse = DeepReadonly<v.InferOutput<typeof LimitUseSchema>>;

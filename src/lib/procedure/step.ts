@@ -1,5 +1,6 @@
 import * as v from 'valibot';
 import { BasisSchema, MeasureSchema, SourceSchema } from '../plant';
+import { BindingSchema } from './binding';
 import { GateNumber, LapsedBySchema, ValiditySchema } from './validity';
 
 const Id = v.pipe(v.string(), v.regex(/^[A-Za-z0-9][A-Za-z0-9._-]{0,63}$/));
@@ -26,19 +27,6 @@ const Field = v.strictObject({
 	basis: v.exactOptional(BasisSchema),
 	limit: v.exactOptional(LimitUseSchema),
 });
-
-/** Where a calculator's input comes from, so that nobody types what is known. */
-export const BindingSchema = v.variant('from', [
-	v.strictObject({ from: v.literal('field'), step: Id, field: Id }),
-	v.strictObject({ from: v.literal('series'), step: Id }),
-	v.strictObject({ from: v.literal('coverage'), step: Id }),
-	v.strictObject({ from: v.literal('result'), step: Id, output: Id }),
-	/** A slash path through the plant description, lists by id or tag: "venturis/FT-201/pipeDiameter". */
-	v.strictObject({ from: v.literal('plant'), path: v.string() }),
-	v.strictObject({ from: v.literal('limit'), limit: Id, side: v.picklist(['atMost', 'atLeast', 'guard']) }),
-	v.strictObject({ from: v.literal('procedure'), value: v.unknown() }),
-	v.strictObject({ from: v.literal('typed'), title: Text }),
-]);
 
 const shared = {
 	id: Id,
@@ -119,6 +107,10 @@ export const StepSchema = v.variant('kind', [
 				id: Id,
 				volume: Id,
 				answers: v.array(v.picklist(['measured', 'swept, outlet read', 'shut off, inerted by itself'])),
+				/** The measuring point that reads the volume, when one does. */
+				point: v.exactOptional(Id),
+				/** What keeps it inerted by itself when it is shut off. */
+				inertedBy: v.exactOptional(Text),
 			}),
 		),
 	}),
