@@ -51,9 +51,14 @@ export async function makeBase(): Promise<{ readonly bytes: Bytes; readonly ink:
 const inkOf = (font: PDFFont): Ink => ({
 	resource: 'Ink',
 	encode: (text) => {
-		const missing = [...text].find((character) => !font.getCharacterSet().includes(character.codePointAt(0) ?? 0));
+		const missing = Array.from(text).find(
+			(character) => !font.getCharacterSet().includes(character.codePointAt(0) ?? 0),
+		);
 		if (missing !== undefined) {
-			return { ok: false, error: { codePoint: `U+${missing.codePointAt(0)!.toString(16).toUpperCase().padStart(4, '0')}` } };
+			return {
+				ok: false,
+				error: { codePoint: `U+${missing.codePointAt(0)!.toString(16).toUpperCase().padStart(4, '0')}` },
+			};
 		}
 		const hex = font.encodeText(text).toString().slice(1, -1);
 		return { ok: true, value: { hex, width: font.widthOfTextAtSize(text, 1000) } };
@@ -65,12 +70,27 @@ export type Signers = { readonly [field in (typeof FIELDS)[number]]: TestSigner 
 export async function makeSigners(site: TestSite): Promise<Signers> {
 	return {
 		sig_performed: await site.enrol({ person: 'P-01', printedName: 'Ada Example', roles: ['technician'] }),
-		sig_reviewed: await site.enrol({ person: 'P-02', printedName: 'Bo Example, jun.', roles: ['shift supervisor'], device: 'T-2' }),
-		sig_accepted: await site.enrol({ person: 'P-03', printedName: 'Cyra Example', roles: ['commissioning lead'], device: 'T-2' }),
+		sig_reviewed: await site.enrol({
+			person: 'P-02',
+			printedName: 'Bo Example, jun.',
+			roles: ['shift supervisor'],
+			device: 'T-2',
+		}),
+		sig_accepted: await site.enrol({
+			person: 'P-03',
+			printedName: 'Cyra Example',
+			roles: ['commissioning lead'],
+			device: 'T-2',
+		}),
 	};
 }
 
-export function closing(site: TestSite, signer: TestSigner, field: (typeof FIELDS)[number], ink: Ink): ClosingSignature {
+export function closing(
+	site: TestSite,
+	signer: TestSigner,
+	field: (typeof FIELDS)[number],
+	ink: Ink,
+): ClosingSignature {
 	const i = FIELDS.indexOf(field);
 	const { subject } = signer.certificate;
 	return {

@@ -8,6 +8,7 @@ import {
 	type OpenSiteRoot,
 	type Role,
 	type SigningKey,
+	type TrustList,
 } from '../../src/lib/identity';
 
 /** An invented site with people who can sign: the real certificates, without PINs, which cost a second each. */
@@ -27,7 +28,9 @@ export type TestSigner = { readonly certificate: Certificate; readonly key: Sign
 const PASSPHRASE = 'eight invented words that open one test root';
 
 export async function makeTestSite(name = 'Invented Lime Works'): Promise<TestSite> {
-	const file = value(await makeSiteRoot({ name, now: '2026-01-01T00:00:00Z', passphrase: PASSPHRASE, random: webRandom }));
+	const file = value(
+		await makeSiteRoot({ name, now: '2026-01-01T00:00:00Z', passphrase: PASSPHRASE, random: webRandom }),
+	);
 	const root = value(await openSiteRoot(file, PASSPHRASE));
 	return { root, enrol: (person) => enrol(root, person) };
 }
@@ -40,8 +43,23 @@ async function enrol(root: OpenSiteRoot, person: TestPerson): Promise<TestSigner
 	return { certificate: value(issued), key };
 }
 
+/** A list that was in date when the test people signed, and revokes nobody. */
+export const testTrustList = (site: TestSite, more: Partial<TrustList> = {}): TrustList => ({
+	kind: 'trust list',
+	v: 1,
+	site: site.root.certificate.issuer.replace(/^CN=/, ''),
+	sequence: 1,
+	issued: '2026-05-10T00:00:00Z',
+	nextUpdate: '2026-05-17T00:00:00Z',
+	certificates: [],
+	revocations: [],
+	...more,
+});
+
 /** The value, where the test is about something else and a refusal would be a mistake of the test. */
-export function value<T>(result: { readonly ok: true; readonly value: T } | { readonly ok: false; readonly error: unknown }): T {
+export function value<T>(
+	result: { readonly ok: true; readonly value: T } | { readonly ok: false; readonly error: unknown },
+): T {
 	if (result.ok) return result.value;
 	throw new Error(`unexpected refusal: ${JSON.stringify(result.error)}`);
 }

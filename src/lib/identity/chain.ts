@@ -16,7 +16,8 @@ export type ChainQuestion = {
 	readonly issuers?: readonly Uint8Array<ArrayBuffer>[];
 	readonly times: Times;
 	readonly trustList?: TrustList | undefined;
-	readonly scope?: Scope;
+	/** What the act needed of its signer; nothing is said about it when nothing is asked. */
+	readonly scope?: Scope | undefined;
 };
 
 export type ChainAnswer = {
@@ -25,6 +26,8 @@ export type ChainAnswer = {
 	/** Every rule that could be asked, not the first that did not pass. */
 	readonly findings: readonly ChainFinding[];
 	readonly certificate?: Certificate;
+	/** DER of the certificates that lead to the root, the signer's first; the signer's alone when none does. */
+	readonly path: readonly Uint8Array<ArrayBuffer>[];
 };
 
 /**
@@ -38,18 +41,18 @@ export async function checkChain(question: ChainQuestion): Promise<ChainAnswer> 
 	const root = parseX509(question.root);
 	if (!read.ok || !leaf.ok) {
 		const facts = { because: !read.ok ? read.error.kind : 'not-a-certificate' };
-		return answer([{ rule: 'certificate', outcome: 'undecided', sub: 'NO_SIGNING_CERTIFICATE_FOUND', facts }]);
+		const finding = { rule: 'certificate', outcome: 'undecided', sub: 'NO_SIGNING_CERTIFICATE_FOUND', facts } as const;
+		return { ...verdictOf([finding]), findings: [finding], path: [] };
 	}
-	if (!root.ok) {
-		const facts = { because: 'the root that was given is not a certificate' };
-		return answer([{ rule: 'path', outcome: 'undecided', sub: 'NO_CERTIFICATE_CHAIN_FOUND', facts }], read.value);
-	}
-	const { path, finding } = await findPath(leaf.value, root.value, question.issuers ?? []);
+	const certificate = read.value;
+	const { path, finding } = root.ok
+		? await findPath(leaf.value, root.value, question.issuers ?? [])
+		: { path: [leaf.value], finding: NO_ROOT };
 	const findings: readonly ChainFinding[] = [
 		{
 			rule: 'certificate',
 			outcome: 'passed',
-			facts: { fingerprint: read.value.fingerprint, serial: read.value.serial },
+			facts: { fingerprint: certificate.fingerprint, serial: certificate.serial },
 		},
 		finding,
 		judgeAlgorithms(path),
@@ -57,17 +60,22 @@ export async function checkChain(question: ChainQuestion): Promise<ChainAnswer> 
 		judgeClaimedTime(question.times),
 		judgeValidity(path, question.times, question.trustList),
 		judgeRevocation(path, question.times, question.trustList),
-		judgeScope(read.value, question.scope ?? {}),
+		...(question.scope === undefined ? [] : [judgeScope(certificate, question.scope)]),
 	];
-	return answer(findings, read.value);
+	return { ...verdictOf(findings), findings, certificate, path: path.map(({ rawData }) => new Uint8Array(rawData)) };
 }
 
-function answer(findings: readonly ChainFinding[], certificate?: Certificate): ChainAnswer {
-	const worst =
-		findings.find(({ sub }) => sub !== undefined && classOf(sub) === 'TOTAL-FAILED') ?? findings.find(({ sub }) => sub);
-	const named = certificate === undefined ? {} : { certificate };
-	if (worst?.sub === undefined) return { class: 'TOTAL-PASSED', findings, ...named };
-	return { class: classOf(worst.sub), sub: worst.sub, findings, ...named };
+const NO_ROOT: ChainFinding = {
+	rule: 'path',
+	outcome: 'undecided',
+	sub: 'NO_CERTIFICATE_CHAIN_FOUND',
+	facts: { because: 'the root that was given is not a certificate' },
+};
+
+function verdictOf(findings: readonly ChainFinding[]): Pick<ChainAnswer, 'class' | 'sub'> {
+	const bad = findings.map(({ sub }) => sub).filter((sub) => sub !== undefined);
+	const sub = bad.find((one) => classOf(one) === 'TOTAL-FAILED') ?? bad[0];
+	return sub === undefined ? { class: 'TOTAL-PASSED' } : { class: classOf(sub), sub };
 }
 
 /** From the signer's certificate to the root, by names first and then by signatures; at most one issuer between. */

@@ -1,0 +1,89 @@
+import { Unzlib } from 'fflate';
+import { concat } from '../../base';
+import { attempt, damaged, type Damage } from './damage';
+import { objectIn, resolve, type PdfFile } from './pdf-file';
+import { get, itemsOf, nameOf, refOf, textOf, type PdfObject, type PdfValue } from './value';
+import type { Result } from '../../base';
+
+type Bytes = Uint8Array<ArrayBuffer>;
+
+export type Attachment = { readonly name: string; readonly mediaType: string | undefined; readonly bytes: Bytes };
+
+/**
+ * The files that a dossier carries, out of its first state: a later update cannot put others in their place, because
+ * nobody looks at what it brings.
+ */
+export function readAttachments(file: PdfFile): Result<readonly Attachment[], Damage> {
+	return attempt(() => {
+		const root = resolve(file, get(file.revisions[0]?.trailer, 'Root'), 0);
+		const names = resolve(file, get(root, 'Names'), 0);
+		const found = new Map<string, Attachment>();
+		let room = MAX_BYTES;
+		for (const specification of leaves(file, get(names, 'EmbeddedFiles'), 0)) {
+			const attachment = readFile(file, specification, room);
+			if (found.has(attachment.name)) damaged(specification.from, `one attachment named ${attachment.name}`);
+			found.set(attachment.name, attachment);
+			room -= attachment.bytes.length;
+		}
+		return [...found.values()];
+	});
+}
+
+/** Unpacked, all attachments together; some hundreds of photos. */
+const MAX_BYTES = 512 * 1024 * 1024;
+const MAX_DEPTH = 8;
+
+/** File specifications of a name tree (ISO 32000-1, 7.9.6). */
+function leaves(file: PdfFile, node: PdfValue | undefined, depth: number): readonly PdfValue[] {
+	const dict = resolve(file, node, 0);
+	if (dict === undefined) return [];
+	if (depth > MAX_DEPTH) return damaged(dict.from, `a tree of at most ${MAX_DEPTH} levels`);
+	const pairs = itemsOf(resolve(file, get(dict, 'Names'), 0));
+	const here = pairs.filter((_, i) => i % 2 === 1).map((value) => resolve(file, value, 0));
+	const below = itemsOf(resolve(file, get(dict, 'Kids'), 0)).flatMap((kid) => leaves(file, kid, depth + 1));
+	return [...here.filter((value) => value !== undefined), ...below];
+}
+
+function readFile(file: PdfFile, specification: PdfValue, room: number): Attachment {
+	const name = textOf(get(specification, 'UF')) ?? textOf(get(specification, 'F'));
+	if (name === undefined) return damaged(specification.from, 'the name of an attachment');
+	const embedded = resolve(file, get(specification, 'EF'), 0);
+	const stream = objectIn(file, refOf(get(embedded, 'F') ?? get(embedded, 'UF')), 0);
+	if (stream?.stream === undefined) return damaged(specification.from, `the bytes of ${name}`);
+	return { name, mediaType: nameOf(get(stream.value, 'Subtype')), bytes: unpack(file, stream, stream.stream, room) };
+}
+
+function unpack(
+	file: PdfFile,
+	{ value }: PdfObject,
+	place: { readonly from: number; readonly to: number },
+	room: number,
+): Bytes {
+	const packed = file.bytes.slice(place.from, place.to);
+	const filter = get(value, 'Filter');
+	const filters = filter?.type === 'array' ? filter.items.map(nameOf) : filter === undefined ? [] : [nameOf(filter)];
+	if (filters.length === 0) return packed.length > room ? damaged(place.from, 'fewer bytes') : packed;
+	if (filters.join() !== 'FlateDecode') return damaged(value.from, 'FlateDecode and no other filter');
+	return inflate(packed, place.from, room);
+}
+
+/** Counts while it unpacks: a small file can hold a very large one. */
+function inflate(packed: Bytes, at: number, room: number): Bytes {
+	const parts: Uint8Array[] = [];
+	let length = 0;
+	const unpacking = new Unzlib((part) => {
+		length += part.length;
+		if (length > room) damaged(at, `at most ${MAX_BYTES} bytes of attachments`);
+		parts.push(part.slice());
+	});
+	try {
+		for (let i = 0; i < packed.length; i += CHUNK)
+			unpacking.push(packed.subarray(i, i + CHUNK), i + CHUNK >= packed.length);
+	} catch (error) {
+		if (error instanceof Error && 'code' in error) return damaged(at, `packed bytes (${error.message})`);
+		throw error;
+	}
+	return concat(...parts);
+}
+
+const CHUNK = 64 * 1024;
