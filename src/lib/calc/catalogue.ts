@@ -1,9 +1,11 @@
 import { fail, type Result } from '../base';
 import type { CalcResult, Calculator, Refusal } from './calculator';
+import { purgeAdequacy } from './purge/purge-adequacy';
 import { sweepPurge } from './purge/sweep-purge';
 
 /** Every calculator ever released, by id@version. A line is never taken out: old records recompute with it. */
 export const CATALOGUE: { readonly [idAtVersion: string]: Calculator } = {
+	'purge-adequacy@1': purgeAdequacy,
 	'sweep-purge@1': sweepPurge,
 };
 

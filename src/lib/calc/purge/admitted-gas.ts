@@ -1,12 +1,12 @@
 import type { Meter } from './circuit-input';
+import type { Stretch } from './notes';
 import type { Point } from './series-input';
-import type { Window } from './trend';
 
 export type Admitted = {
 	readonly value: number;
 	readonly U: number;
 	/** Stretches between flow readings that are too long to count. */
-	readonly gaps: readonly (Window & { readonly meter: string })[];
+	readonly gaps: readonly (Stretch & { readonly meter: string })[];
 };
 
 /**
@@ -24,7 +24,7 @@ export type Admitted = {
  */
 export function admittedGas(
 	meters: readonly (Meter & { readonly points: readonly Point[] })[],
-	window: Window & { readonly longestGap: number },
+	window: Stretch & { readonly longestGap: number },
 ): Admitted {
 	const each = meters.map((meter) => {
 		const { value, gaps } = meter.reads === 'flow' ? integrated(meter.points, window) : counted(meter.points, window);
@@ -37,10 +37,10 @@ export function admittedGas(
 	};
 }
 
-type OfOne = { readonly value: number; readonly gaps: readonly Window[] };
+type OfOne = { readonly value: number; readonly gaps: readonly Stretch[] };
 
-function integrated(points: readonly Point[], { from, to, longestGap }: Window & { longestGap: number }): OfOne {
-	const gaps: Window[] = [];
+function integrated(points: readonly Point[], { from, to, longestGap }: Stretch & { longestGap: number }): OfOne {
+	const gaps: Stretch[] = [];
 	let value = 0;
 	points.slice(1).forEach((b, i) => {
 		const a = points[i] ?? b;
@@ -56,7 +56,7 @@ function integrated(points: readonly Point[], { from, to, longestGap }: Window &
 }
 
 /** Gas between the begin of the purge and the first reading in it is not counted: it is not known. */
-function counted(points: readonly Point[], { from, to }: Window): OfOne {
+function counted(points: readonly Point[], { from, to }: Stretch): OfOne {
 	const inside = points.filter(({ t }) => t >= from && t <= to);
 	return { value: (inside.at(-1)?.value ?? 0) - (inside[0]?.value ?? 0), gaps: [] };
 }

@@ -2,6 +2,7 @@ import * as v from 'valibot';
 import { fail, ok, type Result } from '../../base';
 import type { Refusal } from '../calculator';
 import { all, shaped, typedMeasure } from '../read-inputs';
+import type { Suction } from './notes';
 import { readParts } from './read-parts';
 import { meterSchema, OXYGEN_RANGE, refuseMeter } from './shared-inputs';
 
@@ -117,8 +118,6 @@ export const disturbances = shaped(
 		from: 'reading',
 	},
 );
-
-export type Suction = { readonly tag: string; readonly at: string; readonly pressure: number };
 
 export const suction = shaped(
 	v.array(v.strictObject({ tag: v.string(), at: v.string(), pressure: typedMeasure })),

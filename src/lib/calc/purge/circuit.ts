@@ -3,8 +3,9 @@ import type { Refusal } from '../calculator';
 import type { AdequacyInputs } from './adequacy-inputs';
 import { admittedGas, flowOfTotaliser, type Admitted } from './admitted-gas';
 import { normalVolume } from './normal-volume';
+import type { Stretch } from './notes';
 import { readSeries, type Point } from './series-input';
-import { valueAt, type Trend, type Window } from './trend';
+import { valueAt, type Trend } from './trend';
 
 /** The circuit as its volumes, meters and contacts show it. */
 export type Circuit = {
@@ -16,9 +17,9 @@ export type Circuit = {
 	readonly fan: Trend & { readonly stopped: number };
 	readonly inert: Trend & { readonly stopped: number };
 	readonly outlet: Trend & { readonly stopped: number };
-	readonly admitted: (window: Window) => Admitted;
+	readonly admitted: (window: Stretch) => Admitted;
 	/** Mean inert flow by its meters over the time that they show [m³(n)/s]; null where they show none. */
-	readonly meanInert: (window: Window) => number | null;
+	readonly meanInert: (window: Stretch) => number | null;
 };
 
 export function readCircuit(given: AdequacyInputs): Result<Circuit, readonly Refusal[]> {
@@ -40,7 +41,7 @@ export function readCircuit(given: AdequacyInputs): Result<Circuit, readonly Ref
 	const connected = given.volumes.filter(({ id }) => !shut.has(id)).map(({ volume }) => volume);
 	const state = { temperature: given.temperature.value, pressure: given.pressure.value };
 	const size = connected.reduce((sum, { value }) => sum + value, 0);
-	const admitted = (window: Window): Admitted => admittedGas(read, { ...window, longestGap });
+	const admitted = (window: Stretch): Admitted => admittedGas(read, { ...window, longestGap });
 	return ok({
 		size,
 		gas: normalVolume(size, state),

@@ -1,10 +1,9 @@
 import type { Seen } from './circuit-input';
+import type { Gap, Stretch } from './notes';
 import type { Point } from './series-input';
 
 /** A flow or a contact over time: what a recorder wrote, and what a person saw where it wrote nothing. */
 export type Trend = { readonly record: string; readonly points: readonly Point[]; readonly seen: Seen | undefined };
-export type Window = { readonly from: number; readonly to: number };
-export type Gap = Window & { readonly record: string; readonly why: 'no data' | 'stopped' };
 
 /**
  * Where a trend does not show that something kept going: no reading for longer than the site allows, or a reading that
@@ -12,7 +11,7 @@ export type Gap = Window & { readonly record: string; readonly why: 'no data' | 
  */
 export function gapsIn(
 	{ record, points, seen }: Trend,
-	{ from, to }: Window,
+	{ from, to }: Stretch,
 	rules: { readonly longestGap: number; readonly stopped: number },
 ): readonly Gap[] {
 	const before = points.findLast(({ t }) => t <= from);
@@ -24,7 +23,7 @@ export function gapsIn(
 		const last = times[i] ?? from;
 		const gap = { record, from: Math.max(last, from), to: Math.min(t, to), why: 'no data' } as const;
 		const isLong = t - last > rules.longestGap || (shown.length === 0 && after === undefined);
-		return isLong && gap.to > gap.from && !(seen && seen.from <= gap.from && seen.to >= gap.to) ? [gap] : [];
+		return isLong && gap.to > gap.from && !vouches(seen, gap) ? [gap] : [];
 	});
 	const stopped = shown.flatMap(({ t, value }, i): Gap[] => {
 		if (value > rules.stopped || (i === 0 && before !== undefined && from - t > rules.longestGap)) return [];
@@ -33,6 +32,9 @@ export function gapsIn(
 	});
 	return joined([...silent, ...stopped]);
 }
+
+const vouches = (seen: Seen | undefined, { from, to }: Stretch): boolean =>
+	seen !== undefined && seen.from <= from && seen.to >= to;
 
 /** Neighbouring gaps of one kind are one gap. */
 function joined(gaps: readonly Gap[]): readonly Gap[] {
