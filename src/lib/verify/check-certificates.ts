@@ -1,7 +1,14 @@
-import { checkChain, millisecondsOf, type Certificate, type Instant, type TrustList } from '../identity';
+import {
+	checkChain,
+	millisecondsOf,
+	type Certificate,
+	type ChainAnswer,
+	type Instant,
+	type TrustList,
+} from '../identity';
 import type { SignedEvent } from './check-signatures';
 import { nameOf } from './about-event';
-import { chainChecks } from './pdf/chain-checks';
+import { checkOfFinding } from './pdf/chain-checks';
 import { undecided, type Check } from './pdf/check';
 
 type Bytes = Uint8Array<ArrayBuffer>;
@@ -40,18 +47,25 @@ async function checkOne(
 	events: readonly SignedEvent[],
 	trust: Anchored,
 ): Promise<readonly Check[]> {
-	const ends = [events.at(-1), events[0]].flatMap((end) => (end === undefined ? [] : [end.event.entered]));
-	const asked = await Promise.all(ends.map((claimed) => chainChecks('', question(certificate, claimed, trust))));
-	const [atLast = [], atFirst = []] = asked;
-	const worst = atLast.map((check, i) => (check.outcome === 'passed' ? (atFirst[i] ?? check) : check));
+	const [atFirst, atLast] = await Promise.all([
+		ask(certificate, events[0], trust),
+		ask(certificate, events.at(-1), trust),
+	]);
+	const worst = atLast.findings.map((finding, i) =>
+		finding.outcome === 'passed' ? (atFirst.findings[i] ?? finding) : finding,
+	);
 	const suspects = worst.every(({ outcome }) => outcome === 'passed') ? [] : await notGood(certificate, events, trust);
-	return worst.map(({ name, outcome, because, facts, sub }) => ({
-		name: `${whoseOf(certificate)}: ${name}`,
-		outcome,
-		because: outcome === 'passed' || suspects.length === 0 ? because : `${because} It is about ${listed(suspects)}.`,
-		facts: { ...facts, certificate: certificate.fingerprint, events: events.length },
-		...(sub === undefined ? {} : { sub }),
-	}));
+	return worst
+		.filter(({ rule }) => rule !== 'certificate')
+		.map((finding) => {
+			const { name, because, facts, ...check } = checkOfFinding(finding);
+			return {
+				...check,
+				name: `${whoseOf(certificate)}: ${name}`,
+				because: finding.outcome === 'passed' || suspects.length === 0 ? because : `${because} ${aboutWhich(suspects)}`,
+				facts: { ...facts, certificate: certificate.fingerprint, events: events.length },
+			};
+		});
 }
 
 async function notGood(
@@ -59,23 +73,24 @@ async function notGood(
 	events: readonly SignedEvent[],
 	trust: Anchored,
 ): Promise<readonly SignedEvent[]> {
-	const answers = await Promise.all(
-		events.map(async (signed) => {
-			const { others, ...asked } = question(certificate, signed.event.entered, trust);
-			return { signed, answer: await checkChain({ ...asked, issuers: others }) };
-		}),
+	const asked = await Promise.all(
+		events.map(async (signed) => ({ signed, answer: await ask(certificate, signed, trust) })),
 	);
-	return answers.filter(({ answer }) => answer.class !== 'TOTAL-PASSED').map(({ signed }) => signed);
+	return asked.filter(({ answer }) => answer.class !== 'TOTAL-PASSED').map(({ signed }) => signed);
 }
 
-const question = (certificate: Certificate, claimed: Instant, trust: Anchored) => ({
-	certificate: certificate.der,
-	others: trust.issuers,
-	root: trust.root,
-	times: { claimed, now: trust.now, provenBy: trust.provenBy },
-	trustList: trust.trustList,
-	scope: {},
-});
+const ask = (
+	certificate: Certificate,
+	signed: SignedEvent | undefined,
+	{ root, issuers, trustList, now, provenBy }: Anchored,
+): Promise<ChainAnswer> =>
+	checkChain({
+		certificate: certificate.der,
+		issuers,
+		root,
+		times: { claimed: signed?.event.entered ?? now, now, provenBy },
+		trustList,
+	});
 
 function byCertificate(
 	signed: readonly SignedEvent[],
@@ -107,8 +122,8 @@ function whoseOf({ subject }: Certificate): string {
 
 const SHOWN = 5;
 
-const listed = (events: readonly SignedEvent[]): string => {
+function aboutWhich(events: readonly SignedEvent[]): string {
 	const names = events.slice(0, SHOWN).map(({ event }) => nameOf(event));
 	const rest = events.length - names.length;
-	return names.join(', ') + (rest > 0 ? ` and ${rest} more` : '');
-};
+	return `It is about ${names.join(', ')}${rest > 0 ? ` and ${rest} more` : ''}.`;
+}

@@ -62,7 +62,10 @@ function checkPinned(kind: (typeof KINDS)[number], { body }: Opened): readonly C
 			}),
 		];
 	const own = idOf(document);
-	if (own.id !== undefined && (own.id !== pinned.id || own.revision !== pinned.revision))
+	if (
+		own.id !== undefined &&
+		(own.id !== pinned.id || (pinned.revision !== undefined && own.revision !== pinned.revision))
+	)
 		return [
 			failed(
 				name,

@@ -19,12 +19,15 @@ export async function chainChecks(
 	// Whether the certificate can be read was asked before there was a chain to ask about.
 	const ofChain = findings
 		.filter(({ rule }) => rule !== 'certificate')
-		.map((finding) => {
-			const { rule, outcome, sub, facts } = finding;
-			return { name: NAMES[rule], outcome, because: say(finding), facts, field, ...(sub === undefined ? {} : { sub }) };
-		});
+		.map((finding) => ({ ...checkOfFinding(finding), field }));
 	const strangers = others.filter((der) => !path.some((known) => sameBytes(known, der)));
 	return [...ofChain, ...(path.length > 1 ? [checkStrangers(field, strangers.length, others.length + 1)] : [])];
+}
+
+/** What identity found, as a check with its sentence. */
+export function checkOfFinding(finding: ChainFinding): Check {
+	const { rule, outcome, sub, facts } = finding;
+	return { name: NAMES[rule], outcome, because: say(finding), facts, ...(sub === undefined ? {} : { sub }) };
 }
 
 /** No signature covers the certificates that lie beside it, so nothing may lie there but the way to the root. */
