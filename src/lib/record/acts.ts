@@ -16,14 +16,12 @@ export class ActJudge {
 	readonly #procedure: Procedure;
 	readonly #events: readonly RecordEvent[];
 	readonly #knowledge: Knowledge;
-	readonly #log: string | undefined;
 	readonly #verdicts = new Map<string, ActVerdict>();
 
 	constructor(procedure: Procedure, events: readonly RecordEvent[], knowledge: Knowledge) {
 		this.#procedure = procedure;
 		this.#events = events;
 		this.#knowledge = knowledge;
-		this.#log = events.find(({ kind }) => kind === 'start-up opened')?.log;
 	}
 
 	readonly allowed = (act: GateAct): boolean => this.verdict(act).allowed;
@@ -31,6 +29,8 @@ export class ActJudge {
 	verdict(act: GateAct): ActVerdict {
 		const known = this.#verdicts.get(act.id);
 		if (known !== undefined) return known;
+		// In a record that was tampered with, an act can stand among the things that it rests on.
+		this.#verdicts.set(act.id, { allowed: false, because: ['it rests on itself'] });
 		const because = this.#objections(act);
 		const verdict = { allowed: because.length === 0, because };
 		this.#verdicts.set(act.id, verdict);
@@ -41,7 +41,7 @@ export class ActJudge {
 	played(act: GateAct): Played {
 		const past = this.#knowledge.past(act);
 		const known = this.#events.filter(
-			(event) => past.has(event.id) || (event.log !== this.#log && event.enteredAt <= act.enteredAt),
+			(event) => past.has(event.id) || (event.log !== act.log && event.enteredAt <= act.enteredAt),
 		);
 		return play(this.#procedure, factsOf(this.#procedure, known), act.observedAt, this.allowed);
 	}

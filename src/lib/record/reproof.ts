@@ -1,4 +1,4 @@
-import type { Procedure } from '../procedure';
+import type { Procedure, Step } from '../procedure';
 import type { ReproofItem, Standing } from './answer';
 import { countsAgain, spentAndRunOut, type NotEnoughNow } from './gate-states';
 import type { Played } from './play';
@@ -21,14 +21,14 @@ export function stepsToProve(played: Played, notEnough: NotEnoughNow): readonly 
 	const add = (track: StepTrack, why: readonly InnerCause[], state: ReproofItem['state']): void => {
 		if (found.has(track.step.id)) return;
 		found.set(track.step.id, { track, why, state });
-		for (const id of track.step.redo) {
-			const upstream = played.steps.get(id);
-			if (upstream === undefined || !upstream.required) continue;
-			if (spentAndRunOut(upstream, played)) add(upstream, [countsAgain(upstream)], 'lapsed');
-			else if (upstream.status.state === 'not yet') add(upstream, upstream.status.why, 'not yet');
-			else if (upstream.status.state === 'lapsed' || upstream.status.state === 'failed')
-				add(upstream, upstream.status.why, upstream.status.state);
-		}
+		for (const id of track.step.redo) addUpstream(played.steps.get(id));
+		for (const check of uncheckedSinceFinding(track, played)) addUpstream(check);
+	};
+	const addUpstream = (upstream: StepTrack | undefined): void => {
+		if (upstream === undefined || !upstream.required) return;
+		const { state, why } = upstream.status;
+		if (spentAndRunOut(upstream, played)) add(upstream, [countsAgain(upstream)], 'lapsed');
+		else if (state === 'not yet' || state === 'lapsed' || state === 'failed') add(upstream, why, state);
 	};
 	for (const track of played.steps.values()) {
 		const { step, status } = track;
@@ -38,6 +38,15 @@ export function stepsToProve(played: Played, notEnough: NotEnoughNow): readonly 
 		else if (late !== undefined) add(track, [late], 'lapsed');
 	}
 	return [...found.values()];
+}
+
+/** Check steps of instruments that were found bad and have not passed since: a new proof with them would be void too. */
+function uncheckedSinceFinding(track: StepTrack, played: Played): readonly StepTrack[] {
+	const used = track.entry?.instruments ?? track.step.instruments;
+	const bad = played.facts.findings.filter(({ nextGood }) => nextGood > played.now).map(({ instrument }) => instrument);
+	return [...played.steps.values()].filter(
+		({ step }) => step.checks !== undefined && used.includes(step.checks) && bad.includes(step.checks),
+	);
 }
 
 /** A gate has begun when the gate below it was once released; the lowest has begun with the start-up. */
@@ -60,12 +69,11 @@ export function inWorkingOrder(procedure: Procedure, list: readonly ToProve[]): 
 			b.track.life - a.track.life ||
 			(place.get(a.track.step.id) ?? 0) - (place.get(b.track.step.id) ?? 0),
 	);
+	const upstream = upstreamIn(list);
 	const done = new Set<string>();
 	const ordered: ToProve[] = [];
 	while (rest.length > 0) {
-		const next = rest.findIndex(({ track }) =>
-			[...track.step.redo, ...track.step.waits].every((id) => !ids.has(id) || done.has(id)),
-		);
+		const next = rest.findIndex(({ track }) => upstream(track.step).every((id) => !ids.has(id) || done.has(id)));
 		// A circle is refused when a procedure is saved; if one came through, its steps follow as they stand.
 		const [item] = rest.splice(Math.max(next, 0), 1);
 		if (item === undefined) break;
@@ -73,6 +81,18 @@ export function inWorkingOrder(procedure: Procedure, list: readonly ToProve[]): 
 		ordered.push(item);
 	}
 	return ordered;
+}
+
+/** What a step of the list comes after: what it relies on, and the function checks of the instruments that it uses. */
+function upstreamIn(list: readonly ToProve[]): (step: Step) => readonly string[] {
+	const checks = list.flatMap(({ track: { step } }) =>
+		step.checks === undefined ? [] : [{ id: step.id, checks: step.checks }],
+	);
+	return (step) => [
+		...step.redo,
+		...step.waits,
+		...checks.filter((check) => check.id !== step.id && step.instruments.includes(check.checks)).map(({ id }) => id),
+	];
 }
 
 export type Slot = { readonly begins: number; readonly ends: number };
@@ -84,6 +104,7 @@ export type Slot = { readonly begins: number; readonly ends: number };
 export function schedule(ordered: readonly ToProve[], people: number): readonly Slot[] {
 	const free = Array.from({ length: Math.max(1, people) }, () => 0);
 	const ends = new Map<string, number>();
+	const upstream = upstreamIn(ordered);
 	const slots: Slot[] = [];
 	let gate = -1;
 	let gateBegins = 0;
@@ -93,9 +114,9 @@ export function schedule(ordered: readonly ToProve[], people: number): readonly 
 			gate = step.gate;
 			gateBegins = Math.max(0, ...ends.values());
 		}
-		const upstream = [...step.redo, ...step.waits].map((id) => ends.get(id) ?? 0);
+		const upstreamEnds = upstream(step).map((id) => ends.get(id) ?? 0);
 		const who = free.indexOf(Math.min(...free));
-		const begins = Math.max(gateBegins, free[who] ?? 0, ...upstream);
+		const begins = Math.max(gateBegins, free[who] ?? 0, ...upstreamEnds);
 		free[who] = begins + step.minutes;
 		ends.set(step.id, begins + step.minutes);
 		slots.push({ begins, ends: begins + step.minutes });
