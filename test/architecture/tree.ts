@@ -8,6 +8,7 @@ export type Finding = { readonly file: string; readonly says: string };
 
 export type Check = (tree: Tree) => readonly Finding[];
 
+/** As in .gitignore: made or installed, never written by hand. */
 const NOT_OURS = new Set(['node_modules', '.git', 'build', '.svelte-kit', '.cache', 'data']);
 
 export function readTree(root: string): Tree {
@@ -18,7 +19,7 @@ export function readTree(root: string): Tree {
 const filesUnder = (root: string, folder: string): string[] =>
 	readdirSync(join(root, folder), { withFileTypes: true }).flatMap((entry) => {
 		const path = folder === '' ? entry.name : `${folder}/${entry.name}`;
-		if (NOT_OURS.has(entry.name) || entry.name.endsWith('.log')) return [];
+		if (NOT_OURS.has(path) || path.endsWith('.log')) return [];
 		return entry.isDirectory() ? filesUnder(root, path) : [path];
 	});
 

@@ -52,14 +52,22 @@ describe('npm start', () => {
 		expect(await refusedStart(env)).toEqual({ said: says, exitCode: 1 });
 	});
 
+	test('refuses an old Node in words', async () => {
+		const old = "Object.defineProperty(process, 'versions', { value: { ...process.versions, node: '20.18.3' } })";
+		const env = { NODE_OPTIONS: `--import=data:text/javascript,${encodeURIComponent(old)}` };
+		expect(await refusedStart(env)).toEqual({
+			said: 'Gatehold needs Node 20.19 or newer; this is Node 20.18.3.',
+			exitCode: 1,
+		});
+	});
+
 	test('says which port to take when its own is taken', async () => {
 		const port = await freePort();
 		const other = createServer().listen(port, '127.0.0.1');
 		try {
-			expect(await refusedStart({ PORT: String(port) })).toEqual({
-				said: `Port ${port} is taken. Choose another: PORT=${port + 1} npm start`,
-				exitCode: 1,
-			});
+			const { said, exitCode } = await refusedStart({ PORT: String(port) });
+			expect(said.split('\n').at(-1)).toBe(`Port ${port} is taken. Choose another: PORT=${port + 1} npm start`);
+			expect(exitCode).toBe(1);
 		} finally {
 			other.close();
 		}
