@@ -1,0 +1,59 @@
+import { PDFDocument, PDFName, type PDFPage, type PDFRef } from 'pdf-lib';
+import { ok, utf8, type Result } from '../../base';
+import { FACES } from '../fonts/faces';
+import { INKS } from '../fonts/inks';
+import type { Sheet } from '../layout/sheet';
+import { PAPER } from '../layout/sheet';
+import type { NoGlyph } from '../sign/ink';
+import { addSignatureFields } from '../sign/signature-fields';
+import { attach, type Attachment } from './attach';
+import { contentOf } from './content';
+import { embedFace } from './fonts';
+import { describe, pdfDate, type Metadata } from './metadata';
+
+export type Document = {
+	readonly sheets: readonly Sheet[];
+	readonly attachments: readonly Attachment[];
+	readonly metadata: Metadata;
+	/** "Not signed", in the language of the dossier. */
+	readonly unsigned: string;
+};
+
+/**
+ * The base revision: one file of classic cross-references, the same bytes wherever it is written. Low-level objects only,
+ * since the library's comforts would bring today's date and other fonts in.
+ */
+export async function writePdf(document: Document): Promise<Result<Uint8Array<ArrayBuffer>, NoGlyph>> {
+	const pdf = await PDFDocument.create({ updateMetadata: false });
+	const { context } = pdf;
+	const fonts: { [resource: string]: PDFRef } = {};
+	for (const [name, face] of Object.entries(FACES)) fonts[name] = embedFace(context, face);
+	const pages: { readonly page: PDFPage; readonly sheet: Sheet }[] = [];
+	for (const sheet of document.sheets) {
+		const content = contentOf(sheet.shapes, PAPER.height);
+		if (!content.ok) return content;
+		const page = pdf.addPage([PAPER.width, PAPER.height]);
+		page.node.set(PDFName.of('Resources'), context.obj({ Font: fonts }));
+		page.node.set(PDFName.of('Contents'), context.register(context.flateStream(utf8(content.value))));
+		pages.push({ page, sheet });
+	}
+	const fields = pages.flatMap(({ page, sheet }) =>
+		sheet.fields.map(({ name, title, box }) => ({
+			name,
+			title,
+			page,
+			box: { x: box.x, y: PAPER.height - box.y - box.height, width: box.width, height: box.height },
+		})),
+	);
+	const added = addSignatureFields(pdf, { fields, words: document.unsigned, inks: INKS, fonts });
+	if (!added.ok) return added;
+	attach(pdf, document.attachments, pdfDate(document.metadata.date));
+	describe(pdf, document.metadata);
+	const bytes = await pdf.save({
+		useObjectStreams: false,
+		updateFieldAppearances: false,
+		addDefaultPage: false,
+		objectsPerTick: Infinity,
+	});
+	return ok(new Uint8Array(bytes));
+}
