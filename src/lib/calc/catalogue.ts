@@ -1,12 +1,16 @@
 import { fail, type Result } from '../base';
 import type { CalcResult, Calculator, Refusal } from './calculator';
+import { venturiFlow } from './flow/venturi-flow';
+import { dewPointClearance } from './moisture/dew-point-clearance';
 import { purgeAdequacy } from './purge/purge-adequacy';
 import { sweepPurge } from './purge/sweep-purge';
 
 /** Every calculator ever released, by id@version. A line is never taken out: old records recompute with it. */
 export const CATALOGUE: { readonly [idAtVersion: string]: Calculator } = {
+	'dew-point-clearance@1': dewPointClearance,
 	'purge-adequacy@1': purgeAdequacy,
 	'sweep-purge@1': sweepPurge,
+	'venturi-flow@1': venturiFlow,
 };
 
 /** The newest version of a calculator, for a new step; a step that is already approved names its version. */

@@ -21,4 +21,7 @@ export type {
 } from './calculator';
 export { CATALOGUE, latest, runCalculator } from './catalogue';
 export { CONSTANTS, OXYGEN_IN_AIR } from './constants';
+export { differencePressureForFlow, throatForRange, type VenturiDuty } from './flow/venturi-inverse';
+export { dewPoint, type DewPoint } from './moisture/dew-point';
+export { wetFromDry } from './moisture/moisture-basis';
 export { allowedOxygen } from './purge/allowed-oxygen';

@@ -59,7 +59,7 @@ export const shaped = <S extends v.GenericSchema, T = v.InferOutput<S>>(
 	schema: S,
 	about: About & { readonly quantity: string },
 	read: (typed: v.InferOutput<S>, at: string) => Result<T, readonly Refusal[]> = (typed) => ok(typed as T),
-): Field<T> => ({ spec: about, schema, read: (typed, at) => read(typed as v.InferOutput<S>, at) });
+): Field<T> => ({ spec: about, schema, read: (typed, at) => read(typed, at) });
 
 export const optional = <T>(field: Field<T>): Field<T | undefined> => ({
 	spec: { ...field.spec, optional: true },

@@ -58,10 +58,12 @@ export function propagate(model: (values: Numbers) => Numbers, inputs: readonly 
 
 /** How each result follows one input; where no uncertainty is stated, only whether it follows at all. */
 function slopesOf(model: (values: Numbers) => Numbers, centre: Numbers, input: Uncertain) {
-	const step = STEP * (input.U ?? Math.max(Math.abs(input.value), STEP));
+	// Never below what the last digits of the value can carry.
+	const step = Math.max(STEP * (input.U ?? 0), LEAST_STEP * Math.abs(input.value), Number.EPSILON);
 	const above = model({ ...centre, [input.name]: input.value + step });
 	const below = model({ ...centre, [input.name]: input.value - step });
 	return { input, slope: (output: string) => ((above[output] ?? 0) - (below[output] ?? 0)) / (2 * step) };
 }
 
 const STEP = 1e-3;
+const LEAST_STEP = 1e-6;

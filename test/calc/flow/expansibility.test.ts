@@ -12,7 +12,7 @@ test('the printed example: 1 kPa over a throat of 22.2 mm in 73.9 mm', () => {
 
 // Independent: fluids 1.0.22, nozzle_expansibility (test/vectors/venturi/expansibility.json).
 type Case = { beta: number; tau: number; kappa: number; epsilon: number };
-test.each(vector<Case[]>('venturi/expansibility.json'))(
+test.each(vector('venturi/expansibility.json') as Case[])(
 	'beta $beta, p2/p1 $tau, kappa $kappa: $epsilon',
 	({ beta, tau, kappa, epsilon }) => {
 		expect(agreesWithin(expansibility({ dp: 1e5 - tau * 1e5, p1: 1e5, beta, kappa }), epsilon, 1e-11)).toBe(true);

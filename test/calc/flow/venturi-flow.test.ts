@@ -35,9 +35,9 @@ const inputsOf = ({ type, inputs }: Case) => ({
 	...(inputs.x === undefined ? {} : { composition: inputs.x }),
 });
 
-const chosen = cases<Case>('venturi');
-const random = vector<Case[]>('venturi/random.json').map((each, i) => ({ ...each, name: `random ${i}` }));
-const isLowReynolds = (each: Case) => each.expect.outside.includes('Re_D') && (each.expect['Re_D'] ?? 0) < 2e5;
+const chosen = cases('venturi') as unknown as readonly (Case & { readonly name: string })[];
+const random = (vector('venturi/random.json') as Case[]).map((each, i) => ({ ...each, name: `random ${i}` }));
+const isLowReynolds = (each: Case) => each.expect.outside.includes('Re_D') && (each.expect.Re_D ?? 0) < 2e5;
 const isRefused = (each: Case) => each.expect.outside.includes('tau');
 
 const compared = [
@@ -68,7 +68,7 @@ describe.each([...chosen, ...random].filter((each) => !isLowReynolds(each) && !i
 
 	test('the limits of the standard that it leaves are named, and no others', () => {
 		const result = run(inputsOf(each));
-		const named = result.notes.flatMap((note) => (note.kind === 'outside-limit' ? [note['limit']] : []));
+		const named = result.notes.flatMap((note) => (note.kind === 'outside-limit' ? [note.limit] : []));
 		expect(named).toEqual(each.expect.outside);
 		expect(result.scope).toBe(each.expect.outside.length > 0 ? 'outside scope' : 'in scope');
 	});
@@ -78,7 +78,7 @@ describe.each([...chosen, ...random].filter((each) => !isLowReynolds(each) && !i
 		const { D, d } = each.inputs;
 		const isOnChart = D >= 0.065 && d / D >= 0.3 - 1e-9 && d / D <= 0.75 + 1e-9;
 		if (!isOnChart) expect(loss).toBeNull();
-		else expect(agreesWithin(loss ?? NaN, each.expect['permanent_loss'] ?? NaN, 1e-9)).toBe(true);
+		else expect(agreesWithin(loss ?? NaN, each.expect.permanent_loss ?? NaN, 1e-9)).toBe(true);
 	});
 });
 
@@ -87,7 +87,7 @@ describe.each([...chosen, ...random].filter((each) => !isLowReynolds(each) && !i
 describe.each(chosen.filter(isLowReynolds))('$name: below the Reynolds limit', (each) => {
 	test('the flow at the constant coefficient is printed for comparison and agrees with fluids', () => {
 		const note = factsOf(inputsOf(each), 'coefficient-not-of-the-standard');
-		expect(agreesWithin(Number(note['massFlowAtConstant']), each.expect['qm'] ?? NaN, 1e-9)).toBe(true);
+		expect(agreesWithin(Number(note.massFlowAtConstant), each.expect.qm ?? NaN, 1e-9)).toBe(true);
 	});
 
 	test('the coefficient belongs to the Reynolds number that it gives, and proves no step', () => {

@@ -15,7 +15,7 @@ type Case = {
 	dp: number;
 	d: number;
 };
-test.each(vector<Case[]>('venturi/inverse.json'))(
+test.each(vector('venturi/inverse.json') as Case[])(
 	'80 % of the flow of $of needs $dp Pa, or a throat of $d m at the same difference pressure',
 	({ C, inputs, qm, dp, d }) => {
 		const duty = { massFlow: qm, C, D: inputs.D, rho1: inputs.rho1, p1: inputs.p1, kappa: inputs.kappa };
@@ -27,7 +27,7 @@ test.each(vector<Case[]>('venturi/inverse.json'))(
 );
 
 test('80 % of the flow is not quite 64 % of the difference pressure: the expansibility changes too', () => {
-	const [v05] = vector<Case[]>('venturi/inverse.json');
+	const [v05] = vector('venturi/inverse.json') as Case[];
 	expect((v05?.dp ?? 0) / 800).toBeLessThan(0.638);
 });
 

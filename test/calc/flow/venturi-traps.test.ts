@@ -75,7 +75,7 @@ describe('traps', () => {
 	test('temperature taken downstream is warned about, with how much colder the gas can be there', () => {
 		const note = factsOf({ ...CIRCUIT, temperatureTaken: 'downstream' }, 'temperature-from-downstream');
 		// By hand: 368.15 (1 - (1 - 800/98500)^(0.36174/1.36174)) = 0.80 K at the throat.
-		expect(agreesWith(Number(note['colderByAtMost']), '0.80')).toBe(true);
+		expect(agreesWith(Number(note.colderByAtMost), '0.80')).toBe(true);
 	});
 
 	test('below Re_D 2e5 the constant coefficient is not used: 20 Pa in the circuit', () => {
@@ -90,12 +90,12 @@ describe('traps', () => {
 	test('far below the table the constant is shown without an uncertainty, and flagged', () => {
 		const slower = { ...CIRCUIT, dp: { value: 1, unit: 'Pa', U: 0.1 } };
 		expect(factsOf(slower, 'coefficient-not-of-the-standard')).toMatchObject({ from: 'below the table', U: null });
-		expect(run(slower).values['massFlow']).not.toHaveProperty('U');
+		expect(run(slower).values.massFlow).not.toHaveProperty('U');
 	});
 
 	test('water or dust in an impulse line: a zero of 10 Pa on 80 Pa is 6 % of the flow', () => {
 		const note = factsOf({ ...CIRCUIT, dp: 80, dpZero: 10 }, 'zero-shifted');
-		expect(agreesWith(Number(note['flowError']) * 100, '6')).toBe(true);
+		expect(agreesWith(Number(note.flowError) * 100, '6')).toBe(true);
 		expect(note.level).toBe('outside scope');
 		expect(factsOf({ ...CIRCUIT, dpZero: -0.5 }, 'zero-shifted').level).toBe('remark');
 	});
@@ -138,7 +138,7 @@ describe('traps', () => {
 		const dpSeries = [400, 520, 610, 480, 350, 700, 560, 430, 500, 450];
 		const inputs = { ...WITHOUT_DP, dpSeries };
 		expect(agreesWith(Math.sqrt(valueOf(inputs, 'differencePressure') ?? NaN), '22.255103')).toBe(true);
-		expect(agreesWith(Number(factsOf(inputs, 'mean-of-roots')['overread']) * 100, '0.4744')).toBe(true);
+		expect(agreesWith(Number(factsOf(inputs, 'mean-of-roots').overread) * 100, '0.4744')).toBe(true);
 	});
 
 	test('diameters of the drawing in a hot duct: with the expansion of steel the flow is 0.18 % larger at 95 degC', () => {
@@ -176,7 +176,7 @@ describe('refusals', () => {
 		const [refusal] = refusalsOf(wet);
 		expect(refusal?.kind).toBe('liquid-present');
 		// Independent: iapws 1.5, dew point of 20 % at 98 500 Pa is 59.7323 degC.
-		expect(agreesWith(Number(refusal?.['dewPoint']) - 273.15, '59.7323')).toBe(true);
+		expect(agreesWith(Number(refusal?.dewPoint) - 273.15, '59.7323')).toBe(true);
 	});
 
 	test('nothing to calculate from: density, viscosity and exponent are asked for, or the composition', () => {
@@ -193,7 +193,7 @@ describe('refusals', () => {
 
 	test('outside the fits of heat capacity and viscosity these two are asked for, not extrapolated', () => {
 		const refusals = refusalsOf({ ...CIRCUIT, temperature: 700 });
-		expect(refusals.map((refusal) => refusal['orGive'])).toEqual(['viscosity', 'isentropicExponent']);
+		expect(refusals.map((refusal) => refusal.orGive)).toEqual(['viscosity', 'isentropicExponent']);
 		expect(run({ ...CIRCUIT, temperature: 700, viscosity: 3.2e-5, isentropicExponent: 1.33 }).scope).toBe('in scope');
 	});
 
@@ -234,7 +234,7 @@ describe('outside scope: shown, and proves no step', () => {
 	});
 
 	test('what nobody stated about the installation is listed', () => {
-		expect(factsOf(CIRCUIT, 'installation-not-stated')['inputs']).toEqual([
+		expect(factsOf(CIRCUIT, 'installation-not-stated').inputs).toEqual([
 			'dpCalibration',
 			'dust',
 			'throatCondition',
@@ -250,7 +250,7 @@ describe('notes and plot', () => {
 			{ ...CIRCUIT, composition: { N2: 0.617, CO2: 0.1, O2: 0.08, H2O: 0.2 } },
 			'composition-normalised',
 		);
-		expect(note['sum']).toBeCloseTo(0.997, 12);
+		expect(note.sum).toBeCloseTo(0.997, 12);
 	});
 
 	test('a density that does not fit the composition is used and warned about', () => {
@@ -271,7 +271,7 @@ describe('notes and plot', () => {
 			viscosity: 0.0010016,
 			isentropicExponent: 1e9,
 		};
-		expect(run(water).values['normalFlowWet']).toEqual({
+		expect(run(water).values.normalFlowWet).toEqual({
 			value: null,
 			unit: 'm3(n)/s',
 			because: 'the density is not that of a gas at this state',

@@ -8,7 +8,7 @@ import { vector } from '../../support/vectors';
 const DEVIATION: Record<string, number> = { N2: 0.28, O2: 0.26, CO2: 0.04, CO: 0.28, H2O: 0.7, Ar: 0.23 };
 
 // Independent: CoolProp 8.0.0 (test/vectors/gas/pure.json).
-test.each(vector<{ gas: string; T: number; viscosity: number }[]>('gas/pure.json'))(
+test.each(vector('gas/pure.json') as { gas: string; T: number; viscosity: number }[])(
 	'viscosity of $gas at $T K is that of CoolProp within the deviation its fit states',
 	({ gas, T, viscosity }) => {
 		const found = gasViscosity({ [gas]: 1 }, T);
@@ -20,7 +20,7 @@ test.each(vector<{ gas: string; T: number; viscosity: number }[]>('gas/pure.json
 
 // Independent: chemicals 1.1.2, viscosity.Wilke on CoolProp's pure gases (test/vectors/gas/mixture.json).
 type Mixture = { name: string; x: Record<string, number>; T: number; viscosity: number };
-test.each(vector<Mixture[]>('gas/mixture.json'))(
+test.each(vector('gas/mixture.json') as Mixture[])(
 	'viscosity of "$name" at $T K by Wilke, to 0.3 %',
 	({ x, T, viscosity }) => {
 		const found = gasViscosity(x, T);

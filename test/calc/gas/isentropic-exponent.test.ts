@@ -8,7 +8,7 @@ const R = 8.31446261815324;
 const DEVIATION: Record<string, number> = { N2: 0.03, O2: 0.3, CO2: 0.2, CO: 0.1, H2O: 0.31, Ar: 0.01 };
 
 // Independent: CoolProp 8.0.0 (test/vectors/gas/pure.json).
-test.each(vector<{ gas: string; T: number; cp0: number }[]>('gas/pure.json'))(
+test.each(vector('gas/pure.json') as { gas: string; T: number; cp0: number }[])(
 	'heat capacity of $gas at $T K is that of CoolProp within the deviation its fit states',
 	({ gas, T, cp0 }) => {
 		const kappa = isentropicExponent({ [gas]: 1 }, T);
@@ -19,7 +19,7 @@ test.each(vector<{ gas: string; T: number; cp0: number }[]>('gas/pure.json'))(
 );
 
 type Mixture = { name: string; x: Record<string, number>; T: number; kappa: number };
-test.each(vector<Mixture[]>('gas/mixture.json'))('kappa of "$name" at $T K is $kappa to 0.1 %', ({ x, T, kappa }) => {
+test.each(vector('gas/mixture.json') as Mixture[])('kappa of "$name" at $T K is $kappa to 0.1 %', ({ x, T, kappa }) => {
 	const found = isentropicExponent(x, T);
 	expect(found.ok && agreesWithin(found.value, kappa, 1e-3)).toBe(true);
 });

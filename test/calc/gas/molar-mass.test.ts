@@ -11,6 +11,9 @@ test('dry air weighs 28.96 g/mol', () => {
 });
 
 type Mixture = { name: string; x: Record<string, number>; M: number };
-test.each(vector<Mixture[]>('gas/mixture.json'))('the mixture "$name" has the molar mass of its parts', ({ x, M }) => {
-	expect(agreesWithin(molarMass(x), M, 1e-12)).toBe(true);
-});
+test.each(vector('gas/mixture.json') as Mixture[])(
+	'the mixture "$name" has the molar mass of its parts',
+	({ x, M }) => {
+		expect(agreesWithin(molarMass(x), M, 1e-12)).toBe(true);
+	},
+);

@@ -16,7 +16,7 @@ test('the published example of 93.44 mmHg water and 0.0024917 mmHg acid gives 40
 // No published values. Independent: both correlations in test/reference/moisture/moisture.py, the first in its atmosphere
 // form, whose coefficients are rounded differently.
 type Case = { water_atm: number; acid_atm: number; verhoff_banchero: number; okkes: number };
-test.each(vector<Case[]>('moisture/acid-dew-point.json'))(
+test.each(vector('moisture/acid-dew-point.json') as Case[])(
 	'with $water_atm atm of water and $acid_atm atm of acid both correlations say what the other program says',
 	({ water_atm, acid_atm, verhoff_banchero, okkes }) => {
 		const first = acidDewPoint(water_atm * ATM, acid_atm * ATM);

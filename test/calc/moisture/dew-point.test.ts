@@ -6,7 +6,7 @@ import { vector } from '../../support/vectors';
 
 // Independent: iapws 1.5.4, region 4 over water, R14-08 over ice (test/vectors/moisture/dew-point.json).
 type Case = { x: number; p: number; T: number; kind: string };
-test.each(vector<Case[]>('moisture/dew-point.json'))(
+test.each(vector('moisture/dew-point.json') as Case[])(
 	'gas with $x of water at $p Pa has its $kind point at $T K',
 	({ x, p, T, kind }) => {
 		const found = dewPoint(x, p);

@@ -15,7 +15,7 @@ test('a quarter mole of water per mole of dry gas is 20 % of the wet gas', () =>
 });
 
 // Independent: PsychroLib 2.5.0, GetVapPresFromHumRatio (test/vectors/moisture). It uses 0.621945 for M_w/M_air.
-test.each(vector<{ Y: number; p: number; p_w: number }[]>('moisture/humidity-ratio-of-air.json'))(
+test.each(vector('moisture/humidity-ratio-of-air.json') as { Y: number; p: number; p_w: number }[])(
 	'air with $Y kg/kg has the vapour pressure that PsychroLib gives',
 	({ Y, p, p_w }) => {
 		expect(agreesWithin(wetFromHumidityRatio(Y, 28.966e-3) * p, p_w, 1e-4)).toBe(true);

@@ -16,7 +16,7 @@ test.each(table35)('IAPWS R7-97 Table 35 at $T K: $printed MPa', ({ T, printed }
 });
 
 // Independent: iapws 1.5.4, iapws97._PSat_T (test/vectors/moisture/saturation-pressure.json).
-test.each(vector<{ T: number; p: number }[]>('moisture/saturation-pressure.json'))(
+test.each(vector('moisture/saturation-pressure.json') as { T: number; p: number }[])(
 	'over water at $T K the saturation pressure is $p Pa',
 	({ T, p }) => {
 		const found = saturationPressure(T);

@@ -15,7 +15,7 @@ test.each(table36)('IAPWS R7-97 Table 36 at $MPa MPa: $printed K', ({ MPa, print
 });
 
 // Independent: iapws 1.5.4, iapws97._TSat_P (test/vectors/moisture/saturation-temperature.json).
-test.each(vector<{ T: number; p: number }[]>('moisture/saturation-temperature.json'))(
+test.each(vector('moisture/saturation-temperature.json') as { T: number; p: number }[])(
 	'vapour of $p Pa condenses at $T K',
 	({ T, p }) => {
 		const found = saturationTemperature(p);

@@ -16,7 +16,7 @@ test('ice, water and vapour meet at 273.16 K and 611.657 Pa', () => {
 });
 
 // Independent: iapws 1.5.4, _iapws._Sublimation_Pressure (test/vectors/moisture/sublimation-pressure.json).
-test.each(vector<{ T: number; p: number }[]>('moisture/sublimation-pressure.json'))(
+test.each(vector('moisture/sublimation-pressure.json') as { T: number; p: number }[])(
 	'over ice at $T K the pressure is $p Pa',
 	({ T, p }) => {
 		const found = sublimationPressure(T);

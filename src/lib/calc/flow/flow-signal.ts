@@ -29,7 +29,8 @@ export function differencePressureOf(current: number, span: number, characterist
  * @param current I [A]
  * @param span Δp_span [Pa]
  * @param dp Δp, read independently at the same time [Pa]
- * @returns the characteristic the two readings fit, 'neither' within 2 % of span, or 'cannot tell' near zero and span
+ * @returns the characteristic that fits both readings within 2 % of span [a name], 'neither', or 'cannot tell' where Δp is
+ *   below 2 % or above 85 % of the span
  *
  * Source: derived here.
  * Checked against: worked by hand (test/calc/flow/flow-signal.test.ts).

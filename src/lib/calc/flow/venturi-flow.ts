@@ -1,17 +1,18 @@
 import { fail, ok, type Result } from '../../base';
 import type { CalcNote, CalcResult, Refusal } from '../calculator';
 import { defineCalculator } from '../define-calculator';
+import { pressureOf, staticPressure } from '../gas/static-pressure';
 import { propagate, type Numbers, type Uncertain } from '../uncertainty';
 import { dischargeCoefficient, type Coefficient } from './discharge-coefficient';
 import { expansibility, expansibilityUncertainty, TAU_MIN } from './expansibility';
 import { massFlow, reynoldsNumber } from './mass-flow';
 import { LOSS_BAND, permanentLoss } from './permanent-loss';
+import { differencePressure } from './venturi-dp';
 import { venturiGas, type VenturiGas } from './venturi-gas';
 import { VENTURI_INPUTS, type VenturiGiven } from './venturi-inputs';
 import { diameterInputs, diameters, venturiModel } from './venturi-model';
 import { VENTURI_OUTPUTS, venturiValues } from './venturi-outputs';
 import { venturiPlot } from './venturi-plot';
-import { differencePressure, pressureOf, upstreamPressure } from './venturi-pressure';
 import { venturiScope } from './venturi-scope';
 import { VENTURI_TYPES } from './venturi-types';
 
@@ -21,12 +22,12 @@ import { VENTURI_TYPES } from './venturi-types';
  *     q_m = C ε (π/4) d² √(2 Δp ρ₁) / √(1 − β⁴),   Re_D = 4 q_m / (π μ₁ D)
  *     (U_q/q)² = (U_C/C)² + (U_ε/ε)² + (2β⁴/(1−β⁴))² (U_D/D)² + (2/(1−β⁴))² (U_d/d)² + ¼ (U_Δp/Δp)² + ¼ (U_ρ/ρ)²
  *
- * Inputs: D, d [m], β = d/D 0.30 to 0.75 by type; Δp [Pa], Δp ≤ 0.25 p₁; p₁ [Pa absolute] or gauge with barometer; T [K];
- * ρ₁ [kg/m³], μ₁ [Pa s], κ [1] ≥ 1, or the composition xᵢ [1] they follow from; Z [1].
- * Outputs: q_m [kg/s], q_v [m³/s], q_n wet and dry [m³(n)/s], velocities [m/s], Re_D, C, ε [1], permanent loss [Pa].
- *
  * Outside the limits of the type the result is shown and flagged: it proves no step. Below Re_D = 2·10⁵ the coefficient is
  * that of an indicative table, found by iteration, since it depends on the flow it gives.
+ *
+ * @param inputs D, d [m], β = d/D from 0.30 to 0.75 by type; Δp [Pa] ≤ 0.25 p₁; p₁ [Pa absolute], or gauge with barometer;
+ *   T [K]; ρ₁ [kg/m³], μ₁ [Pa s], κ [1] ≥ 1, or the composition xᵢ [1] they follow from; Z [1]
+ * @returns q_m [kg/s], q_v [m³/s], q_n wet and dry [m³(n)/s], velocities [m/s], Re_D, C, ε [1], permanent loss [Pa]
  *
  * Source: ISO 5167-1:2003, Eq. (1) and 8.2.2; ISO 5167-4:2003, 5.5 to 5.9 (clauses from memory, verify).
  * Checked against: fluids 1.0.22, 66 cases (test/calc/flow/venturi-flow.test.ts).
@@ -51,7 +52,7 @@ type Computed = Omit<CalcResult, 'calc' | 'constants' | 'inputs'>;
 
 function compute(given: VenturiGiven): Result<Computed, readonly Refusal[]> {
 	const geometry = geometryRefusals(given);
-	const upstream = upstreamPressure(given);
+	const upstream = staticPressure(given);
 	const difference = differencePressure(given);
 	const gas = upstream.ok ? venturiGas(given, upstream.value) : upstream;
 	if (geometry.length > 0 || !difference.ok || !upstream.ok || !gas.ok) {
@@ -75,7 +76,7 @@ function flowOf(
 	const { density } = gas.at(values);
 	const { D, d } = diameters(given, values, given.temperature.value);
 	const beta = d / D;
-	const dp = values['dp'] ?? NaN;
+	const dp = values.dp ?? NaN;
 	const expansion = { dp, p1: pressure, beta, kappa: gas.kappa };
 	const epsilon = expansibility(expansion);
 	const flowWith = (C: number) => massFlow({ C, epsilon, d, D, dp, rho1: density });
@@ -93,7 +94,7 @@ function flowOf(
 	];
 	const flow = model(valuesOf(inputs));
 	const { U, budget, unstated } = propagate(model, inputs);
-	const reynolds = reynoldsOf(flow['massFlow'] ?? NaN);
+	const reynolds = reynoldsOf(flow.massFlow ?? NaN);
 	const { C: constant } = VENTURI_TYPES[given.type];
 	const facts = {
 		D,
@@ -173,7 +174,7 @@ function uncertaintyNotes(
 	given: VenturiGiven,
 	{ flow, U, unstated }: { flow: Numbers; U: Numbers; unstated: readonly string[] },
 ): readonly CalcNote[] {
-	const relativeU = U['massFlow'] === undefined ? undefined : U['massFlow'] / (flow['massFlow'] ?? NaN);
+	const relativeU = U.massFlow === undefined ? undefined : U.massFlow / (flow.massFlow ?? NaN);
 	const limit = given.uncertaintyLimit?.value;
 	return [
 		...(unstated.length > 0 ? [{ kind: 'uncertainty-not-stated', level: 'warning', inputs: unstated } as const] : []),

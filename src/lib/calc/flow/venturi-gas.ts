@@ -6,10 +6,10 @@ import { gasDensity } from '../gas/gas-density';
 import { gasViscosity } from '../gas/gas-viscosity';
 import { isentropicExponent } from '../gas/isentropic-exponent';
 import { molarMass } from '../gas/molar-mass';
+import { pressureOf } from '../gas/static-pressure';
 import { dewPoint } from '../moisture/dew-point';
 import type { Numbers, Uncertain } from '../uncertainty';
 import type { VenturiGiven } from './venturi-inputs';
-import { pressureOf } from './venturi-pressure';
 
 /** The gas at the upstream tapping, and how it follows its inputs. */
 export type VenturiGas = {
@@ -90,7 +90,7 @@ function gasOf(values: Numbers, base: Composition | undefined): GasAt {
 	const wet = base === undefined ? undefined : wetGas(values, base);
 	const ofComposition = wet === undefined ? undefined : molarMass(wet);
 	const density =
-		values['density'] ?? gasDensity({ pressure, temperature, compressibility, molarMass: ofComposition ?? NaN });
+		values.density ?? gasDensity({ pressure, temperature, compressibility, molarMass: ofComposition ?? NaN });
 	const implied = (density * compressibility * R * temperature) / pressure;
 	const mass = ofComposition ?? (implied >= LIGHTEST && implied <= HEAVIEST ? implied : undefined);
 	const vapour = wet === undefined ? waterVapour : (wet.H2O ?? 0);
@@ -109,7 +109,7 @@ function wetGas(values: Numbers, base: Composition): Composition {
 	const others = gasesBesideBalance(base).map(([gas, x]) => [gas, values[`x_${gas}`] ?? x] as const);
 	const rest = 1 - others.reduce((sum, [, x]) => sum + x, 0);
 	const x: Composition = { ...Object.fromEntries(others), [balanceOf(base)]: rest };
-	return values['waterVapour'] === undefined ? x : moistened(x, values['waterVapour']);
+	return values.waterVapour === undefined ? x : moistened(x, values.waterVapour);
 }
 
 const balanceOf = (x: Composition): Gas =>

@@ -1,4 +1,5 @@
 import { compositionSchema, readComposition } from '../gas/composition';
+import { pressureInputs } from '../gas/static-pressure';
 import { choice, measured, measuredList, optional, shaped, withDefault, type Given } from '../read-inputs';
 
 /** Everything `venturi-flow@1` can be told. What may be given in more than one way is optional here and checked after. */
@@ -94,32 +95,7 @@ export const VENTURI_INPUTS = {
 			from: 'reading',
 		}),
 	),
-	pressure: optional(
-		measured({
-			symbol: 'p1',
-			means: 'absolute pressure at the upstream tapping',
-			quantity: 'pressure-absolute',
-			min: 1e3,
-			max: 1e7,
-			from: 'reading',
-		}),
-	),
-	pressureGauge: optional(
-		measured({
-			means: 'gauge pressure at the upstream tapping; needs the barometer',
-			quantity: 'pressure-gauge',
-			from: 'reading',
-		}),
-	),
-	barometer: optional(
-		measured({
-			means: 'absolute pressure of the air outside, at this place and hour',
-			quantity: 'pressure-absolute',
-			min: 5e4,
-			max: 1.1e5,
-			from: 'reading',
-		}),
-	),
+	...pressureInputs('at the upstream tapping'),
 	temperature: measured({
 		symbol: 'T',
 		means: 'temperature of the gas at the upstream tapping',

@@ -1,29 +1,10 @@
 import { fail, ok, type Result } from '../../base';
-import { absolutePressure, si } from '../../quantity';
 import type { CalcNote, Refusal } from '../calculator';
 import { LIVE_SIGNAL } from '../constants';
 import type { Uncertain } from '../uncertainty';
 import { characteristicSeen, differencePressureOf } from './flow-signal';
 import { meanOfRoots, PULSATION_LIMIT } from './mean-of-roots';
 import type { VenturiGiven } from './venturi-inputs';
-
-/** Upstream pressure as the inputs of the model that make it up: absolute, or gauge and barometer. */
-export function upstreamPressure(given: VenturiGiven): Result<readonly Uncertain[], readonly Refusal[]> {
-	const { pressure, pressureGauge, barometer } = given;
-	if ((pressure === undefined) === (pressureGauge === undefined)) {
-		return fail([{ kind: 'one-of', inputs: ['pressure', 'pressureGauge'], given: pressure === undefined ? 0 : 2 }]);
-	}
-	if (pressure !== undefined) return ok([{ ...pressure, name: 'pressure', symbol: 'p1', unit: 'Pa(a)' }]);
-	if (pressureGauge === undefined || barometer === undefined) {
-		return fail([{ kind: 'gauge-without-barometer', input: 'pressureGauge', needs: 'barometer' }]);
-	}
-	const absolute = absolutePressure(pressureGauge.value, barometer.value);
-	if (!absolute.ok) return fail([{ input: 'pressureGauge', ...absolute.error }]);
-	return ok([
-		{ ...pressureGauge, name: 'pressureGauge', symbol: 'p_g', unit: 'Pa(g)' },
-		{ ...barometer, name: 'barometer', symbol: 'p_b', unit: 'Pa(a)' },
-	]);
-}
 
 export type DifferencePressure = { readonly dp: Uncertain; readonly notes: readonly CalcNote[] };
 
@@ -115,7 +96,3 @@ function characteristicNotes(given: VenturiGiven, dp: number | undefined): reado
 
 /** 20.5 mA: beyond it the sensor is out of its range. */
 const RANGE_END = (LIVE_SIGNAL.max - 4e-3) / 16e-3;
-
-/** Upstream pressure of a set of model values. */
-export const pressureOf = (values: { readonly [name: string]: number }): number =>
-	si('pressure-absolute', values['pressure'] ?? (values['pressureGauge'] ?? NaN) + (values['barometer'] ?? NaN));
