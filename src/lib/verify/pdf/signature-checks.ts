@@ -81,7 +81,7 @@ export async function checkKey(
 	const sub = 'NO_SIGNING_CERTIFICATE_FOUND';
 	if (cms.certificate === undefined) {
 		const because = 'No certificate inside is the one that signing-certificate-v2 names.';
-		return { checks: [undecided(name, because, { field, sub })], certificate: undefined };
+		return { checks: [failed(name, because, { field, sub })], certificate: undefined };
 	}
 	const read = readCertificate(cms.certificate);
 	if (!read.ok) {
