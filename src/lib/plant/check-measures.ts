@@ -23,6 +23,7 @@ const measuresOf = (plant: Plant): readonly Typed[] => [
 	['altitude', plant.altitude, 'length'],
 	['purge.filterCleaningCycle', plant.purge?.filterCleaningCycle, 'time'],
 	['purge.circuitGasFlow', plant.purge?.circuitGasFlow, 'volume-flow'],
+	['purge.inertGasFlow', plant.purge?.inertGasFlow, 'volume-flow-normal-wet'],
 	...plant.volumes.map(({ volume }, i): Typed => [`volumes[${i}].volume`, volume, 'volume']),
 	...plant.ducts.flatMap(({ diameter, length }, i): readonly Typed[] => [
 		[`ducts[${i}].diameter`, diameter, 'length'],

@@ -216,6 +216,8 @@ export const PlantSchema = v.strictObject({
 		v.strictObject({
 			filterCleaningCycle: MeasureSchema,
 			circuitGasFlow: MeasureSchema,
+			/** Planned flow of inert gas, by its own meter. */
+			inertGasFlow: v.exactOptional(MeasureSchema),
 			minimumVolumeChanges: v.exactOptional(v.number()),
 			outlet: Text,
 		}),

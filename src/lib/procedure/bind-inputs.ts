@@ -1,7 +1,9 @@
 import { fail, ok, unreachable, type Result } from '../base';
 import { CATALOGUE } from '../calc';
-import { isInCalibration, type Plant } from '../plant';
+import { differenceOf, isInCalibration, type Measure, type Plant } from '../plant';
+import { fromSi, isQuantityName, toSi } from '../quantity';
 import type { Binding } from './binding';
+import { fieldsOf } from './fields';
 import type { BoundReading, BoundRow, BoundSeries, Lookup } from './lookup';
 import { atPlantPath } from './plant-path';
 import type { Procedure, Step } from './schema';
@@ -71,7 +73,11 @@ function valueOf(binding: Single, input: string, { procedure, plant, lookup }: A
 	switch (binding.from) {
 		case 'field': {
 			const reading = lookup.reading(binding.step, binding.field);
-			return reading && measureOf(reading);
+			return reading && measureOf(reading, pointOf(binding, procedure, plant));
+		}
+		case 'age': {
+			const reading = lookup.reading(binding.step, binding.field);
+			return reading && { value: (lookup.now - reading.at) / 1000, unit: 's' };
 		}
 		case 'mode':
 			return lookup.reading(binding.step, binding.field)?.mode ?? 'not known';
@@ -92,7 +98,7 @@ function valueOf(binding: Single, input: string, { procedure, plant, lookup }: A
 			const series = lookup.series(binding.zero);
 			const rows = lookup.rows(binding.step);
 			const step = procedure.steps.find(({ id }) => id === binding.step);
-			return series && rows && step?.kind === 'coverage' ? coverageOf(step, rows, series) : undefined;
+			return series && rows && step?.kind === 'coverage' ? coverageOf(step, { rows, series, plant }) : undefined;
 		}
 		case 'result': {
 			const found = lookup.result(binding.step)?.values[binding.output];
@@ -117,38 +123,57 @@ function valueOf(binding: Single, input: string, { procedure, plant, lookup }: A
 	}
 }
 
-const measureOf = ({ typed, unit }: BoundReading) => ({ value: typed, unit });
+type Point = Plant['points'][number];
+
+/** The measuring point that a field reads; undefined for a value that was worked out. */
+function pointOf(
+	{ step, field }: { readonly step: string; readonly field: string },
+	{ steps }: Procedure,
+	{ points }: Plant,
+): Point | undefined {
+	const bound = steps.find(({ id }) => id === step);
+	const tag = bound && fieldsOf(bound).find(({ id }) => id === field)?.point;
+	return points.find((point) => point.tag === tag);
+}
+
+/** A reading as typed, with the expanded uncertainty of its measuring point in the unit that was typed. */
+function measureOf({ typed, unit }: BoundReading, point?: Point): Measure {
+	const U = point?.uncertainty;
+	if (point === undefined || U === undefined || !isQuantityName(point.quantity)) return { value: typed, unit };
+	const difference = differenceOf(point.quantity);
+	const inSi = toSi(U, difference);
+	const shown = inSi.ok ? fromSi(inSi.value.value, difference, unit.replace(/\([ag]\)$/, '')) : inSi;
+	return { value: typed, unit, ...(shown.ok ? { U: shown.value } : {}) };
+}
 
 const secondsAfter = ({ zeroAt }: BoundSeries, at: number): number => (at - zeroAt) / 1000;
 
+type Answers = { readonly rows: readonly BoundRow[]; readonly series: BoundSeries; readonly plant: Plant };
+
 /** Every row of the table as the purge calculator asks for it; a row without an answer is handed on as blank. */
-function coverageOf(
-	{ rows }: Extract<Step, { readonly kind: 'coverage' }>,
-	answers: readonly BoundRow[],
-	series: BoundSeries,
-): readonly unknown[] {
-	return rows.map(({ id, volume, point, inertedBy }) => {
-		const answer = answers.find(({ row }) => row === id);
-		const gas = answer?.reading && {
-			tag: answer.reading.tag ?? point ?? id,
-			basis: answer.reading.basis ?? 'dry',
-			t: secondsAfter(series, answer.reading.at),
-			oxygen: measureOf(answer.reading),
-		};
+const coverageOf = (step: Extract<Step, { readonly kind: 'coverage' }>, answers: Answers): readonly unknown[] =>
+	step.rows.map((row) => {
+		const answer = answers.rows.find((each) => each.row === row.id);
+		const { volume } = row;
 		switch (answer?.found) {
 			case 'measured':
-				return { volume, answer: 'measured', place: point ?? '' };
-			case 'swept, outlet read':
-				return { volume, answer: 'swept, outlet read', ...(gas === undefined ? {} : { outlet: gas }) };
-			case 'shut off, inerted by itself':
-				return {
-					volume,
-					answer: 'shut off, inerted by itself',
-					inertedBy: inertedBy ?? '',
-					...(gas === undefined ? {} : { reading: gas }),
-				};
+				return { volume, answer: answer.found, place: row.point ?? '' };
+			case 'swept, outlet read': {
+				const outlet = gasOf(answer.reading, answers);
+				return { volume, answer: answer.found, ...(outlet && { outlet }) };
+			}
+			case 'shut off, inerted by itself': {
+				const reading = gasOf(answer.reading, answers);
+				return { volume, answer: answer.found, inertedBy: row.inertedBy ?? '', ...(reading && { reading }) };
+			}
 			default:
 				return { volume, answer: '' };
 		}
 	});
+
+/** A gas reading without a basis is no reading: whether it is wet or dry belongs to what it was read with. */
+function gasOf(reading: BoundReading | undefined, { series, plant }: Answers) {
+	const basis = reading?.basis ?? plant.points.find(({ tag }) => tag === reading?.tag)?.basis;
+	if (reading?.tag === undefined || basis === undefined) return undefined;
+	return { tag: reading.tag, basis, t: secondsAfter(series, reading.at), oxygen: measureOf(reading) };
 }

@@ -10,6 +10,8 @@ const Text = v.pipe(v.string(), v.minLength(1), v.maxLength(2000));
 export type Binding =
 	/** A reading of a step, as typed. */
 	| { readonly from: 'field'; readonly step: string; readonly field: string }
+	/** How old that reading is when the calculation runs. */
+	| { readonly from: 'age'; readonly step: string; readonly field: string }
 	/** What the analyser was said to be doing when that reading was taken: measuring, hold, back-purge ... */
 	| { readonly from: 'mode'; readonly step: string; readonly field: string }
 	/** The samples of a series step, by tag. */
@@ -42,6 +44,7 @@ const nested: v.GenericSchema<unknown, Binding> = v.lazy(() => BindingSchema);
 
 export const BindingSchema: v.GenericSchema<unknown, Binding> = v.variant('from', [
 	v.strictObject({ from: v.literal('field'), step: Id, field: Id }),
+	v.strictObject({ from: v.literal('age'), step: Id, field: Id }),
 	v.strictObject({ from: v.literal('mode'), step: Id, field: Id }),
 	v.strictObject({ from: v.literal('series'), step: Id }),
 	v.strictObject({ from: v.literal('zero'), step: Id }),

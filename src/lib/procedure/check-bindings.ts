@@ -76,6 +76,7 @@ function checkBinding(binding: Binding, place: Place, around: Around): readonly 
 	const inside = (part: string): Place => ({ ...place, path: `${place.path}.${part}` });
 	switch (binding.from) {
 		case 'field':
+		case 'age':
 		case 'mode':
 			return fieldOf(binding, place, around);
 		case 'series':
@@ -131,7 +132,7 @@ function stepOf(
 	return [{ kind: 'bound-to-higher-gate', ...place, to: name, gate: step.gate, higher: bound.gate }];
 }
 
-function fieldOf(binding: From<'field' | 'mode'>, place: Place, around: Around): readonly ProcedureFinding[] {
+function fieldOf(binding: From<'field' | 'age' | 'mode'>, place: Place, around: Around): readonly ProcedureFinding[] {
 	const path = `${place.path}.step`;
 	const wrong = stepOf(binding, { ...place, path }, around);
 	const step = around.procedure.steps.find(({ id }) => id === binding.step);

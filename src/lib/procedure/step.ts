@@ -37,6 +37,8 @@ const shared = {
 	/** Imperative, one action. */
 	does: v.exactOptional(Text),
 	why: v.exactOptional(Text),
+	/** Where the demand or its time limit comes from, when no limit of a field says it. */
+	source: v.exactOptional(SourceSchema),
 	/** Tags and volumes of the plant description. */
 	where: v.exactOptional(v.array(Id)),
 	/** Expected work. */
