@@ -47,10 +47,9 @@ async function checkOne(
 	events: readonly SignedEvent[],
 	trust: Anchored,
 ): Promise<readonly Check[]> {
-	const [atFirst, atLast] = await Promise.all([
-		ask(certificate, events[0], trust),
-		ask(certificate, events.at(-1), trust),
-	]);
+	const [first, last] = [events[0], events.at(-1)];
+	const atLast = await ask(certificate, last, trust);
+	const atFirst = first === last ? atLast : await ask(certificate, first, trust);
 	const worst = atLast.findings.map((finding, i) =>
 		finding.outcome === 'passed' ? (atFirst.findings[i] ?? finding) : finding,
 	);

@@ -67,8 +67,9 @@ function readLine(line: Line): ReturnType<typeof parseEventLine> {
 /** Names the line, and the tablet and number that it seems to have been: a damaged line cannot vouch for its name. */
 function unreadableLine({ file, number, bytes }: Line, error: EventError): Check {
 	const text = new TextDecoder('latin1').decode(bytes);
-	const device = /\\?"device\\?":\\?"([^"\\]{1,128})/.exec(text)?.[1];
-	const count = /\\?"number\\?":(\d{1,9})/.exec(text)?.[1];
+	// The last of each: names of the envelope stand after its body, which may hold the same names.
+	const device = [...text.matchAll(/\\?"device\\?":\\?"([^"\\]{1,128})/g)].at(-1)?.[1];
+	const count = [...text.matchAll(/\\?"number\\?":(\d{1,9})/g)].at(-1)?.[1];
 	const seems =
 		device === undefined || count === undefined ? '' : `, which seems to have been ${device} number ${count}`;
 	return failed('lines can be read', `Line ${number} of ${file}${seems}: ${why(error)}.`, {
