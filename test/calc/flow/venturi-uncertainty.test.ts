@@ -107,3 +107,23 @@ test('outside its Reynolds range the coefficient has no known uncertainty, and n
 	expect(run(nitrogen).values.massFlow).not.toHaveProperty('U');
 	expect(kindsOf(nitrogen)).toContain('coefficient-not-of-the-standard');
 });
+
+// By hand: 760, 840, 760, 840 Pa scatter by 5 % about 800 Pa; twice the standard uncertainty of the mean of four is
+// 2 x 0.05 x 799.5/sqrt(3) = 46.16 Pa, and with 8 Pa that all readings share 46.85 Pa.
+test('a series is as uncertain as its instrument and its scatter together', () => {
+	const { dp: _, ...inputs } = CIRCUIT;
+	const series = [760, 840, 760, 840].map((value) => ({ value, unit: 'Pa', U: 8 }));
+	const { differencePressure } = run({ ...inputs, dpSeries: series }).values;
+	expect(agreesWith(differencePressure?.U ?? NaN, '46.85')).toBe(true);
+	expect(run({ ...inputs, dpSeries: [760, 840, 760, 840] }).values.massFlow).not.toHaveProperty('U');
+});
+
+// By hand: 12 mA is half the span; 0.02 mA of 16 mA is 0.125 %, so 4 Pa of a 3200 Pa span sent linearly.
+test('the uncertainty of a signal becomes one of the difference pressure, by the setting of the transmitter', () => {
+	const { dp: _, ...inputs } = CIRCUIT;
+	const signal = { ...inputs, signal: { value: 12, unit: 'mA', U: 0.02 }, dpSpan: 3200 };
+	expect(run(signal).values.differencePressure).toMatchObject({ value: 1600, U: expect.closeTo(4, 6) as number });
+	// Sent as a root, 12 mA is a quarter, and 2 x 0.5 x 0.125 % again 4 Pa.
+	const root = run({ ...signal, transmitter: 'root' }).values.differencePressure;
+	expect(root).toMatchObject({ value: 800, U: expect.closeTo(4, 6) as number });
+});

@@ -50,7 +50,8 @@ function byReading(given: VenturiGiven): Result<DifferencePressure, readonly Ref
 	);
 	if (reversed.length > 0) return fail(reversed);
 	const { dp: value, pulsation, overread } = meanOfRoots(series.map((reading) => reading.value));
-	const scatter = (2 * pulsation * value) / Math.sqrt(series.length);
+	// Twice the standard uncertainty of the mean, s/√n (JCGM 100:2008, 4.2.3), beside what all readings have in common.
+	const scatter = (2 * pulsation * value) / Math.sqrt(series.length - 1);
 	const systematic = series.map((reading) => reading.U ?? NaN).reduce((most, U) => Math.max(most, U), 0);
 	const notes: readonly CalcNote[] = [
 		{ kind: 'mean-of-roots', level: 'remark', readings: series.length, pulsation, overread },

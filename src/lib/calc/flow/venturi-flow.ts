@@ -2,19 +2,17 @@ import { fail, ok, type Result } from '../../base';
 import type { CalcNote, CalcResult, Refusal } from '../calculator';
 import { defineCalculator } from '../define-calculator';
 import { pressureOf, staticPressure } from '../gas/static-pressure';
-import { propagate, type Numbers, type Uncertain } from '../uncertainty';
-import { dischargeCoefficient, type Coefficient } from './discharge-coefficient';
-import { expansibility, expansibilityUncertainty, TAU_MIN } from './expansibility';
-import { massFlow, reynoldsNumber } from './mass-flow';
+import { propagate, type Numbers, type Propagated, type Uncertain } from '../uncertainty';
+import { expansibilityUncertainty, TAU_MIN } from './expansibility';
 import { LOSS_BAND, permanentLoss } from './permanent-loss';
 import { differencePressure } from './venturi-dp';
 import { venturiGas, type VenturiGas } from './venturi-gas';
 import { VENTURI_INPUTS, type VenturiGiven } from './venturi-inputs';
-import { diameterInputs, diameters, venturiModel } from './venturi-model';
+import { diameterInputs, venturiModel } from './venturi-model';
 import { VENTURI_OUTPUTS, venturiValues } from './venturi-outputs';
 import { venturiPlot } from './venturi-plot';
 import { venturiScope } from './venturi-scope';
-import { VENTURI_TYPES } from './venturi-types';
+import { workingPoint } from './working-point';
 
 /**
  * What flows through a classical Venturi tube: mass, actual and normal flow, wet and dry, and the velocity in the duct.
@@ -71,82 +69,43 @@ function flowOf(
 	measured: readonly Uncertain[],
 	readingNotes: readonly CalcNote[],
 ): Computed {
-	const values = valuesOf(measured);
-	const pressure = pressureOf(values);
-	const { density } = gas.at(values);
-	const { D, d } = diameters(given, values, given.temperature.value);
-	const beta = d / D;
-	const dp = values.dp ?? NaN;
-	const expansion = { dp, p1: pressure, beta, kappa: gas.kappa };
-	const epsilon = expansibility(expansion);
-	const flowWith = (C: number) => massFlow({ C, epsilon, d, D, dp, rho1: density });
-	const reynoldsOf = (flow: number) => reynoldsNumber(flow, gas.viscosity, D);
-	const coefficient = solveCoefficient(given, (C) => reynoldsOf(flowWith(C)));
-
+	const point = workingPoint(given, gas, valuesOf(measured));
+	const { dp, p1, beta, D, coefficient } = point;
 	const model = venturiModel(given, gas);
 	const inputs = [
 		...measured,
-		relative({ name: 'dischargeCoefficient', symbol: 'C', value: coefficient.C, unit: '1' }, coefficient.U),
-		relative(
-			{ name: 'expansibility', symbol: 'epsilon', value: epsilon, unit: '1' },
-			expansibilityUncertainty(expansion),
+		withRelative({ name: 'dischargeCoefficient', symbol: 'C', value: coefficient.C, unit: '1' }, coefficient.U),
+		withRelative(
+			{ name: 'expansibility', symbol: 'epsilon', value: point.epsilon, unit: '1' },
+			expansibilityUncertainty(point),
 		),
 	];
 	const flow = model(valuesOf(inputs));
-	const { U, budget, unstated } = propagate(model, inputs);
-	const reynolds = reynoldsOf(flow.massFlow ?? NaN);
-	const { C: constant } = VENTURI_TYPES[given.type];
-	const facts = {
-		D,
-		beta,
-		reynolds,
-		dp,
-		pressure,
-		kappa: gas.kappa,
-		coefficient,
-		massFlowAtConstant: flowWith(constant),
-	};
 	const isFlowing = dp > 0;
+	const { U, budget, unstated } = isFlowing ? propagate(model, inputs) : NOTHING;
 	const notes = [
 		...readingNotes,
-		...(isFlowing ? venturiScope(given, facts) : []),
+		...(isFlowing ? venturiScope(given, point) : []),
 		...(isFlowing ? uncertaintyNotes(given, { flow, U, unstated }) : []),
 	];
-	const loss = permanentLoss(dp, beta, D);
-	const all: { readonly [name: string]: number | undefined } = {
+	const values = {
 		...flow,
 		beta,
-		pressureRatio: 1 - dp / pressure,
-		reynoldsNumber: reynolds,
+		pressureRatio: 1 - dp / p1,
+		reynoldsNumber: point.reynolds,
 		viscosity: gas.viscosity,
 		isentropicExponent: gas.kappa,
-		permanentLoss: loss,
+		permanentLoss: permanentLoss(dp, beta, D),
 		permanentLossLeast: LOSS_BAND.least * dp,
 		permanentLossMost: LOSS_BAND.most * dp,
 	};
 	return {
-		values: venturiValues(all, isFlowing ? U : {}),
+		values: venturiValues(values, U),
 		scope: notes.some((note) => note.level === 'outside scope') ? 'outside scope' : 'in scope',
 		notes,
-		budget: isFlowing ? budget.filter((row) => row.output === 'massFlow') : [],
-		plots: [venturiPlot({ ...expansion, C: coefficient.C, d, D, density, span: given.dpSpan?.value })],
+		budget: budget.filter((row) => row.output === 'massFlow'),
+		plots: [venturiPlot(point, given.dpSpan?.value)],
 	};
-}
-
-/**
- * The coefficient at the flow that it gives itself. Inside the range it is constant; in the indicative table it rises with
- * the Reynolds number far more slowly than in proportion, so the steps close in on one point.
- */
-function solveCoefficient(given: VenturiGiven, reynoldsWith: (C: number) => number): Coefficient {
-	let coefficient = dischargeCoefficient(given.type, reynoldsWith(VENTURI_TYPES[given.type].C));
-	if (coefficient.from !== 'indicative table') return coefficient;
-	for (let step = 0; step < 50; step++) {
-		const next = dischargeCoefficient(given.type, reynoldsWith(coefficient.C));
-		// At the lower end of the table the point itself can fall out of it: then the table does not reach this flow.
-		if (next.from !== 'indicative table' || Math.abs(next.C - coefficient.C) < 1e-12) return next;
-		coefficient = next;
-	}
-	return coefficient;
 }
 
 function geometryRefusals({ crossSection, pipeDiameter, throatDiameter }: VenturiGiven): readonly Refusal[] {
@@ -189,5 +148,8 @@ const dpInput = (dp: Uncertain): Uncertain => ({ ...dp, name: 'dp' });
 const valuesOf = (inputs: readonly Uncertain[]): Numbers =>
 	Object.fromEntries(inputs.map((input) => [input.name, input.value]));
 
-const relative = (input: Uncertain, U: number | undefined): Uncertain =>
+const withRelative = (input: Uncertain, U: number | undefined): Uncertain =>
 	U === undefined ? input : { ...input, U: U * input.value };
+
+/** Without flow there is nothing to be uncertain about: the result is outside scope anyway. */
+const NOTHING: Propagated = { U: {}, budget: [], unstated: [] };

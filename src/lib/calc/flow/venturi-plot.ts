@@ -2,24 +2,14 @@ import { fromSi } from '../../quantity';
 import type { Plot } from '../calculator';
 import { expansibility, TAU_MIN } from './expansibility';
 import { massFlow } from './mass-flow';
+import type { WorkingPoint } from './working-point';
 
-type Curve = {
-	readonly C: number;
-	readonly d: number;
-	readonly D: number;
-	readonly density: number;
-	readonly p1: number;
-	readonly beta: number;
-	readonly kappa: number;
-	readonly dp: number;
-	readonly span: number | undefined;
-};
-
-/** Flow over difference pressure at the present gas, up to the span, with the working point on it. */
-export function venturiPlot({ span, dp, density, p1, ...tube }: Curve): Plot {
+/** Flow over difference pressure at the present gas, up to the span, with the reading on it. */
+export function venturiPlot(point: WorkingPoint, span: number | undefined): Plot {
+	const { dp, p1, density } = point;
 	const flowAt = (at: number) => {
-		const epsilon = expansibility({ ...tube, dp: at, p1 });
-		const flow = massFlow({ ...tube, epsilon, dp: at, rho1: density }) / density;
+		const epsilon = expansibility({ ...point, dp: at });
+		const flow = massFlow({ ...point, C: point.coefficient.C, epsilon, dp: at, rho1: density }) / density;
 		const shown = fromSi(flow, 'volume-flow', 'm3/h');
 		return shown.ok ? shown.value : 0;
 	};

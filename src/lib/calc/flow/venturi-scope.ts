@@ -1,34 +1,21 @@
 import type { CalcNote } from '../calculator';
 import { STEEL_EXPANSION, T_20 } from '../constants';
-import type { Coefficient } from './discharge-coefficient';
 import type { VenturiGiven } from './venturi-inputs';
 import { isInside, VENTURI_TYPES, type Limits } from './venturi-types';
-
-/** What the limits are judged by. */
-export type VenturiFacts = {
-	readonly D: number;
-	readonly beta: number;
-	readonly reynolds: number;
-	readonly dp: number;
-	readonly pressure: number;
-	readonly kappa: number;
-	readonly coefficient: Coefficient;
-	/** What the constant of the type would have given, for comparison where it does not hold. */
-	readonly massFlowAtConstant: number;
-};
+import type { WorkingPoint } from './working-point';
 
 /** Everything that takes a result out of the standard's scope, and what else a reader must know about it. */
-export function venturiScope(given: VenturiGiven, facts: VenturiFacts): readonly CalcNote[] {
-	return [...limitNotes(given, facts), ...readingNotes(given, facts), ...installationNotes(given, facts)];
+export function venturiScope(given: VenturiGiven, point: WorkingPoint): readonly CalcNote[] {
+	return [...limitNotes(given, point), ...readingNotes(given, point), ...installationNotes(given, point)];
 }
 
-function limitNotes(given: VenturiGiven, facts: VenturiFacts): readonly CalcNote[] {
+function limitNotes(given: VenturiGiven, point: WorkingPoint): readonly CalcNote[] {
 	const limits: Limits = VENTURI_TYPES[given.type];
 	const { edition } = limits;
 	const judged = [
-		{ limit: 'D', value: facts.D, unit: 'm', range: limits.D },
-		{ limit: 'beta', value: facts.beta, unit: '1', range: limits.beta },
-		{ limit: 'Re_D', value: facts.reynolds, unit: '1', range: limits.Re_D },
+		{ limit: 'D', value: point.D, unit: 'm', range: limits.D },
+		{ limit: 'beta', value: point.beta, unit: '1', range: limits.beta },
+		{ limit: 'Re_D', value: point.reynolds, unit: '1', range: limits.Re_D },
 	];
 	const outside = judged
 		.filter(({ value, range }) => !isInside(value, range))
@@ -40,7 +27,7 @@ function limitNotes(given: VenturiGiven, facts: VenturiFacts): readonly CalcNote
 			max,
 			edition,
 		}));
-	const { coefficient, massFlowAtConstant } = facts;
+	const { coefficient, massFlowAtConstant } = point;
 	if (coefficient.from === 'standard') return outside;
 	const { C, U = null, from } = coefficient;
 	return [
@@ -57,7 +44,7 @@ function limitNotes(given: VenturiGiven, facts: VenturiFacts): readonly CalcNote
 	];
 }
 
-function readingNotes(given: VenturiGiven, { dp, pressure, kappa }: VenturiFacts): readonly CalcNote[] {
+function readingNotes(given: VenturiGiven, { dp, p1, kappa }: WorkingPoint): readonly CalcNote[] {
 	const notes: CalcNote[] = [];
 	const { dpSpan, dpZero, temperature, temperatureTaken, thermalExpansion } = given;
 	if (dpSpan !== undefined && dp < LEAST_PART * dpSpan.value) {
@@ -69,7 +56,7 @@ function readingNotes(given: VenturiGiven, { dp, pressure, kappa }: VenturiFacts
 		notes.push({ kind: 'zero-shifted', level, dpZero: dpZero.value, flowError });
 	}
 	if (temperatureTaken === 'downstream') {
-		const colderByAtMost = temperature.value * (1 - (1 - dp / pressure) ** ((kappa - 1) / kappa));
+		const colderByAtMost = temperature.value * (1 - (1 - dp / p1) ** ((kappa - 1) / kappa));
 		notes.push({ kind: 'temperature-from-downstream', level: 'warning', colderByAtMost });
 	}
 	const growth = 2 * STEEL_EXPANSION * Math.abs(temperature.value - T_20);
@@ -79,7 +66,7 @@ function readingNotes(given: VenturiGiven, { dp, pressure, kappa }: VenturiFacts
 	return notes;
 }
 
-function installationNotes(given: VenturiGiven, { D }: VenturiFacts): readonly CalcNote[] {
+function installationNotes(given: VenturiGiven, { D }: WorkingPoint): readonly CalcNote[] {
 	const notes: CalcNote[] = [];
 	const { dpCalibration, dust, flowCalibration, throatCondition, straightLength, straightLengthNeeded } = given;
 	if (dpCalibration === 'none') notes.push({ kind: 'no-calibration-certificate', level: 'outside scope' });
