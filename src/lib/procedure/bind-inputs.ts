@@ -92,8 +92,11 @@ function valueOf(binding: Single, input: string, { procedure, plant, lookup }: A
 		}
 		case 'person':
 			return lookup.person(binding.step);
-		case 'standing':
-			return lookup.standing(binding.step);
+		case 'standing': {
+			const standing = lookup.standing(binding.step);
+			const { says } = binding;
+			return says === undefined ? standing : standing === 'stands' ? says.stands : says.otherwise;
+		}
 		case 'coverage': {
 			const series = lookup.series(binding.zero);
 			const rows = lookup.rows(binding.step);

@@ -22,8 +22,8 @@ export type Binding =
 	| { readonly from: 'observed'; readonly step: string; readonly zero: string; readonly otherwise?: unknown }
 	/** Who performed a step. */
 	| { readonly from: 'person'; readonly step: string }
-	/** Whether the proof of a step stands. */
-	| { readonly from: 'standing'; readonly step: string }
+	/** Whether the proof of a step stands; `says` gives the calculator's own two words for it. */
+	| { readonly from: 'standing'; readonly step: string; readonly says?: Says }
 	/** The rows of a coverage step, with the readings taken at outlets. */
 	| { readonly from: 'coverage'; readonly step: string; readonly zero: string }
 	/** One output of another calculation step. */
@@ -40,6 +40,8 @@ export type Binding =
 	| { readonly from: 'group'; readonly of: { readonly [name: string]: Binding }; readonly optional?: true }
 	| { readonly from: 'list'; readonly of: readonly Binding[] };
 
+type Says = { readonly stands: string; readonly otherwise: string };
+
 const nested: v.GenericSchema<unknown, Binding> = v.lazy(() => BindingSchema);
 
 export const BindingSchema: v.GenericSchema<unknown, Binding> = v.variant('from', [
@@ -50,7 +52,11 @@ export const BindingSchema: v.GenericSchema<unknown, Binding> = v.variant('from'
 	v.strictObject({ from: v.literal('zero'), step: Id }),
 	v.strictObject({ from: v.literal('observed'), step: Id, zero: Id, otherwise: v.exactOptional(v.unknown()) }),
 	v.strictObject({ from: v.literal('person'), step: Id }),
-	v.strictObject({ from: v.literal('standing'), step: Id }),
+	v.strictObject({
+		from: v.literal('standing'),
+		step: Id,
+		says: v.exactOptional(v.strictObject({ stands: v.string(), otherwise: v.string() })),
+	}),
 	v.strictObject({ from: v.literal('coverage'), step: Id, zero: Id }),
 	v.strictObject({ from: v.literal('result'), step: Id, output: Id }),
 	v.strictObject({ from: v.literal('plant'), path: v.string() }),

@@ -140,6 +140,8 @@ export const GATE_2_ANALYSERS: readonly Draft[] = [
 			stock: { from: 'field', step: '2.9', field: 'content' },
 			reserve: { from: 'plant', path: 'inertSources/NS-21/stock/reserve' },
 			limitingOxygen: { from: 'plant', path: 'fuel/limitingOxygen/value' },
+			// The smaller margin holds only while the trip is proved and not bypassed.
+			oxygenTrip: { from: 'standing', step: '1.11', says: { stands: 'proved', otherwise: 'not proved' } },
 		},
 		proves: {
 			output: 'stockLeft',

@@ -94,8 +94,12 @@ export const VENTURI: { readonly [input: string]: Binding } = {
 	temperature: field('2.14', 'TT-201'),
 	composition: {
 		from: 'procedure',
-		value: { N2: 0.84, O2: 0.15, H2O: 0.01 },
-		why: 'between air and nitrogen: the density of both lies within 2 %, the flow within 1 %',
+		value: {
+			N2: { value: 84, unit: '%', U: 6 },
+			O2: { value: 15, unit: '%', U: 6 },
+			H2O: { value: 1, unit: '%', U: 1 },
+		},
+		why: 'between air and nitrogen, wherever in the purge it is read: U spans both',
 	},
 	dpCalibration: { from: 'calibration', instrument: 'PDT-201' },
 	dust: { from: 'procedure', value: 'none', why: 'no fuel has been fed' },

@@ -1,0 +1,21 @@
+import { readFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { parsePlant, type Plant } from '../../src/lib/plant';
+import { parseProcedure, type Procedure } from '../../src/lib/procedure';
+
+export const readDemo = (file: string): unknown =>
+	JSON.parse(readFileSync(join(import.meta.dirname, '../../static/demo', file), 'utf8'));
+
+/** The demonstration unit FM-1; a test that cannot read it has nothing to test. */
+export function demoPlant(): Plant {
+	const plant = parsePlant(readDemo('plant.json'));
+	if (!plant.ok) throw new Error(JSON.stringify(plant.error));
+	return plant.value;
+}
+
+/** GD-1, the test procedure of the start-up night. */
+export function nightProcedure(): Procedure {
+	const procedure = parseProcedure(readDemo('night/procedure.json'));
+	if (!procedure.ok) throw new Error(JSON.stringify(procedure.error));
+	return procedure.value;
+}
