@@ -116,7 +116,7 @@ export function purgeInputs(change: Partial<Scene> = {}, step = 10) {
 			...{ tag, title, volume, basis: 'dry', principle: 'paramagnetic', lag, T90 },
 			...{ range: { from: { value: 0, unit: '%' }, to: { value: 25, unit: '%' } }, U: { value: 0.24, unit: '%' } },
 			...{ resolution: { value: 0.01, unit: '%' }, check: 'stands', mode: 'measuring' },
-			airBefore: { t: -600, oxygen: { value: 20.9, unit: '%' } } as unknown,
+			airBefore: { t: -600, oxygen: { value: 20.9, unit: '%' } },
 		})) as Record<string, unknown>[],
 		series: {
 			...Object.fromEntries(
@@ -153,6 +153,16 @@ export function purgeInputs(change: Partial<Scene> = {}, step = 10) {
 	};
 }
 
+/** The base scene with something changed in place; a deep copy, so that tests do not meet. */
+export const changed = (change: (inputs: Inputs) => unknown, scene: Partial<Scene> = {}): Inputs => {
+	const inputs = purgeInputs(scene);
+	change(inputs);
+	return inputs;
+};
+
+export const place = (inputs: Inputs, tag: string): Record<string, unknown> =>
+	inputs.places.find((each) => each.tag === tag)!;
+
 /** As a record would carry it: what is undefined is not there. */
 export const run = (inputs: unknown): CalcResult => {
 	const result = runCalculator('purge-adequacy@1', JSON.parse(JSON.stringify(inputs)));
@@ -167,6 +177,6 @@ export const refusals = (inputs: unknown): readonly Refusal[] => {
 
 export const word = (result: CalcResult): string => result.verdict!.word;
 export const reasons = (result: CalcResult): readonly string[] =>
-	result.verdict!.reasons.map(({ criterion, kind }) => `${String(criterion)} ${kind}`);
+	result.verdict!.reasons.map(({ criterion, kind }) => `${criterion as string} ${kind}`);
 export const kinds = (result: CalcResult): readonly string[] => result.notes.map(({ kind }) => kind);
 export const value = (result: CalcResult, name: string): number | null => result.values[name]!.value;

@@ -64,6 +64,13 @@ export const adequacyFields = {
 			from: 'typed',
 		}),
 	),
+	fitFrom: optional(
+		measured({
+			quantity: 'time',
+			means: 'a later begin for the curves, after an interruption or another flow; it prints',
+			from: 'typed',
+		}),
+	),
 	limit,
 	guard: measured({
 		...{ quantity: 'fraction', from: 'procedure', ...OXYGEN_RANGE },

@@ -41,13 +41,16 @@ function curvesOf(
 	if (!fitted.ok) return [points];
 	const { fit, from, curve, curveError } = fitted.value;
 	const x = Array.from({ length: CURVE_POINTS + 1 }, (_, i) => from + ((at.judgedAt - from) * i) / CURVE_POINTS);
-	const half = x.map((t) => fit.t * curveError(t));
 	const y = x.map(curve);
-	return [
-		{
-			...{ id: `${place.tag} band`, label, kind: 'band', x },
-			...{ y: y.map((C, i) => C + (half[i] ?? 0)), y2: y.map((C, i) => C - (half[i] ?? 0)) },
+	const band = (width: number): PlotCurve => ({
+		...{ id: `${place.tag} band`, label, kind: 'band', x },
+		...{
+			y: y.map((C, i) => C + width * curveError(x[i] ?? 0)),
+			y2: y.map((C, i) => C - width * curveError(x[i] ?? 0)),
 		},
+	});
+	return [
+		...(fit.t === null ? [] : [band(fit.t)]),
 		points,
 		{ id: `${place.tag} fit`, label, kind: 'line', ...decides, x, y },
 		{ id: `${place.tag} floor`, label, kind: 'line', x: [from, at.judgedAt], y: [fit.Cf, fit.Cf] },

@@ -25,8 +25,8 @@ export type DecayFit = {
 	/** Sum of squared residuals and residual standard deviation with n − 3 degrees of freedom. */
 	readonly SSR: number;
 	readonly s: number;
-	/** Student's t of the bounds, with the degrees of freedom of the samples that count as independent. */
-	readonly t: number;
+	/** Student's t of the bounds, with the degrees of freedom of the samples that count as independent; null: fewer than four do. */
+	readonly t: number | null;
 	/** Factor on the variance because neighbouring residuals resemble each other; 1 = independent. */
 	readonly inflation: number;
 	readonly residuals: readonly number[];
@@ -40,9 +40,7 @@ export type DecayRefusal =
 	| { readonly kind: 'no-curvature' }
 	/** All is over between two samples. */
 	| { readonly kind: 'too-coarse' }
-	| { readonly kind: 'not-falling' }
-	/** The residuals are so alike that fewer than four samples count. */
-	| { readonly kind: 'residuals-not-independent'; readonly inflation: number };
+	| { readonly kind: 'not-falling' };
 
 /**
  * Fit of an observed oxygen decay to its floor: how fast the gas is exchanged and where the oxygen will stay.
@@ -78,7 +76,6 @@ export function decayFit(
 	const residuals = data.map(({ t, C }) => C - curve(t));
 	const q = options.neighbours === 'alike' ? inflation(residuals) : 1;
 	const degrees = n / q - 3;
-	if (degrees < 1) return fail({ kind: 'residuals-not-independent', inflation: q });
 	const s = Math.sqrt(SSR / (n - 3));
 	const gradient = (t: number): Vector => gradientAt(t, { Cf, C0, lambda: rate });
 	const spread = inverse(data.map(({ t }) => gradient(t)));
@@ -86,9 +83,11 @@ export function decayFit(
 	const standardErrors = { Cf: error([1, 0, 0]), C0: error([0, 1, 0]), lambda: error([0, 0, 1]) };
 
 	const p = options.confidence ?? 0.95;
-	const t = tQuantile((1 + p) / 2, degrees);
-	const allowed = SSR * (1 + (q * fQuantile(p, 1, degrees)) / (n - 3));
-	const around = (value: number, error: number): Bounds => ({ low: value - t * error, high: value + t * error });
+	// So alike that fewer than four count as independent: a curve without bounds.
+	const t = degrees < 1 ? null : tQuantile((1 + p) / 2, degrees);
+	const allowed = t === null ? Infinity : SSR * (1 + (q * fQuantile(p, 1, degrees)) / (n - 3));
+	const around = (value: number, error: number): Bounds =>
+		t === null ? OPEN : { low: value - t * error, high: value + t * error };
 	return ok({
 		...{ Cf, C0, lambda: rate, standardErrors, samples: n, SSR, s, t, inflation: q, residuals },
 		linearBounds: {
@@ -96,7 +95,10 @@ export function decayFit(
 			C0: around(C0, standardErrors.C0),
 			lambda: around(rate, standardErrors.lambda),
 		},
-		bounds: { Cf: floorBounds(data, { Cf, rate, allowed }), lambda: rateBounds(data, { rate, allowed }) },
+		bounds: {
+			Cf: t === null ? OPEN : floorBounds(data, { Cf, rate, allowed }),
+			lambda: t === null ? OPEN : rateBounds(data, { rate, allowed }),
+		},
 		curveError: (at) => error(gradient(at)),
 	});
 }
@@ -144,6 +146,8 @@ function heldFloor(data: readonly DecaySample[], lambda: number, Cf: number): Pr
 	}
 	return { SSR, slope: height * pull };
 }
+
+const OPEN: Bounds = { low: null, high: null };
 
 type Projected = { readonly SSR: number; readonly slope: number };
 type Limits = { readonly low: number; readonly high: number };

@@ -44,7 +44,8 @@ export function judgePurge(
 ): PurgeJudgement {
 	const { circuit, judgedAt } = read;
 	const at = { begins: given.begins.value, judgedAt, longestGap: given.longestGap.value };
-	const judged = read.places.map((place) => judgePlace(place, at));
+	const fitFrom = Math.max(at.begins, given.fitFrom?.value ?? at.begins);
+	const judged = read.places.map((place) => judgePlace(place, { ...at, fitFrom }));
 	const hold = findHold(given, circuit, { judged, ...at });
 	const inertFlow = circuit.meanInert(hold.window);
 	const fitted = judged.map((place) => {

@@ -94,6 +94,8 @@ type Warnings = {
 	/** The floor lies within 1 % of the line; `place` is null in a plan. */
 	'floor-close-to-line': { readonly floor: number; readonly accept: number; readonly place: string | null };
 	'floor-may-exceed-line': OfPlace & { readonly floor: number; readonly high: number; readonly accept: number };
+	/** The curve does not describe the end: look at the flows, or choose a later begin for the fit. */
+	'floor-above-readings': OfPlace & { readonly floor: number; readonly last: number };
 	'residuals-in-runs': OfPlace & { readonly z: number };
 	'inert-flow-varied': { readonly least: number; readonly most: number };
 	'unburnt-gas-limit-applies': { readonly place: string | null; readonly fraction: number };

@@ -37,7 +37,7 @@ const RUNS_Z = 1.96;
 
 export function judgePlace(
 	readings: PlaceReadings,
-	at: { readonly begins: number; readonly judgedAt: number; readonly longestGap: number },
+	at: { readonly fitFrom: number; readonly judgedAt: number; readonly longestGap: number },
 ): PlaceJudgement {
 	const { place, valid, accept } = readings;
 	const last = valid.at(-1);
@@ -52,7 +52,7 @@ export function judgePlace(
 		...readings,
 		last,
 		adequateSince,
-		fitted: placeFit(valid, { begins: at.begins, lag: place.lag, T90: place.T90 }),
+		fitted: placeFit(valid, { begins: at.fitFrom, lag: place.lag, T90: place.T90 }),
 	};
 }
 
@@ -91,7 +91,7 @@ export function riseInHold(place: Place, inHold: readonly DecaySample[]): Return
 
 /** What the fit has to say: it refuses a floor at the limit, and warns; it never makes a purge adequate. */
 export function fitNotes(
-	{ place, fitted, accept }: PlaceJudgement,
+	{ place, fitted, accept, guard, last }: PlaceJudgement,
 	limit: number,
 ): { readonly reasons: readonly PurgeReason[]; readonly notes: readonly PurgeNote[] } {
 	const of = { place: place.tag } as const;
@@ -106,6 +106,9 @@ export function fitNotes(
 	];
 	const { z } = runsTest(residuals);
 	if (z !== null && Math.abs(z) > RUNS_Z) notes.push({ level: 'warning', kind: 'residuals-in-runs', ...of, z });
+	if (last !== undefined && floor > last.C + guard) {
+		notes.push({ level: 'warning', kind: 'floor-above-readings', ...of, floor, last: last.C });
+	}
 	if (exchanges >= EXCHANGES_FOR_FORECAST && floor >= limit) {
 		return {
 			reasons: [{ level: 'reason', criterion: 'floor', kind: 'floor-above-limit', ...of, floor, limit }],

@@ -41,8 +41,7 @@ function joined(gaps: readonly Gap[]): readonly Gap[] {
 	const all: Gap[] = [];
 	for (const gap of gaps) {
 		const last = all.at(-1);
-		if (last !== undefined && last.why === gap.why && last.to >= gap.from)
-			all[all.length - 1] = { ...last, to: gap.to };
+		if (last?.why === gap.why && last.to >= gap.from) all[all.length - 1] = { ...last, to: gap.to };
 		else all.push(gap);
 	}
 	return all;
