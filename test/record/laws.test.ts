@@ -6,7 +6,7 @@ import { HISTORIES, tellHistory, type History } from '../support/random-history'
 import { statesOf } from '../support/states';
 
 // Laws of the record, over random start-ups that know nothing of the rules.
-const RUNS = { numRuns: Number(process.env['RUNS'] ?? 60) };
+const RUNS = { numRuns: Number(process.env.RUNS ?? 60) };
 
 const ask = (history: History, minutes: number, more: readonly RecordEvent[] = []): Standing =>
 	standing(NIGHT_PROCEDURE, [...history.teller.events, ...more], history.teller.site, clock(minutes));

@@ -70,7 +70,7 @@ function checkChain(device: string, chain: readonly RecordEvent[]): readonly Cha
 	const findings: ChainFinding[] = [];
 	let before: RecordEvent | undefined;
 	for (const event of chain) {
-		if (before !== undefined && event.number === before.number) {
+		if (event.number === before?.number) {
 			const events = chain.filter(({ number }) => number === event.number).map(({ id }) => id);
 			findings.push({ kind: 'chain forked', device, number: event.number, events });
 			continue;

@@ -104,7 +104,7 @@ function parseEnvelope(
 	if (!envelope.success) return refused(envelope.issues[0], line);
 	const { kind } = envelope.output;
 	if (!isEventKind(kind)) return fail({ kind: 'unknown-kind', line, found: kind });
-	const body = v.safeParse(BODIES[kind] as v.GenericSchema<unknown, unknown>, envelope.output.body);
+	const body = v.safeParse(BODIES[kind], envelope.output.body);
 	if (!body.success) return refused(body.issues[0], line, 'body');
 	return ok(fromChecked(canonicalJson(json as Json), envelope.output as Envelope, kept));
 }

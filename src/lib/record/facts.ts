@@ -2,43 +2,11 @@ import * as v from 'valibot';
 import { PlantSchema, type Plant } from '../plant';
 import type { Procedure } from '../procedure';
 import { allOf, type EventOf, type RecordEvent } from './event';
+import { entryFactsOf, type EntryFact, type WithoutEffect } from './entry-facts';
 import { findingsOf, goodChecks, type Finding, type GoodCheck } from './findings';
 import { MINUTE, millis, type Millis } from './instants';
 import { inOrder, measuredSkew } from './knowledge';
 import { plantFactsOf, type PlantFact } from './plant-facts';
-
-export type WithoutEffect = { readonly event: string; readonly because: string };
-
-/** An entry that counts: neither withdrawn nor superseded. */
-export type EntryFact = {
-	readonly id: string;
-	readonly clock: number;
-	readonly step: string;
-	readonly outcome: EventOf<'entry'>['body']['outcome'];
-	readonly observed: Millis;
-	/** Observed time of the oldest reading that the proof needs (ST2). */
-	readonly oldest: Millis;
-	/** Who entered it and who read: none of them may release the gate over it. */
-	readonly performers: readonly string[];
-	readonly rows: readonly RowFact[];
-	/** What the entry says it used; undefined when it leaves that to the step. */
-	readonly instruments: readonly string[] | undefined;
-	readonly readings: readonly PointReading[];
-	readonly flow: EventOf<'entry'>['body']['flow'];
-	/** When a releasing role agreed that the step is not applicable. */
-	readonly agreed: Millis | undefined;
-};
-
-/** A value read at a measuring point, as it was typed. */
-export type PointReading = {
-	readonly point: string;
-	readonly typed: string;
-	readonly unit: string;
-	readonly basis: 'wet' | 'dry' | undefined;
-	readonly observed: Millis;
-};
-
-export type RowFact = { readonly row: string; readonly passes: boolean; readonly observed: Millis };
 
 export type GateAct = EventOf<'gate released'> | EventOf<'gate refused'> | EventOf<'refusal answered'>;
 
@@ -82,7 +50,7 @@ export function factsOf(procedure: Procedure, events: readonly RecordEvent[]): F
 	const skew = measuredSkew(events);
 	const tolerance = Math.max((procedure.toleranceMinutes ?? 2) * MINUTE, skew);
 	const withoutEffect: WithoutEffect[] = [];
-	const entries = readEntries(procedure, events, releases, withoutEffect);
+	const entries = entryFactsOf(procedure, events, releases, withoutEffect);
 	const checks = goodChecks(procedure, events, entries);
 	const opened = [...allOf(events, 'start-up opened')].sort(inOrder)[0];
 	const clock = [...allOf(events, 'clock noted')].sort(inOrder).at(-1);
@@ -109,7 +77,7 @@ export function factsOf(procedure: Procedure, events: readonly RecordEvent[]): F
 }
 
 function plantOf(opened: EventOf<'start-up opened'> | undefined): Plant | undefined {
-	const plant = v.safeParse(PlantSchema, opened?.body.documents?.['plant']);
+	const plant = v.safeParse(PlantSchema, opened?.body.documents?.plant);
 	return plant.success ? plant.output : undefined;
 }
 
@@ -124,67 +92,6 @@ function readRoles(events: readonly RecordEvent[]): ReadonlyMap<string, readonly
 	for (const event of allOf(events, 'start-up opened'))
 		for (const { person, roles: own } of event.body.people) add(person, own);
 	return roles;
-}
-
-function readEntries(
-	procedure: Procedure,
-	events: readonly RecordEvent[],
-	releases: (person: string) => boolean,
-	withoutEffect: WithoutEffect[],
-): readonly EntryFact[] {
-	const steps = new Set(procedure.steps.map((step) => step.id));
-	const withdrawn = new Set(allOf(events, 'entry withdrawn').map((event) => event.body.entry));
-	const standing = allOf(events, 'entry').filter((event) => !withdrawn.has(event.id));
-	const superseded = new Set(standing.flatMap((event) => event.body.supersedes ?? []));
-	const agreed = new Map<string, Millis>();
-	for (const event of allOf(events, 'not applicable agreed'))
-		if (releases(event.person)) {
-			const before = agreed.get(event.body.entry) ?? Infinity;
-			agreed.set(event.body.entry, Math.min(before, event.observedAt));
-		} else withoutEffect.push({ event: event.id, because: 'only a releasing role agrees to not applicable' });
-	return standing.flatMap((event) => {
-		if (superseded.has(event.id)) return [];
-		if (!steps.has(event.body.step)) {
-			withoutEffect.push({ event: event.id, because: `the procedure has no step ${event.body.step}` });
-			return [];
-		}
-		return [entryFact(event, agreed.get(event.id))];
-	});
-}
-
-function entryFact(event: EventOf<'entry'>, agreed: Millis | undefined): EntryFact {
-	const { body } = event;
-	const own = (text: string | undefined): Millis => (text === undefined ? event.observedAt : millis(text));
-	const rows = (body.rows ?? []).map((row) => ({ row: row.row, passes: row.passes, observed: own(row.observed) }));
-	const readings = [...(body.values ?? []), ...(body.rows ?? []).flatMap((row) => row.reading ?? [])];
-	const used = [...(body.instruments ?? []), ...readings.flatMap((reading) => reading.instrument ?? [])];
-	return {
-		id: event.id,
-		clock: event.clock,
-		step: body.step,
-		outcome: body.outcome,
-		observed: event.observedAt,
-		oldest: Math.min(
-			event.observedAt,
-			own(body.from),
-			...readings.map((reading) => own(reading.observed)),
-			...rows.map((row) => row.observed),
-		),
-		performers: [
-			...new Set([
-				event.person,
-				...readings.flatMap((reading) => reading.readBy ?? []),
-				...(body.rows ?? []).flatMap((row) => row.lookedBy ?? []),
-			]),
-		],
-		rows,
-		instruments: used.length === 0 ? undefined : [...new Set(used)],
-		readings: readings.flatMap(({ point, typed, unit, basis, observed }) =>
-			point === undefined ? [] : [{ point, typed, unit, basis, observed: own(observed) }],
-		),
-		flow: body.flow,
-		agreed,
-	};
 }
 
 function readDeviations(events: readonly RecordEvent[]): readonly DeviationFact[] {

@@ -1,6 +1,6 @@
 import type { Procedure } from '../procedure';
 import { allOf, type RecordEvent } from './event';
-import type { EntryFact } from './facts';
+import type { EntryFact } from './entry-facts';
 import { millis, type Millis } from './instants';
 
 /** An instrument found bad: what was proved with it from its last good check to its next passing one is void (ST7). */

@@ -24,6 +24,9 @@ export { SITE_BODIES, START_UP_BODIES, type SiteKind, type StartUpKind } from '.
 export { nextEnvelope, textOf, unsignedEvent, type Draft } from './write';
 export { checkChains, headCode, headsOf, type ChainFinding } from './chain';
 export { headText, keyFor, rightFor, type KeyNeeded } from './signing-rules';
+export { parseTrend, type Trend, type TrendColumn, type TrendError } from './trend';
+export { signedEvent } from './sign-event';
+export { gateSheet, headline, otherTablets, type GateSheet } from './gate-sheet';
 export { EnvelopeSchema, type Envelope } from './envelope';
 export { inOrder, Knowledge, merge } from './knowledge';
 export { MINUTE, millis, offsetMinutes, printInstant, type Millis } from './instants';

@@ -1,6 +1,6 @@
 import { evaluatePermissive, readingFor, type Permissive, type Procedure, type UnknownBecause } from '../procedure';
 import type { PermissiveStanding } from './answer';
-import type { PointReading } from './facts';
+import type { PointReading } from './entry-facts';
 import { MINUTE, printInstant } from './instants';
 import type { Played } from './play';
 

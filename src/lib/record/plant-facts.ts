@@ -1,6 +1,6 @@
 import type { LapsedBy, PlantEventKind, Procedure } from '../procedure';
 import { allOf, type EventOf, type RecordEvent } from './event';
-import type { WithoutEffect } from './facts';
+import type { WithoutEffect } from './entry-facts';
 import { MINUTE, millis, type Millis } from './instants';
 import { inOrder } from './knowledge';
 

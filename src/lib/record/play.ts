@@ -1,5 +1,6 @@
 import type { Gate, Procedure, Step } from '../procedure';
-import type { EntryFact, Facts, GateAct } from './facts';
+import type { EntryFact } from './entry-facts';
+import type { Facts, GateAct } from './facts';
 import type { Millis } from './instants';
 import { GateTrack } from './gate-track';
 import { StepTrack, type InnerCause } from './step-track';

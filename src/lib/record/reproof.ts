@@ -25,7 +25,7 @@ export function stepsToProve(played: Played, notEnough: NotEnoughNow): readonly 
 		for (const check of uncheckedSinceFinding(track, played)) addUpstream(check);
 	};
 	const addUpstream = (upstream: StepTrack | undefined): void => {
-		if (upstream === undefined || !upstream.required) return;
+		if (!upstream?.required) return;
 		const { state, why } = upstream.status;
 		if (spentAndRunOut(upstream, played)) add(upstream, [countsAgain(upstream)], 'lapsed');
 		else if (state === 'not yet' || state === 'lapsed' || state === 'failed') add(upstream, why, state);

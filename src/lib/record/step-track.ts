@@ -1,6 +1,7 @@
 import type { LapsedBy, Step } from '../procedure';
 import type { Cause } from './answer';
-import type { EntryFact, Facts } from './facts';
+import type { EntryFact } from './entry-facts';
+import type { Facts } from './facts';
 import { voids } from './findings';
 import { MINUTE, type Millis } from './instants';
 import { lapses } from './plant-facts';

@@ -39,7 +39,7 @@ export function nextEnvelope<K extends EventKind>(draft: Draft<K>, known: readon
 		v: 1,
 		log,
 		kind,
-		body: body as Envelope['body'],
+		body: body,
 		person,
 		device,
 		...(certificate === undefined ? {} : { certificate }),
