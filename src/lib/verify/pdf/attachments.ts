@@ -1,13 +1,14 @@
-import { Unzlib } from 'fflate';
-import { concat } from '../../base';
+import type { Result } from '../../base';
 import { attempt, damaged, type Damage } from './damage';
 import { objectIn, resolve, type PdfFile } from './pdf-file';
-import { get, itemsOf, nameOf, refOf, textOf, type PdfObject, type PdfValue } from './value';
-import type { Result } from '../../base';
+import { streamBytes } from './stream-bytes';
+import { get, itemsOf, nameOf, refOf, textOf, type PdfValue } from './value';
 
-type Bytes = Uint8Array<ArrayBuffer>;
-
-export type Attachment = { readonly name: string; readonly mediaType: string | undefined; readonly bytes: Bytes };
+export type Attachment = {
+	readonly name: string;
+	readonly mediaType: string | undefined;
+	readonly bytes: Uint8Array<ArrayBuffer>;
+};
 
 /**
  * The files that a dossier carries, out of its first state: a later update cannot put others in their place, because
@@ -49,41 +50,6 @@ function readFile(file: PdfFile, specification: PdfValue, room: number): Attachm
 	if (name === undefined) return damaged(specification.from, 'the name of an attachment');
 	const embedded = resolve(file, get(specification, 'EF'), 0);
 	const stream = objectIn(file, refOf(get(embedded, 'F') ?? get(embedded, 'UF')), 0);
-	if (stream?.stream === undefined) return damaged(specification.from, `the bytes of ${name}`);
-	return { name, mediaType: nameOf(get(stream.value, 'Subtype')), bytes: unpack(file, stream, stream.stream, room) };
+	if (stream === undefined) return damaged(specification.from, `the bytes of ${name}`);
+	return { name, mediaType: nameOf(get(stream.value, 'Subtype')), bytes: streamBytes(file, stream, room) };
 }
-
-function unpack(
-	file: PdfFile,
-	{ value }: PdfObject,
-	place: { readonly from: number; readonly to: number },
-	room: number,
-): Bytes {
-	const packed = file.bytes.slice(place.from, place.to);
-	const filter = get(value, 'Filter');
-	const filters = filter?.type === 'array' ? filter.items.map(nameOf) : filter === undefined ? [] : [nameOf(filter)];
-	if (filters.length === 0) return packed.length > room ? damaged(place.from, 'fewer bytes') : packed;
-	if (filters.join() !== 'FlateDecode') return damaged(value.from, 'FlateDecode and no other filter');
-	return inflate(packed, place.from, room);
-}
-
-/** Counts while it unpacks: a small file can hold a very large one. */
-function inflate(packed: Bytes, at: number, room: number): Bytes {
-	const parts: Uint8Array[] = [];
-	let length = 0;
-	const unpacking = new Unzlib((part) => {
-		length += part.length;
-		if (length > room) damaged(at, `at most ${MAX_BYTES} bytes of attachments`);
-		parts.push(part.slice());
-	});
-	try {
-		for (let i = 0; i < packed.length; i += CHUNK)
-			unpacking.push(packed.subarray(i, i + CHUNK), i + CHUNK >= packed.length);
-	} catch (error) {
-		if (error instanceof Error && 'code' in error) return damaged(at, `packed bytes (${error.message})`);
-		throw error;
-	}
-	return concat(...parts);
-}
-
-const CHUNK = 64 * 1024;

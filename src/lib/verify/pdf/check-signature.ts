@@ -1,10 +1,17 @@
 import type { Certificate, Instant } from '../../identity';
 import { chainChecks, VOUCHED } from './chain-checks';
+import { checkName, checkShown, checkWhen } from './claim-checks';
 import { failed, passed, undecided, verdictOf, type Check, type Verdict } from './check';
 import type { PdfFile } from './pdf-file';
 import type { PdfQuestion } from './question';
-import { checkCoverage, checkDigest, checkKey, checkName, checkOrder, readContents } from './signature-checks';
-import { readSignatureDictionary, type SignatureDictionary } from './signature-field';
+import { shownTexts } from './shown-text';
+import { checkCoverage, checkDigest, checkKey, readContents } from './signature-checks';
+import {
+	appearanceOf,
+	readSignatureDictionary,
+	type SignatureDictionary,
+	type SignatureField,
+} from './signature-field';
 import { readUpdate } from './update';
 
 export type SignatureReport = Verdict & {
@@ -37,7 +44,7 @@ export async function judgeUpdate(
 			: failed(name, `Bytes ${from} to ${to}: ${trespasses.join('; ')}.`, { ...said, sub: 'FORMAT_FAILURE' });
 	if (field === undefined || signature === undefined) return { update, signature: undefined };
 	const dictionary = readSignatureDictionary(signature);
-	const { checks, signer } = await judgeSignature(file, { revision, field: field.name, dictionary, question });
+	const { checks, signer } = await judgeSignature(file, { revision, field, dictionary, question });
 	const { claimed, reason, name: shown } = dictionary;
 	const about = { field: field.name, revision, signer, name: shown, reason, claimed, checks };
 	return { update, signature: { ...verdictOf([update, ...checks]), ...about } };
@@ -45,44 +52,32 @@ export async function judgeUpdate(
 
 type OneSignature = {
 	readonly revision: number;
-	readonly field: string;
+	readonly field: SignatureField;
 	readonly dictionary: SignatureDictionary;
 	readonly question: Question;
 };
 
 async function judgeSignature(
 	file: PdfFile,
-	{ revision, field, dictionary, question }: OneSignature,
+	one: OneSignature,
 ): Promise<{ readonly checks: readonly Check[]; readonly signer: Certificate | undefined }> {
+	const { revision, dictionary, question } = one;
+	const field = one.field.name;
 	const coverage = checkCoverage(file, revision, field, dictionary);
 	const { checks: format, cms } = readContents(file, field, dictionary);
-	const when = checkWhen(field, dictionary, question);
+	const when = checkWhen(field, dictionary, question.earlier);
 	if (cms === undefined) return { checks: [coverage, ...format, ...when], signer: undefined };
 	const digest = checkDigest(file, field, dictionary, cms);
 	const { checks: key, certificate: signer } = await checkKey(field, cms);
-	const sofar = [coverage, ...format, digest, ...key, ...when];
-	if (signer === undefined) return { checks: sofar, signer };
-	const name = checkName(field, dictionary, signer);
+	const bytes = [coverage, ...format, digest, ...key];
+	if (signer === undefined) return { checks: [...bytes, ...when], signer };
+	const appearance = appearanceOf(file, one.field, revision);
+	const texts = appearance === undefined ? undefined : shownTexts(file, appearance, revision);
+	const claims = [checkName(field, dictionary, signer), checkShown(field, texts, dictionary, signer), ...when];
 	const { claimed } = dictionary;
-	if (claimed === undefined) return { checks: [...sofar, name], signer };
-	return {
-		checks: [
-			...sofar,
-			name,
-			...(await checkTrust(field, { signer, claimed, others: cms.otherCertificates, question })),
-		],
-		signer,
-	};
-}
-
-function checkWhen(field: string, { claimed }: SignatureDictionary, { earlier }: Question): readonly Check[] {
-	const name = 'signature says when';
-	if (claimed === undefined)
-		return [failed(name, '/M holds no time with its offset.', { field, sub: 'FORMAT_FAILURE' })];
-	return [
-		passed(name, `${claimed}, by the clock of the signer.`, { field, facts: { claimed } }),
-		checkOrder(field, claimed, earlier),
-	];
+	if (claimed === undefined) return { checks: [...bytes, ...claims], signer };
+	const trust = await checkTrust(field, { signer, claimed, others: cms.otherCertificates, question });
+	return { checks: [...bytes, ...claims, ...trust], signer };
 }
 
 async function checkTrust(

@@ -1,5 +1,5 @@
 import { concat, fromHex, sha256Hex } from '../../base';
-import { checkSignature, millisecondsOf, readCertificate, type Certificate, type Instant } from '../../identity';
+import { checkSignature, readCertificate, type Certificate } from '../../identity';
 import { failed, passed, undecided, type Check } from './check';
 import { readCms, type ReadCms } from './cms';
 import type { PdfFile } from './pdf-file';
@@ -100,27 +100,3 @@ export async function checkKey(
 			});
 	return { checks: [found, signed], certificate: read.value };
 }
-
-/** What a reader shows beside the signature is what the certificate says. */
-export function checkName(field: string, { name: shown }: SignatureDictionary, certificate: Certificate): Check {
-	const name = 'name shown is the name certified';
-	const certified = certificate.subject.kind === 'person' ? certificate.subject.printedName : '';
-	const facts = { shown: shown ?? '', certified };
-	if (shown === certified && certified !== '') return passed(name, `Both say ${certified}`, { field, facts });
-	const because = `The file says ${shown ?? 'nothing'}; the certificate says ${certified === '' ? 'no person' : certified}.`;
-	return failed(name, because, { field, facts, sub: 'SIG_CONSTRAINTS_FAILURE' });
-}
-
-/** A signature that covers another one was made after it; its clock should say so too. */
-export function checkOrder(field: string, claimed: Instant, earlier: Instant | undefined): Check {
-	const name = 'clocks agree with the order of signing';
-	if (earlier === undefined) return passed(name, 'The first signature.', { field });
-	const facts = { claimed, earlier };
-	if (millisecondsOf(claimed) + CLOCK_TOLERANCE >= millisecondsOf(earlier)) {
-		return passed(name, 'It claims a time after the signature that it covers.', { field, facts });
-	}
-	return undecided(name, `It claims ${claimed}, and covers a signature that claims ${earlier}.`, { field, facts });
-}
-
-/** What two tablets may differ by, in milliseconds. */
-const CLOCK_TOLERANCE = 10 * 60_000;

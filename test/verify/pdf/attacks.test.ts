@@ -1,0 +1,162 @@
+import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import { fromHex, toHex } from '../../../src/lib/base';
+import { signIncrement, type ClosingSignature, type Ink } from '../../../src/lib/dossier';
+import { checkPdf, readPdf } from '../../../src/lib/verify';
+import { PdfJudges, readPdfsig } from '../../support/pdf-judges';
+import { closing, makeBase, makeSigners, signThree, type Signers } from '../../support/small-dossier';
+import { latin1 } from '../../support/tamper';
+import { makeTestSite, testTrustList, value, type TestSite } from '../../support/test-site';
+
+type Bytes = Uint8Array<ArrayBuffer>;
+
+let site: TestSite;
+let signers: Signers;
+let two: Bytes;
+let three: Bytes;
+let judges: PdfJudges;
+
+beforeAll(async () => {
+	site = await makeTestSite();
+	signers = await makeSigners(site);
+	[, , two, three] = await signThree(site, signers);
+	judges = new PdfJudges(site.root.certificate.der);
+});
+
+afterAll(() => judges.dismiss());
+
+const judge = (bytes: Bytes) =>
+	checkPdf(readPdf(bytes), {
+		root: site.root.certificate.der,
+		trustList: testTrustList(site),
+		now: '2026-06-01T00:00:00Z',
+	});
+
+/** Outcome, and the checks of the last signature that did not pass. */
+async function complaints(bytes: Bytes) {
+	const { outcome, checks } = await judge(bytes);
+	return [outcome, ...checks.filter((check) => check.outcome !== 'passed').map(({ name }) => name)];
+}
+
+/** Changes the last place where a text stands, and keeps the length. */
+function editLast(from: RegExp, to: (found: string) => string): Bytes {
+	const text = latin1(three);
+	const found = [...text.matchAll(new RegExp(from, 'g'))].at(-1)!;
+	const changed = to(found[0]).padEnd(found[0].length).slice(0, found[0].length);
+	return new Uint8Array(
+		Buffer.from(text.slice(0, found.index) + changed + text.slice(found.index + found[0].length), 'latin1'),
+	);
+}
+
+const CONTENTS = /\/Contents <[0-9a-f]+>/;
+const DIGEST = 'bytes are those that were signed';
+const UPDATE = 'update 3 is one signature and nothing else';
+const COVERS = 'covers the whole file as it was signed';
+const READ = 'signature can be read';
+
+describe('a signature that some readers take for none, or for a good one', () => {
+	test.each([
+		['without contents', CONTENTS, () => '', [UPDATE, COVERS, READ]],
+		['with null as its contents', CONTENTS, () => '/Contents null', [COVERS, READ]],
+		[
+			'with nothing but zeros as its contents',
+			CONTENTS,
+			(all: string) => `/Contents <${'0'.repeat(all.length - 12)}>`,
+			[READ],
+		],
+		[
+			'with its contents as a text in brackets',
+			CONTENTS,
+			(all: string) => `/Contents (${all.slice(11, -1)})`,
+			[COVERS],
+		],
+		[
+			'with capital letters in its contents',
+			CONTENTS,
+			(all: string) => all.toUpperCase().replace('/CONTENTS', '/Contents'),
+			[READ],
+		],
+		['without a range', /\/ByteRange \[[\d ]+\]/, () => '', [UPDATE, COVERS]],
+		['with a range of nothing', /\/ByteRange \[[\d ]+\]/, () => '/ByteRange [0 0 0 0]', [COVERS]],
+		['with a negative range', /\/ByteRange \[0 \d+/, (all: string) => all.replace('[0 ', '[-1'), [COVERS]],
+		['of another form', /\/ETSI\.CAdES\.detached/, () => '/adbe.pkcs7.detached', [UPDATE]],
+		['without its lock', /\/Action \/All/, () => '/Action /Not', [UPDATE]],
+	] as const)('%s fails', async (_, from, to, expected) => {
+		const [outcome, ...found] = await complaints(editLast(from, to));
+		expect(outcome).toBe('failed');
+		expect(found).toEqual(expect.arrayContaining([...expected]));
+	});
+
+	test('with the contents of another signature of the same file fails over its digest', async () => {
+		const [first] = CONTENTS.exec(latin1(three))!;
+		expect(await complaints(editLast(CONTENTS, () => first))).toEqual(expect.arrayContaining(['failed', DIGEST]));
+	});
+
+	test('that another program made, with attributes that we do not write, is not read', async () => {
+		const [contents] = [...latin1(three).matchAll(new RegExp(CONTENTS, 'g'))].at(-1)!;
+		const der = fromHex(contents.slice('/Contents <'.length, -1))!;
+		// The object identifier of the message digest becomes that of the signing time: one attribute less and one too many.
+		const digestType = Buffer.from('2a864886f70d010904', 'hex');
+		const at = Buffer.from(der).indexOf(digestType) + digestType.length - 1;
+		der[at] = 5;
+		const report = await judge(editLast(CONTENTS, () => `/Contents <${toHex(der)}>`));
+		const check = report.checks.find(({ name, outcome }) => name === READ && outcome === 'failed');
+		expect(check).toMatchObject({ field: 'sig_accepted', sub: 'FORMAT_FAILURE' });
+		expect(check?.because).toContain('content type, message digest and signing-certificate-v2, and no other attribute');
+	});
+});
+
+describe('a person with a good certificate who signs what is not true', () => {
+	/** A font that writes one text where another was meant. */
+	const lying = (ink: Ink, meant: string, written: string): Ink => ({
+		...ink,
+		encode: (text) => ink.encode(text === meant ? written : text),
+	});
+
+	async function accepted(change: (signature: ClosingSignature, ink: Ink) => ClosingSignature): Promise<Bytes> {
+		const { ink } = await makeBase();
+		return value(await signIncrement(two, change(closing(site, signers.sig_accepted, 'sig_accepted', ink), ink)));
+	}
+
+	/** What every other reader says: nothing is wrong. */
+	const FINE = { valid: 3, mismatch: 0, trusted: 3, total: 1 };
+	const SHOWN = 'page shows who signed and when';
+
+	test('under another name on the page fails, though every other reader is content', async () => {
+		const pdf = await accepted((signature, ink) => ({
+			...signature,
+			inks: { regular: ink, strong: lying(ink, 'Cyra Example', 'Ada Example') },
+		}));
+		expect(readPdfsig(judges.pdfsig(pdf))).toEqual(FINE);
+		expect(await complaints(pdf)).toEqual(['failed', SHOWN]);
+	});
+
+	test('with another time on the page than in the signature fails', async () => {
+		const pdf = await accepted((signature, ink) => ({
+			...signature,
+			inks: { regular: ink, strong: lying(ink, '2026-05-14 19:41:40 +02:00', '2026-05-14 18:41:40 +02:00') },
+		}));
+		expect(readPdfsig(judges.pdfsig(pdf))).toEqual(FINE);
+		expect(await complaints(pdf)).toEqual(['failed', SHOWN]);
+	});
+
+	test('with a time before the signature that it covers is undecided: one of two clocks is wrong', async () => {
+		const pdf = await accepted((signature) => ({ ...signature, at: '2026-05-14T19:20:00+02:00' }));
+		expect(await complaints(pdf)).toEqual(['undecided', 'clocks agree with the order of signing']);
+	});
+
+	test('with a time before the certificate, or one that has not come, is not believed', async () => {
+		const early = await accepted((signature) => ({ ...signature, at: '2026-01-31T12:00:00Z' }));
+		expect(await complaints(early)).toEqual(expect.arrayContaining(['failed', 'certificate was in its time']));
+		const late = await accepted((signature) => ({ ...signature, at: '2026-06-02T12:00:00Z' }));
+		expect(await complaints(late)).toEqual(expect.arrayContaining(['undecided', 'claimed time has come']));
+	});
+
+	test('with a key that is not the one of the certificate fails', async () => {
+		const pdf = await accepted((signature) => ({
+			...signature,
+			sign: closing(site, signers.sig_reviewed, 'sig_accepted', signature.inks.regular).sign,
+		}));
+		expect(await complaints(pdf)).toEqual(['failed', 'key of the certificate made the signature']);
+		expect(readPdfsig(judges.pdfsig(pdf))).toMatchObject({ valid: 2 });
+	});
+});
