@@ -36,6 +36,7 @@ export type Bent = {
 	readonly oxygen?: string;
 	readonly damper?: string;
 	readonly people?: BodyOf<'start-up opened'>['people'];
+	readonly opening?: (body: BodyOf<'start-up opened'>) => BodyOf<'start-up opened'>;
 	readonly statement?: (statement: Statement) => Statement;
 	readonly release?: { readonly person: string; readonly with?: 'shift key' };
 	readonly stopAfter?: 'entries' | 'gate 1';
@@ -76,7 +77,10 @@ async function writeSiteLog(tablets: SigningTablets, trustList: SignedTrustList)
 
 async function writeStartUp(tablets: SigningTablets, bent: Bent): Promise<void> {
 	const lead = { person: 'Lead', device: 'T-1' };
-	await tablets.say('start-up opened', opening(tablets, bent), { ...lead, entered: at('08:00') });
+	await tablets.say('start-up opened', (bent.opening ?? ((same) => same))(opening(tablets, bent)), {
+		...lead,
+		entered: at('08:00'),
+	});
 	const [techA, techB] = [
 		{ person: 'TechA', device: 'T-1' },
 		{ person: 'TechB', device: 'T-2' },
