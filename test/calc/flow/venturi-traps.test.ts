@@ -134,6 +134,13 @@ describe('traps', () => {
 		expect(factsOf({ ...CIRCUIT, dpSpan: 2000 }, 'low-flow-cut-off')).toMatchObject({ level: 'remark', part: 0.01 });
 	});
 
+	test('noise about zero in a series counts as zero below the cut-off, and as reverse flow beyond it', () => {
+		const noisy = { ...WITHOUT_DP, dpSeries: [30, -5, 40, 35], dpSpan: 1000 };
+		// By hand: (sqrt 30 + 0 + sqrt 40 + sqrt 35)/4 = 4.429465, squared 19.6202.
+		expect(agreesWith(valueOf(noisy, 'differencePressure') ?? NaN, '19.6202')).toBe(true);
+		expect(refusalsOf({ ...noisy, dpSeries: [30, -15, 40, 35] })).toMatchObject([{ input: 'dpSeries[1]' }]);
+	});
+
 	test('a series is averaged by its roots', () => {
 		const dpSeries = [400, 520, 610, 480, 350, 700, 560, 430, 500, 450];
 		const inputs = { ...WITHOUT_DP, dpSeries };

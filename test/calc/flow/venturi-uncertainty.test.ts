@@ -88,6 +88,16 @@ test('where one uncertainty is not stated no total is given: a sum with a part m
 	expect(factsOf(inputs, 'uncertainty-not-stated').inputs).toEqual(['dp']);
 });
 
+test('an uncertainty that the standard supplied, not the site, is said', () => {
+	expect(factsOf(CIRCUIT, 'uncertainty-by-default').inputs).toEqual([
+		'pipeDiameter',
+		'throatDiameter',
+		'compressibility',
+	]);
+	const stated = { ...CIRCUIT, throatDiameter: { value: 0.72, unit: 'm', U: 0.0005 } };
+	expect(factsOf(stated, 'uncertainty-by-default').inputs).toEqual(['pipeDiameter', 'compressibility']);
+});
+
 test('above the project limit of uncertainty, or with none known, the flow proves no step', () => {
 	expect(run({ ...CIRCUIT, uncertaintyLimit: 0.02 }).scope).toBe('in scope');
 	expect(factsOf({ ...CIRCUIT, uncertaintyLimit: 0.01 }, 'uncertainty-over-limit').level).toBe('outside scope');

@@ -1,4 +1,5 @@
 import { fail, ok, type Result } from '../../base';
+import type { InSi } from '../../quantity';
 import type { CalcNote, Refusal } from '../calculator';
 import { LIVE_SIGNAL } from '../constants';
 import type { Uncertain } from '../uncertainty';
@@ -20,11 +21,9 @@ export function differencePressure(given: VenturiGiven): Result<DifferencePressu
 	if (span !== undefined && dp.value > span * RANGE_END) {
 		return fail([{ kind: 'above-span', input: dp.name, value: dp.value, span, unit: 'Pa' }]);
 	}
-	const cutOff = span === undefined ? 0 : span * given.lowFlowCutOff.value;
+	const cutOff = cutOffOf(given);
 	const cutOffNote = { cutOff, part: given.lowFlowCutOff.value, dp: dp.value };
-	if (dp.value < 0 && !(-dp.value < cutOff)) {
-		return fail([{ kind: 'negative-difference-pressure', input: dp.name, value: dp.value, unit: 'Pa' }]);
-	}
+	if (isReverse(dp.value, cutOff)) return fail([reverse(dp.name, dp.value)]);
 	if (dp.value <= 0 || dp.value < cutOff) {
 		return ok({
 			dp: { ...dp, value: 0 },
@@ -44,12 +43,19 @@ function byReading(given: VenturiGiven): Result<DifferencePressure, readonly Ref
 	if (dp !== undefined) {
 		return ok({ dp: { ...dp, name: 'dp', symbol: 'dp', unit: 'Pa' }, notes: characteristicNotes(given, dp.value) });
 	}
-	const series = dpSeries ?? [];
-	const reversed = series.flatMap(({ value }, i): Refusal[] =>
-		value < 0 ? [{ kind: 'negative-difference-pressure', input: `dpSeries[${i}]`, value, unit: 'Pa' }] : [],
+	return bySeries(dpSeries ?? [], cutOffOf(given));
+}
+
+/** The mean by roots. A reading below zero by less than the cut-off is noise and counts as zero; below that it is refused. */
+function bySeries(
+	series: readonly InSi<'pressure-difference'>[],
+	cutOff: number,
+): Result<DifferencePressure, readonly Refusal[]> {
+	const reversed = series.flatMap(({ value }, i) =>
+		isReverse(value, cutOff) ? [reverse(`dpSeries[${i}]`, value)] : [],
 	);
 	if (reversed.length > 0) return fail(reversed);
-	const { dp: value, pulsation, overread } = meanOfRoots(series.map((reading) => reading.value));
+	const { dp: value, pulsation, overread } = meanOfRoots(series.map((reading) => Math.max(0, reading.value)));
 	// Twice the standard uncertainty of the mean, s/√n (JCGM 100:2008, 4.2.3), beside what all readings have in common.
 	const scatter = (2 * pulsation * value) / Math.sqrt(series.length - 1);
 	const systematic = series.map((reading) => reading.U ?? NaN).reduce((most, U) => Math.max(most, U), 0);
@@ -94,6 +100,17 @@ function characteristicNotes(given: VenturiGiven, dp: number | undefined): reado
 	}
 	return notes;
 }
+
+const cutOffOf = ({ dpSpan, lowFlowCutOff }: VenturiGiven): number => (dpSpan?.value ?? 0) * lowFlowCutOff.value;
+
+const isReverse = (dp: number, cutOff: number): boolean => dp < 0 && !(-dp < cutOff);
+
+const reverse = (input: string, value: number): Refusal => ({
+	kind: 'negative-difference-pressure',
+	input,
+	value,
+	unit: 'Pa',
+});
 
 /** 20.5 mA: beyond it the sensor is out of its range. */
 const RANGE_END = (LIVE_SIGNAL.max - 4e-3) / 16e-3;

@@ -135,7 +135,11 @@ function uncertaintyNotes(
 ): readonly CalcNote[] {
 	const relativeU = U.massFlow === undefined ? undefined : U.massFlow / (flow.massFlow ?? NaN);
 	const limit = given.uncertaintyLimit?.value;
+	const byDefault = (['pipeDiameter', 'throatDiameter', 'compressibility'] as const).filter(
+		(name) => given[name].U === undefined,
+	);
 	return [
+		...(byDefault.length > 0 ? [{ kind: 'uncertainty-by-default', level: 'remark', inputs: byDefault } as const] : []),
 		...(unstated.length > 0 ? [{ kind: 'uncertainty-not-stated', level: 'warning', inputs: unstated } as const] : []),
 		...(limit !== undefined && !(relativeU !== undefined && relativeU <= limit)
 			? [{ kind: 'uncertainty-over-limit', level: 'outside scope', U: relativeU ?? null, limit } as const]
