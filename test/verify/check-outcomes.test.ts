@@ -1,5 +1,5 @@
 import { beforeAll, describe, expect, test } from 'vitest';
-import { judgeValue, type Field } from '../../src/lib/verify/judge-value';
+import { judgeValue, type Field } from '../../src/lib/record/judge-value';
 import type { Check, Report } from '../../src/lib/verify';
 import { at, judge, makeSignedRecord } from '../support/signed-record';
 import { makeTestSite, type TestSite } from '../support/test-site';

@@ -25,6 +25,7 @@ export { nextEnvelope, textOf, unsignedEvent, type Draft } from './write';
 export { checkChains, headCode, headsOf, type ChainFinding } from './chain';
 export { headText, keyFor, rightFor, type KeyNeeded } from './signing-rules';
 export { parseTrend, type Trend, type TrendColumn, type TrendError } from './trend';
+export { judgeEntry, type EntryFault } from './judge-entry';
 export { signedEvent } from './sign-event';
 export { gateSheet, headline, otherTablets, type GateSheet } from './gate-sheet';
 export { EnvelopeSchema, type Envelope } from './envelope';

@@ -1,7 +1,7 @@
 import { differenceOf, type Basis, type Measure, type Plant } from '../plant';
 import type { LimitUse, Step } from '../procedure';
 import { isQuantityName, toSi, type QuantityName } from '../quantity';
-import type { BodyOf } from '../record';
+import type { BodyOf } from './event';
 
 export type Reading = NonNullable<BodyOf<'entry'>['values']>[number];
 export type Field = Extract<Step, { readonly kind: 'reading' }>['fields'][number];
