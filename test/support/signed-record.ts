@@ -1,7 +1,7 @@
 import { canonicalJson, sha256Hex, utf8, type Json } from '../../src/lib/base';
 import { runCalculator } from '../../src/lib/calc';
 import { signTrustList, type SignedTrustList } from '../../src/lib/identity';
-import { headCode, merge, printEventLine, standing, type BodyOf, type RecordEvent } from '../../src/lib/record';
+import { gateSheet, merge, printEventLine, standing, type BodyOf, type RecordEvent } from '../../src/lib/record';
 import { verifyRecord, type Report } from '../../src/lib/verify';
 import { asText, SigningTablets } from './signing-tablets';
 import { PURGE_INPUTS, SMALL_PROCEDURE } from './small-procedure';
@@ -163,25 +163,19 @@ async function release(
 function statementOf(tablets: SigningTablets, gate: number, entered: string): Statement {
 	const own = tablets.held('T-1').filter(({ log }) => log === START_UP);
 	const stood = standing(SMALL_PROCEDURE, own, tablets.held('OFFICE'), entered);
-	const lines = stood.steps.filter((step) => step.gate === gate);
-	const others = [...tablets.heads('T-1')].filter(([device]) => device !== 'T-1');
+	const sheet = gateSheet(SMALL_PROCEDURE, stood, own, { gate, device: 'T-1' });
 	return {
 		text: `Gate ${gate}: the steps below stand.`,
 		language: 'en',
 		textVersion: '1',
 		build: 'test',
 		code: '0000-0000-0000-0000',
-		list: lines.map(({ step, state, entry }) => ({ step, state, proof: entry ?? null })),
-		counts: {},
-		openDeviations: stood.deviations.flatMap(({ deviation, state }) => (state === 'open' ? [deviation] : [])),
+		list: [...sheet.list],
+		counts: sheet.counts,
+		openDeviations: [...sheet.openDeviations],
 		lapsesSince: [],
-		late: [],
-		others: others.map(([device, head]) => ({
-			device,
-			number: head.number,
-			head: headCode(head),
-			lastHeard: head.entered,
-		})),
+		late: [...sheet.late],
+		others: [...sheet.others],
 		clock: 'agreed',
 		declaration: 'No fan stop, opening or loss of inert gas other than listed.',
 	};

@@ -63,7 +63,8 @@ function checkStatement(act: Signed, procedure: Procedure, stood: Standing): rea
 			const found = steps.get(step);
 			if (found === undefined) return [wrong(`lists a step ${step}, which the procedure does not have`)];
 			if (found.state !== state) return [wrong(`says that ${step} "${state}"; it was "${found.state}"`)];
-			return proof === (found.entry ?? null) ? [] : [wrong(`names another proof of ${step} than the one that counted`)];
+			const counted = found.state === 'stands' ? (found.entry ?? null) : null;
+			return proof === counted ? [] : [wrong(`names another proof of ${step} than the one that counted`)];
 		}),
 		...(sameNames(open, statement.openDeviations)
 			? []

@@ -10,6 +10,7 @@ export { checkPdf, type PdfReport } from './pdf/check-pdf';
 export type { PdfQuestion, RequiredSignature } from './pdf/question';
 export type { SignatureReport } from './pdf/check-signature';
 export { verifyRecord, type RecordQuestion } from './verify-record';
+export { verifyDossier, type DossierQuestion, type DossierReport, type Rebuild } from './verify-dossier';
 export type { Report } from './report';
 export type { Counts, ProcessResult } from './process-result';
 export type { TrustGiven } from './trust';

@@ -1,3 +1,4 @@
+import type { TrustList } from '../identity';
 import { allOf, inOrder, standing, type RecordEvent } from '../record';
 import { checkAttachments } from './check-attachments';
 import { checkCalcs } from './check-calcs';
@@ -34,9 +35,16 @@ export async function verifyRecord(question: RecordQuestion): Promise<Report> {
 	return makeReport(checks, about);
 }
 
-export async function judgeRecord(
-	question: RecordQuestion,
-): Promise<{ readonly checks: readonly Check[]; readonly about: Parameters<typeof makeReport>[1] }> {
+export type JudgedRecord = {
+	readonly checks: readonly Check[];
+	readonly about: About;
+	/** The newest list that was given or found, signed by the root. */
+	readonly trustList: TrustList | undefined;
+};
+
+type About = Parameters<typeof makeReport>[1] & { readonly events: readonly RecordEvent[] };
+
+export async function judgeRecord(question: RecordQuestion): Promise<JudgedRecord> {
 	const stored = readStoredRecord(question.lines);
 	const { events, startUp, site } = stored;
 	const certificates = certificatesOf(question.certificates ?? [], events);
@@ -68,7 +76,9 @@ export async function judgeRecord(
 			process: processResult(replayed),
 			counts: countsOf(startUp, site, replayed?.end),
 			startUp: startUp[0]?.log,
+			events,
 		},
+		trustList: trust.trustList,
 	};
 }
 
