@@ -196,6 +196,15 @@ export const VENTURI_INPUTS = {
 			from: 'site',
 		}),
 	),
+	straightLengthReduced: optional(
+		measured({
+			means:
+				'straight pipe from which on 0.5 % is added to the uncertainty of C, in pipe diameters (in brackets in the table)',
+			quantity: 'number',
+			min: 0,
+			from: 'site',
+		}),
+	),
 	uncertaintyLimit: optional(
 		measured({
 			means: 'largest relative expanded uncertainty of the mass flow that the site accepts',

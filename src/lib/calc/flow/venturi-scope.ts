@@ -1,5 +1,6 @@
 import type { CalcNote } from '../calculator';
 import { STEEL_EXPANSION, T_20 } from '../constants';
+import { straightLength } from './straight-length';
 import type { VenturiGiven } from './venturi-inputs';
 import { isInside, VENTURI_TYPES, type Limits } from './venturi-types';
 import type { WorkingPoint } from './working-point';
@@ -68,16 +69,18 @@ function readingNotes(given: VenturiGiven, { dp, p1, kappa }: WorkingPoint): rea
 
 function installationNotes(given: VenturiGiven, { D }: WorkingPoint): readonly CalcNote[] {
 	const notes: CalcNote[] = [];
-	const { dpCalibration, dust, flowCalibration, throatCondition, straightLength, straightLengthNeeded } = given;
+	const { dpCalibration, dust, flowCalibration, throatCondition } = given;
 	if (dpCalibration === 'none') notes.push({ kind: 'no-calibration-certificate', level: 'outside scope' });
 	if (dust === 'present' && flowCalibration === 'none') notes.push({ kind: 'dust-laden', level: 'outside scope' });
 	if (throatCondition === 'worn or built up') notes.push({ kind: 'throat-changed', level: 'outside scope' });
-	if (straightLength !== undefined && straightLengthNeeded !== undefined) {
-		const has = straightLength.value / D;
-		const needs = straightLengthNeeded.value;
-		if (has < needs) notes.push({ kind: 'straight-length-short', level: 'outside scope', has, needs });
-	}
-	const unknown = Object.entries({ dpCalibration, dust, throatCondition, straightLength, straightLengthNeeded })
+	notes.push(...straightLength(given, D).notes);
+	const unknown = Object.entries({
+		dpCalibration,
+		dust,
+		throatCondition,
+		straightLength: given.straightLength,
+		straightLengthNeeded: given.straightLengthNeeded,
+	})
 		.filter(([, value]) => value === undefined)
 		.map(([name]) => name);
 	if (unknown.length > 0) notes.push({ kind: 'installation-not-stated', level: 'remark', inputs: unknown });

@@ -3,6 +3,7 @@ import type { Numbers } from '../uncertainty';
 import { dischargeCoefficient, type Coefficient } from './discharge-coefficient';
 import { expansibility } from './expansibility';
 import { massFlow, reynoldsNumber } from './mass-flow';
+import { straightLength } from './straight-length';
 import type { VenturiGas } from './venturi-gas';
 import type { VenturiGiven } from './venturi-inputs';
 import { diameters } from './venturi-model';
@@ -33,14 +34,15 @@ export function workingPoint(given: VenturiGiven, gas: VenturiGas, values: Numbe
 	const epsilon = expansibility(expansion);
 	const flowWith = (C: number) => massFlow({ C, epsilon, d, D, dp, rho1: density });
 	const reynoldsWith = (C: number) => reynoldsNumber(flowWith(C), viscosity, D);
-	const coefficient = coefficientAtItsFlow(given.type, reynoldsWith);
+	const { U, ...coefficient } = coefficientAtItsFlow(given.type, reynoldsWith);
+	const { added } = straightLength(given, D);
 	return {
 		...expansion,
 		D,
 		d,
 		density,
 		epsilon,
-		coefficient,
+		coefficient: U === undefined ? coefficient : { ...coefficient, U: U + added },
 		reynolds: reynoldsWith(coefficient.C),
 		massFlowAtConstant: flowWith(VENTURI_TYPES[given.type].C),
 	};
