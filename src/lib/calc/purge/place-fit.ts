@@ -30,7 +30,7 @@ export type PlaceFitRefusal = DecayRefusal | { readonly kind: 'rate-of-the-analy
  *
  * @param samples t [s] and C [1], valid, on the basis of the limit
  * @param place begins [s], lag [s], T90 [s]
- * @returns the fit with its window, or why there is none
+ * @returns the fit with its window [s], or why there is none
  *
  * Source: IEC 61207-1, T90 of a first-order analyser (from memory, verify); thinning: common practice.
  * Checked against: decays with known lag and response (test/calc/purge/place-fit.test.ts).
