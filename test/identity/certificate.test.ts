@@ -78,7 +78,7 @@ const enrol = (
 		...change,
 	});
 
-test('a site root is a certificate authority for fifteen years, as OpenSSL reads it', () => {
+test('[C1] a site root is a certificate authority for fifteen years, as OpenSSL reads it', () => {
 	const { certificate } = root;
 	expect(certificate.subject).toEqual({ kind: 'authority', name: SITE });
 	expect([certificate.notBefore, certificate.notAfter]).toEqual(['2026-05-01T06:00:00Z', '2041-05-01T06:00:00Z']);
@@ -135,7 +135,7 @@ test('a root with a short passphrase, another length of life or a hidden charact
 	});
 });
 
-test('the certificate of a person names them, their roles and their tablet in words that any viewer shows', async () => {
+test('[C2] the certificate of a person names them, their roles and their tablet in words that any viewer shows', async () => {
 	const certificate = value(await enrol({ roles: ['shift supervisor', 'QA'] }));
 	expect(certificate.subject).toEqual({
 		kind: 'person',
@@ -184,14 +184,14 @@ test('OpenSSL follows the chain of a person to the root, for signing', async () 
 	expect(text).toMatch(/X509v3 Authority Key Identifier/);
 });
 
-test('a tablet has a certificate of its own, without a person and without a purpose beyond signing', async () => {
+test('[C3] a tablet has a certificate of its own, without a person and without a purpose beyond signing', async () => {
 	const device = { device: 'T-1', label: 'Tablet 1, mill', publicKey, validity, random: webRandom };
 	const certificate = value(await enrolDevice(root, device));
 	expect(certificate.subject).toEqual({ kind: 'device', device: 'T-1', label: 'Tablet 1, mill', site: SITE });
 	expect(openssl(certificate.der, 'x509', '-in', '@/one.pem', '-noout', '-text')).not.toContain('Extended Key Usage');
 });
 
-test('a certificate lives two years at most, and not outside the life of its root', async () => {
+test('[C2] a certificate lives two years at most, and not outside the life of its root', async () => {
 	const bad = (expected: string) => ({ ok: false, error: { kind: 'bad-validity', expected } });
 	const from = (notBefore: string, notAfter: string) => enrol({ validity: { notBefore, notAfter } });
 	expect(await from('2026-05-02T00:00:00Z', '2028-05-02T00:00:01Z')).toEqual(bad('at most 2 years'));

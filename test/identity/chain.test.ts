@@ -18,7 +18,7 @@ async function judge(question: ChainQuestion) {
 	return [answer.class, answer.sub, ...broken];
 }
 
-describe('chains made by OpenSSL', () => {
+describe('[C4] chains made by OpenSSL', () => {
 	const list: TrustList = {
 		kind: 'trust list',
 		v: 1,
@@ -80,7 +80,7 @@ describe('chains made by OpenSSL', () => {
 	});
 });
 
-describe('a person with a certificate from 1 February 2026 to 31 January 2028', () => {
+describe('[C5] [C6] a person with a certificate from 1 February 2026 to 31 January 2028', () => {
 	let site: TestSite;
 	let ada: TestSigner;
 

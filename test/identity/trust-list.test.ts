@@ -23,7 +23,7 @@ beforeAll(async () => {
 	signed = await signTrustList(list, site.root.key);
 });
 
-test('a signed trust list opens under its root, word for word', async () => {
+test('[C7] a signed trust list opens under its root, word for word', async () => {
 	expect(await openTrustList(signed, site.root.certificate)).toEqual({ ok: true, value: list });
 });
 
@@ -48,7 +48,7 @@ test('a list that the root signed for another site, or that is no list, is refus
 	});
 });
 
-test('a tablet keeps the list with the highest number, and refuses to go back', () => {
+test('[C7] a tablet keeps the list with the highest number, and refuses to go back', () => {
 	const newer = { ...list, sequence: 8, revocations: [] };
 	expect(replaceTrustList(undefined, list)).toEqual({ ok: true, value: list });
 	expect(replaceTrustList(list, newer)).toEqual({ ok: true, value: newer });
@@ -59,7 +59,7 @@ test('a tablet keeps the list with the highest number, and refuses to go back', 
 	});
 });
 
-test('two lists under one number are not two opinions but an alarm', () => {
+test('[C7] two lists under one number are not two opinions but an alarm', () => {
 	const other = { ...list, revocations: [] };
 	expect(canonicalJson(other)).not.toBe(canonicalJson(list));
 	expect(replaceTrustList(list, other)).toEqual({ ok: false, error: { kind: 'forked', sequence: 7 } });

@@ -36,7 +36,7 @@ describe('a closing signature', () => {
 		}
 	});
 
-	test('brings three objects: the field, the signature and what the field shows', async () => {
+	test('[PS2] brings three objects: the field, the signature and what the field shows', async () => {
 		const added = latin1(value(await signIncrement(base, performed())).slice(base.length));
 		const size = Number(/\/Size (\d+)/.exec(latin1(base).slice(latin1(base).lastIndexOf('trailer')))![1]);
 		const field = Number(
@@ -47,7 +47,7 @@ describe('a closing signature', () => {
 		expect(added).toContain(`/Size ${size + 2} `);
 	});
 
-	test('covers every byte but the hexadecimal string of its contents', async () => {
+	test('[PS4] covers every byte but the hexadecimal string of its contents', async () => {
 		const signed = value(await signIncrement(base, performed()));
 		const text = latin1(signed);
 		const [, from = 0, to = 0, rest = 0] = /\/ByteRange \[0 (\d+) +(\d+) +(\d+) *\]/.exec(text)!.map(Number);
@@ -56,7 +56,7 @@ describe('a closing signature', () => {
 		expect(to + rest).toBe(signed.length);
 	});
 
-	test('says name, meaning, role and time inside the bytes that it covers', async () => {
+	test('[PS3] says name, meaning, role and time inside the bytes that it covers', async () => {
 		const signed = value(await signIncrement(base, performed()));
 		const dictionary = await signatureOf(signed, 'sig_performed');
 		expect(dictionary.lookup(PDFName.of('Name'), PDFHexString).decodeText()).toBe('Ada Example');
@@ -65,7 +65,7 @@ describe('a closing signature', () => {
 		expect(dictionary.get(PDFName.of('SubFilter'))).toBe(PDFName.of('ETSI.CAdES.detached'));
 	});
 
-	test('shows name, role, meaning, time with its offset, certificate and digest code, and the drawn hand', async () => {
+	test('[PS6] shows name, role, meaning, time with its offset, certificate and digest code, and the drawn hand', async () => {
 		const shown = textShown(latin1(value(await signIncrement(base, performed())).slice(base.length)));
 		const { serial } = signers.sig_performed.certificate;
 		expect(shown).toEqual([
@@ -79,7 +79,7 @@ describe('a closing signature', () => {
 		expect(added.match(/ l /g)!.length).toBeGreaterThanOrEqual(39);
 	});
 
-	test('locks all fields if it is the last, and only then', async () => {
+	test('[PS3] locks all fields if it is the last, and only then', async () => {
 		const [, one, , three] = await signThree(site, signers);
 		expect((await signatureOf(one, 'sig_performed')).has(PDFName.of('Reference'))).toBe(false);
 		const [reference] = (await signatureOf(three, 'sig_accepted')).lookup(PDFName.of('Reference'), PDFArray).asArray();
@@ -164,7 +164,7 @@ describe('a signature is refused, and the file stays as it was', () => {
 	});
 });
 
-test('an open field is printed, shows that nobody has signed, and the last one is locked from the start', async () => {
+test('[PS1] an open field is printed, shows that nobody has signed, and the last one is locked from the start', async () => {
 	const pdf = await PDFDocument.load(base, { updateMetadata: false });
 	const form = pdf.catalog.lookup(PDFName.of('AcroForm'), PDFDict);
 	expect(form.lookup(PDFName.of('SigFlags'), PDFNumber).asNumber()).toBe(3);

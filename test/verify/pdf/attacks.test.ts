@@ -53,7 +53,7 @@ const UPDATE = 'update 3 is one signature and nothing else';
 const COVERS = 'covers the whole file as it was signed';
 const READ = 'signature can be read';
 
-describe('a signature that some readers take for none, or for a good one', () => {
+describe('[PS3] [PS4] [PS5] a signature that some readers take for none, or for a good one', () => {
 	test.each([
 		['without contents', CONTENTS, () => '', [UPDATE, COVERS, READ]],
 		['with null as its contents', CONTENTS, () => '/Contents null', [COVERS, READ]],
@@ -105,7 +105,7 @@ describe('a signature that some readers take for none, or for a good one', () =>
 	});
 });
 
-describe('a person with a good certificate who signs what is not true', () => {
+describe('[PS6] [C5] a person with a good certificate who signs what is not true', () => {
 	/** A font that writes one text where another was meant. */
 	const lying = (ink: Ink, meant: string, written: string): Ink => ({
 		...ink,

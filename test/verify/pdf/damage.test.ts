@@ -37,7 +37,7 @@ test('a dossier cut off at any sixty-fourth of its length fails, and says at whi
 	}
 });
 
-test('a dossier with any one byte changed never passes', async () => {
+test('[PS9] a dossier with any one byte changed never passes', async () => {
 	await fc.assert(
 		fc.asyncProperty(fc.nat(dossier.length - 1), fc.integer({ min: 1, max: 255 }), async (at, mask) => {
 			const changed = dossier.slice();
@@ -93,7 +93,7 @@ test('cross-references that lead in a circle are refused where they turn back', 
 	});
 });
 
-test('an update that takes an object away is refused', () => {
+test('[PS9] an update that takes an object away is refused', () => {
 	const update = appendUnsigned(dossier, [{ number: 5, body: 'null' }]);
 	const hidden = bytesOf(
 		latin1(update).replace(/(\d{10}) 00000 n \ntrailer(?![\s\S]*trailer)/, '0000000000 00001 f \ntrailer'),
@@ -101,7 +101,7 @@ test('an update that takes an object away is refused', () => {
 	expect(stopped(hidden)?.because).toContain('takes an object away');
 });
 
-test('an object between two objects that no cross-reference names is refused', () => {
+test('[PS9] an object between two objects that no cross-reference names is refused', () => {
 	const text = latin1(dossier);
 	const at = text.indexOf('\n6 0 obj');
 	const smuggled = `${text.slice(0, at)}\n99 0 obj\n<< >>\nendobj${text.slice(at)}`;
@@ -113,7 +113,7 @@ test('nesting beyond sixty-four levels is refused, however deep it goes', () => 
 	expect(stopped(appendUnsigned(dossier, [{ number: 90, body: deep }]))?.facts.expected).toBe('nesting of at most 64');
 });
 
-test('a dictionary with a key twice is refused: two readers would read two things', () => {
+test('[PS9] a dictionary with a key twice is refused: two readers would read two things', () => {
 	expect(stopped(appendUnsigned(dossier, [{ number: 90, body: '<< /A 1 /A 2 >>' }]))?.facts.expected).toBe(
 		'no second key A',
 	);
@@ -127,7 +127,7 @@ test('a stream whose length is the length of another stream is refused', () => {
 	expect(stopped(appendUnsigned(dossier, turned))?.facts.expected).toBe('the length of a stream');
 });
 
-test('a program, a launch, a form script and encryption are named with the object that holds them', () => {
+test('[PS1] a program, a launch, a form script and encryption are named with the object that holds them', () => {
 	for (const [body, what] of [
 		['<< /S /JavaScript /JS (app.alert) >>', 'JS in object 90, JavaScript in object 90'],
 		['<< /S /Launch /F (calc) >>', 'Launch in object 90'],
@@ -142,7 +142,7 @@ test('a program, a launch, a form script and encryption are named with the objec
 	}
 });
 
-test('a signature of other bytes than the whole file fails by its range', async () => {
+test('[PS4] a signature of other bytes than the whole file fails by its range', async () => {
 	const text = latin1(dossier);
 	const range = /\/ByteRange \[0 (\d+) +(\d+) +(\d+) +\]/.exec(text)!;
 	const shorter = range[0].replace(range[3]!, String(Number(range[3]) - 1));
@@ -153,7 +153,7 @@ test('a signature of other bytes than the whole file fails by its range', async 
 	});
 });
 
-test('the record comes out of the dossier byte for byte', () => {
+test('[PS8] the record comes out of the dossier byte for byte', () => {
 	expect(readPdf(dossier).attachments).toEqual([
 		{ name: 'record.ndjson', mediaType: 'application/x-ndjson', bytes: RECORD },
 	]);

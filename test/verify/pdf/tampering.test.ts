@@ -167,7 +167,7 @@ for (const { row, what, tamper, pdfsig, complaints: expected } of ROWS) {
 	});
 }
 
-test('an update that brings another record does not change the record that is read', () => {
+test('[PS8] an update that brings another record does not change the record that is read', () => {
 	const forged = appendUnsigned(files.three, [{ number: objects.attachment, body: stream('{"kind":"forged"}') }]);
 	expect(readPdf(forged).attachments).toEqual([
 		{ name: 'record.ndjson', mediaType: 'application/x-ndjson', bytes: RECORD },
@@ -186,7 +186,7 @@ test('a dossier of another site is undecided: this root can say nothing about it
 	expect(report).toMatchObject({ class: 'INDETERMINATE', sub: 'NO_CERTIFICATE_CHAIN_FOUND', outcome: 'undecided' });
 });
 
-test('a signer without the role that the record asks for fails the dossier', async () => {
+test('[C2] a signer without the role that the record asks for fails the dossier', async () => {
 	const required = [{ field: 'sig_performed', roles: ['QA'] as const }];
 	const report = await checkPdf(readPdf(files.three), { ...question(), required });
 	expect(report.outcome).toBe('failed');
