@@ -3,6 +3,9 @@
  * Deterministic: the same record makes the same bytes; a signature adds the chance inside ECDSA and nothing else.
  * May import: every room below, never verify.
  */
+export { buildDossier } from './build-dossier';
+export type { DossierError, DossierInput, RequiredSignature } from './input';
+export { INKS } from './fonts/inks';
 export type { Ink, Inks, NoGlyph } from './sign/ink';
 export type { Point } from './sign/appearance';
 export { addSignatureFields, type SignatureField } from './sign/signature-fields';

@@ -1,6 +1,6 @@
-import type { Plot, PlotCurve } from '../../calc';
+import type { Plot, PlotCurve, PlotMark } from '../../calc';
 import { apart } from '../apart';
-import { segment } from '../path';
+import { circle, segment } from '../path';
 import { roughly } from '../roughly';
 import { lettering, stroke, type Dash, type Drawing, type Measure, type Point, type Shape } from '../shape';
 import { curveShapes, endOf } from './curves';
@@ -22,33 +22,49 @@ export function drawPlot(
 	plot: Plot,
 	{ width, height, x, y, lettering: size = 14, measure = roughly }: PlotLook,
 ): Drawing {
-	const names = plot.curves.filter((curve) => curve.kind === 'line' || curve.kind === 'steps');
-	const right = Math.max(
-		size,
-		...names.map(({ label, decides }) => measure(label, decides === true ? 'title' : 'text', size) + size * 2.2),
+	const lines = plot.curves.filter((curve) => curve.kind === 'line' || curve.kind === 'steps');
+	// A name is said once: a second line of it, such as a floor, belongs to the first.
+	const named = lines.filter(({ label }, i) => lines.findIndex((other) => other.label === label) === i);
+	const spots = plot.curves.filter(
+		(curve) => curve.kind === 'points' && curve.x.length <= FEW && !lines.some(({ label }) => label === curve.label),
 	);
+	const right = Math.max(
+		size * 2,
+		...named.map(({ label, decides }) => measure(label, decides === true ? 'title' : 'text', size) + size * 2.2),
+	);
+	const left = size * 4;
 	const box = {
-		x: size * 3.4,
-		y: size * 2,
-		width: Math.max(size, width - size * 3.4 - right),
-		height: Math.max(size, height - size * 4.2),
+		x: left,
+		y: size * 2.2,
+		width: Math.max(size, width - left - right),
+		height: Math.max(size, height - size * (x?.clock === undefined ? 5.4 : 4.2)),
 	};
 	const frame = frameOf(plot, box, { ...(x === undefined ? {} : { x }), ...(y === undefined ? {} : { y }) });
+	const marks = plot.marks.map((mark) => widened(mark, plot.marks));
 	const curves = [...plot.curves].sort((a, b) => layer(a) - layer(b));
 	const shapes = [
 		...grid(frame),
-		...plot.marks.flatMap((mark) => groundOf(mark, frame)),
-		...curves.flatMap((curve) => curveShapes(curve, frame, dashOf(curve, names))),
-		...plot.marks.flatMap((mark) => linesOf(mark, frame, size)),
+		...marks.flatMap((mark) => groundOf(mark, frame)),
+		...curves.flatMap((curve) => curveShapes(curve, frame, dashOf(curve, named))),
+		...marks.flatMap((mark) => linesOf(mark, frame, size)),
 		...axes(plot, frame, size, x?.clock !== undefined),
-		...endNames(names, frame, size),
+		...endNames(named, frame, size),
+		...spots.flatMap((curve) => spotName(curve, frame, { size, measure })),
 	];
 	return { width, height, shapes };
 }
 
+/** A guard that says only where it ends reaches from there to its limit. */
+function widened(mark: PlotMark, marks: readonly PlotMark[]): PlotMark {
+	if (mark.kind !== 'guard' || mark.to !== undefined) return mark;
+	const limit = marks.find(({ kind, axis }) => kind === 'limit' && axis === mark.axis);
+	return limit === undefined ? mark : { ...mark, to: limit.at };
+}
+
 /** How a curve is told from the others without colour, here and in the table beside the plot. */
 export const dashOf = (curve: PlotCurve, lines: readonly PlotCurve[]): Dash | undefined =>
-	DASH_CYCLE[lines.filter(({ decides }) => decides !== true).indexOf(curve) % DASH_CYCLE.length];
+	DASH_CYCLE[lines.filter(({ decides }) => decides !== true).indexOf(curve) % DASH_CYCLE.length] ??
+	(lines.includes(curve) ? undefined : 'dotted');
 
 const layer = ({ kind, decides }: PlotCurve): number =>
 	({ band: 0, points: 1, steps: 2, line: 3 })[kind] + (decides === true ? 0.5 : 0);
@@ -108,4 +124,26 @@ function endNames(curves: readonly PlotCurve[], frame: Frame, size: number): rea
 	});
 }
 
+/** A point that stands for itself is ringed and named beside it. */
+function spotName(
+	curve: PlotCurve,
+	frame: Frame,
+	{ size, measure }: { readonly size: number; readonly measure: Measure },
+): readonly Shape[] {
+	const at = endOf(curve, frame);
+	if (at === undefined) return [];
+	const right = frame.box.x + frame.box.width;
+	const fits = at.x + size + measure(curve.label, 'strong', size) < right;
+	return [
+		stroke(circle(at, size * 0.32), { pen: curve.decides === true ? 'bold' : 'line', fill: 'paper' }),
+		lettering(
+			curve.label,
+			{ x: at.x + (fits ? size * 0.7 : -size * 0.7), y: at.y - size * 0.5 },
+			{ size, voice: 'strong', anchor: fits ? 'start' : 'end' },
+		),
+	];
+}
+
+/** So few points are single readings, not a series. */
+const FEW = 3;
 const DASH_CYCLE: readonly (Dash | undefined)[] = [undefined, 'dashed', 'dotted', 'chain'];

@@ -1,0 +1,94 @@
+import type { Result } from '../base';
+import type { DossierError, DossierInput } from './input';
+import { Flow } from './layout/flow';
+import { frameShapes } from './layout/title-block';
+import type { Sheet } from './layout/sheet';
+import { manifestOf, type Manifest } from './manifest';
+import { Anchors } from './pages/anchors';
+import { calculations } from './pages/calculations';
+import { cover, titleOf } from './pages/cover';
+import { gatePages } from './pages/gate';
+import { happenings } from './pages/happenings';
+import { holdPoints } from './pages/hold-points';
+import { instruments } from './pages/instruments';
+import { peopleAndTablets } from './pages/people-and-tablets';
+import { refusals } from './pages/refusals';
+import { signatures } from './pages/signatures';
+import { timeline } from './pages/timeline';
+import { writePdf } from './pdf/write-pdf';
+import { storyOf, type Story } from './story/story';
+
+/**
+ * The dossier of one sealed start-up, before anybody signed it: the base revision, to which each closing signature adds one
+ * update. A function of its input alone: the same record makes the same bytes, in Node and in a browser (SPEC.md, D1).
+ */
+export async function buildDossier(input: DossierInput): Promise<Result<Uint8Array<ArrayBuffer>, DossierError>> {
+	const told = storyOf(input);
+	if (!told.ok) return told;
+	const story = told.value;
+	const manifest = manifestOf(story);
+	const sheets = framed(layOut(story, manifest), story, manifest);
+	return writePdf({
+		sheets,
+		attachments: manifest.attachments,
+		metadata: {
+			title: titleOf(story),
+			language: input.language,
+			writer: input.writer,
+			date: story.sealed.entered,
+			digest: manifest.digest,
+		},
+		unsigned: story.say('sign.not signed'),
+	});
+}
+
+/** Laid out until every pointer names the sheet that it means: twice, unless pointing moved something. */
+function layOut(story: Story, manifest: Manifest): readonly Sheet[] {
+	let anchors = new Anchors();
+	for (let round = 0; round < 4; round++) {
+		const flow = new Flow();
+		const next = new Anchors(anchors.marked);
+		chapters(flow, story, manifest, next);
+		if (next.settled || round === 3) return flow.sheets;
+		anchors = next;
+	}
+	throw new Error('unreachable');
+}
+
+function chapters(flow: Flow, story: Story, manifest: Manifest, anchors: Anchors): void {
+	cover(flow, story);
+	holdPoints(flow, story, anchors);
+	timeline(flow, story);
+	for (const { number } of story.input.procedure.gates) {
+		const before = flow.sheets.length;
+		gatePages(flow, story, number);
+		anchors.mark(`gate ${number}`, before + 1);
+	}
+	calculations(flow, story, anchors);
+	happenings(flow, story);
+	refusals(flow, story);
+	peopleAndTablets(flow, story);
+	instruments(flow, story);
+	signatures(flow, story, manifest);
+}
+
+function framed(sheets: readonly Sheet[], story: Story, manifest: Manifest): readonly Sheet[] {
+	const { say, input, moments, sealed } = story;
+	const { procedure, plant } = input;
+	const field = (label: Parameters<typeof say>[0], value: string) => ({ label: say(label), value });
+	return sheets.map((sheet, i) => ({
+		...sheet,
+		shapes: [
+			...frameShapes({
+				owner: field('block.owner', plant.site),
+				title: field('block.title', sheet.title),
+				startUp: field('block.start-up', story.opened.log),
+				procedure: field('block.procedure', say('block.revision', { id: procedure.id, revision: procedure.revision })),
+				sealed: field('block.sealed', moments.full(sealed.entered)),
+				digest: field('block.digest', manifest.code),
+				sheet: field('block.sheet', `${i + 1} / ${sheets.length}`),
+			}),
+			...sheet.shapes,
+		],
+	}));
+}

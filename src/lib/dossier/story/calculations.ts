@@ -1,0 +1,88 @@
+import * as v from 'valibot';
+import { canonicalJson } from '../../base';
+import { runCalculator, type CalcResult } from '../../calc';
+import { allOf, type EventOf } from '../../record';
+import type { Story } from './story';
+
+/** A calculation that somebody entered, as it was stored. */
+export type ToldCalculation = {
+	readonly entry: EventOf<'entry'>;
+	readonly result: CalcResult;
+	/** It is the proof that counted at the seal. */
+	readonly counts: boolean;
+};
+
+/** Stored results in the order of the procedure, the newest of each step first. What has not the shape of a result is left to verify. */
+export function calculationsOf(story: Story): readonly ToldCalculation[] {
+	const entries = allOf(story.events, 'entry').filter(({ body }) => body.calculation !== undefined);
+	return story.input.procedure.steps.flatMap(({ id }) =>
+		entries
+			.filter(({ body }) => body.step === id)
+			.sort((a, b) => b.observedAt - a.observedAt)
+			.flatMap((entry) => {
+				const stored = v.safeParse(StoredResult, entry.body.calculation);
+				if (!stored.success) return [];
+				const counts = story.end.steps.some((step) => step.entry === entry.id);
+				return [{ entry, counts, result: withPlots(stored.output as unknown as CalcResult) }];
+			}),
+	);
+}
+
+/** A record need not keep pictures: the calculator draws them again, when it still says the same. */
+function withPlots(result: CalcResult): CalcResult {
+	if (result.plots !== undefined) return result;
+	const again = runCalculator(result.calc, result.inputs);
+	if (!again.ok || again.value.plots === undefined) return result;
+	const same = canonicalJson(again.value.values) === canonicalJson(result.values);
+	return same ? { ...result, plots: again.value.plots } : result;
+}
+
+/** Numbers of a plot may be absent where JSON could not carry them: such a point is not drawn. */
+const Numbers = v.array(v.nullable(v.number()));
+const Axis = v.looseObject({ label: v.string(), unit: v.string() });
+const StoredPlot = v.looseObject({
+	id: v.string(),
+	title: v.string(),
+	x: Axis,
+	y: Axis,
+	curves: v.array(
+		v.looseObject({
+			id: v.string(),
+			label: v.string(),
+			kind: v.picklist(['points', 'line', 'band', 'steps']),
+			x: Numbers,
+			y: Numbers,
+			y2: v.optional(Numbers),
+		}),
+	),
+	marks: v.array(
+		v.looseObject({
+			kind: v.picklist(['limit', 'guard', 'window', 'event']),
+			label: v.string(),
+			axis: v.picklist(['x', 'y']),
+			at: v.number(),
+			to: v.optional(v.number()),
+		}),
+	),
+});
+const Note = v.looseObject({ kind: v.string(), level: v.string() });
+const StoredResult = v.looseObject({
+	calc: v.string(),
+	constants: v.string(),
+	inputs: v.unknown(),
+	values: v.record(
+		v.string(),
+		v.looseObject({
+			value: v.nullable(v.number()),
+			unit: v.string(),
+			U: v.optional(v.number()),
+			because: v.optional(v.string()),
+		}),
+	),
+	verdict: v.optional(
+		v.looseObject({ word: v.picklist(['adequate', 'not yet', 'cannot be shown']), reasons: v.array(Note) }),
+	),
+	scope: v.picklist(['in scope', 'outside scope']),
+	notes: v.array(Note),
+	plots: v.optional(v.array(StoredPlot)),
+});

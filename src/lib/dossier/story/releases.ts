@@ -1,0 +1,48 @@
+import type { Story } from './story';
+
+/** How each gate was released last, for the ladder and the list of hold points. */
+export type Release = {
+	readonly gate: number;
+	readonly title: string;
+	readonly holdPoint: string;
+	/** Who signed, in the order of signing; empty while it is not released. */
+	readonly by: readonly {
+		readonly person: string;
+		readonly roles: string;
+		readonly device: string;
+		readonly at: string;
+		readonly code: string | undefined;
+	}[];
+	readonly at: string | undefined;
+	/** "Released 07:10, commissioning lead" */
+	readonly caption: string;
+};
+
+export function releasesOf(story: Story): readonly Release[] {
+	const { end, input, acts, names, say, moments } = story;
+	return input.procedure.gates.map(({ number: gate, title, holdPoint, signatures }) => {
+		const standing = end.gates.find((each) => each.gate === gate);
+		const state = standing?.state ?? 'not ready';
+		const wanted = signatures.flatMap(({ roles }) => roles);
+		const by = acts
+			.filter(({ event }) => standing?.acts.includes(event.id) === true)
+			.map(({ event }) => ({
+				person: names.person(event.person),
+				roles:
+					names
+						.roles(event.person)
+						.filter((role) => wanted.includes(role))
+						.join(', ') || names.roles(event.person).join(', '),
+				device: event.device,
+				at: event.observed ?? event.entered,
+				code: event.body.statement?.code,
+			}));
+		const at = standing?.releasedAt;
+		const roles = [...new Set(by.map((each) => each.roles))].join(', ');
+		const caption =
+			state === 'released' && at !== undefined
+				? say('cover.released', { at: moments.clock(at), roles })
+				: say(`gate.${state}`);
+		return { gate, title, holdPoint, by, at, caption };
+	});
+}

@@ -1,0 +1,20 @@
+/**
+ * wording: message catalogues and the sentences made from data (causes, moments, notes), one place for every language.
+ * Pure: the same data, the same sentence.
+ * May import: base, quantity, identity, calc, plant, procedure, record.
+ */
+export { counted, LANGUAGES, speaker, type Facts, type Key, type Language, type Say } from './say';
+export { duration, momentsAt, type Moments } from './moment';
+export { sayCause, type Names } from './cause';
+export { sayNote, sayNumber } from './note';
+export {
+	sayConditionFinding,
+	sayEventError,
+	sayJsonError,
+	sayPlantFinding,
+	sayProcedureFinding,
+	sayQuantityError,
+	sayRefusal,
+	sayShapeError,
+	sayTrendError,
+} from './say-error';

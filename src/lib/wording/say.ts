@@ -1,0 +1,30 @@
+import { EN } from './en';
+
+/** Languages whose catalogue is complete. */
+export type Language = 'en';
+export type Key = keyof typeof EN;
+
+export type Facts = { readonly [name: string]: string | number };
+
+/** Says a message of the catalogue with its facts filled in. */
+export type Say = (key: Key, facts?: Facts) => string;
+
+export const LANGUAGES = { en: EN } as const satisfies {
+	readonly [language in Language]: { readonly [key in Key]: string };
+};
+
+export const isKey = (text: string): text is Key => Object.hasOwn(EN, text);
+
+/** A message that asks for a fact which is not given is a programmer's error, not a sentence with a hole. */
+export function speaker(language: Language): Say {
+	const words: { readonly [key in Key]: string } = LANGUAGES[language];
+	return (key, facts = {}) =>
+		words[key].replace(/\{(\w+)\}/g, (_, name: string) => {
+			const fact = facts[name];
+			if (fact === undefined) throw new TypeError(`${key} asks for "${name}"`);
+			return String(fact);
+		});
+}
+
+/** "1 deviation", "3 deviations": the message of the number, from a pair of keys. */
+export const counted = (say: Say, one: Key, other: Key, n: number): string => say(n === 1 ? one : other, { n });
