@@ -5,7 +5,7 @@ import type { ConditionFinding, ProcedureFinding } from '../procedure';
 import type { NumberError, QuantityError } from '../quantity';
 import type { EventError, TrendError } from '../record';
 import { sayNote } from './note';
-import { isKey, type Facts, type Key, type Say } from './say';
+import { asksFor, isKey, type Facts, type Key, type Say } from './say';
 
 /** Each says what is wrong and where, as the end of a sentence: app and command line put it where they need it. */
 export const sayJsonError = (error: JsonError, say: Say): string => say(`json.${error.kind}`, factsOf(error));
@@ -66,7 +66,8 @@ export function sayRefusal(refusal: Refusal, say: Say): string {
 	const { kind, input, ...facts } = refusal;
 	const at = input === undefined ? '' : `${input}: `;
 	const key = [`refusal.${kind}`, `quantity.${kind}`].find(isKey);
-	if (key !== undefined) return at + say(key, { ...factsOf(facts), range: rangeOf(refusal) });
+	const known = { ...factsOf(facts), range: rangeOf(refusal) };
+	if (key !== undefined && asksFor(key).every((name) => Object.hasOwn(known, name))) return at + say(key, known);
 	return at + sayNote({ kind, level: 'reason', ...definedFacts(facts) });
 }
 
