@@ -49,7 +49,13 @@ const act = <const D extends string, E extends v.ObjectEntries>(does: D, entries
 		...entries,
 	});
 
-const evidence = { observed: v.exactOptional(Local), note: v.exactOptional(Text), from: v.exactOptional(Local) };
+/** `photo`: a picture beside this file. */
+const evidence = {
+	photo: v.exactOptional(Text),
+	observed: v.exactOptional(Local),
+	note: v.exactOptional(Text),
+	from: v.exactOptional(Local),
+};
 
 export const ActSchema = v.variant('do', [
 	act('open', {

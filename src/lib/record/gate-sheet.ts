@@ -1,3 +1,4 @@
+import { readableCode, sha256Hex } from '../base';
 import type { Procedure, Step } from '../procedure';
 import type { GateStanding, Standing } from './answer';
 import type { BodyOf, EventOf, RecordEvent } from './event';
@@ -33,6 +34,7 @@ export type GateSheet = {
 export type SheetLine = NonNullable<BodyOf<'gate released'>['statement']>['list'][number];
 export type OtherTablet = NonNullable<BodyOf<'gate released'>['statement']>['others'][number];
 
+/** @param events the start-up's log and, for findings, the site's */
 export function gateSheet(
 	procedure: Procedure,
 	found: Standing,
@@ -73,11 +75,35 @@ export function gateSheet(
 		findingsSince: findingsSince(events, since),
 		late,
 		refusal: refusalOf(events, asked.gate, since),
-		others: otherTablets(events, asked.device),
+		others: otherTablets(
+			events.filter(({ log }) => log === found.startUp),
+			asked.device,
+		),
 		clock: found.clock.state,
 		missing: standing.missing,
 		newestMinutes: ages.length === 0 ? undefined : Math.min(...ages),
 		oldestMinutes: ages.length === 0 ? undefined : Math.max(...ages),
+	};
+}
+
+export type Statement = NonNullable<BodyOf<'gate released'>['statement']>;
+
+/** What goes into the signed bytes of an act: the words that were shown and everything that was shown beside them. */
+export function statementOf(
+	sheet: GateSheet,
+	words: Pick<Statement, 'text' | 'language' | 'textVersion' | 'build' | 'declaration'> & Pick<Statement, 'copy'>,
+): Statement {
+	return {
+		...words,
+		code: readableCode(sha256Hex(words.text), 16),
+		list: sheet.list,
+		counts: sheet.counts,
+		openDeviations: sheet.openDeviations,
+		lapsesSince: sheet.eventsSince.map(({ what, begin, end }) => `${what} ${begin} ${end ?? 'not ended'}`),
+		late: sheet.late,
+		others: sheet.others,
+		clock: sheet.clock,
+		...(sheet.refusal?.answer === undefined ? {} : { answersRefusal: sheet.refusal.answer }),
 	};
 }
 

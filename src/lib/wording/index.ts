@@ -3,7 +3,7 @@
  * Pure: the same data, the same sentence.
  * May import: base, quantity, identity, calc, plant, procedure, record.
  */
-export { counted, LANGUAGES, speaker, type Facts, type Key, type Language, type Say } from './say';
+export { capitalised, counted, LANGUAGES, speaker, type Facts, type Key, type Language, type Say } from './say';
 export { duration, momentsAt, type Moments } from './moment';
 export { sayCause, type Names } from './cause';
 export { sayNote, sayNumber } from './note';
@@ -18,3 +18,4 @@ export {
 	sayShapeError,
 	sayTrendError,
 } from './say-error';
+export { DECLARATION, releaseStatement, sealStatement, STATEMENT_VERSION } from './statement';
