@@ -27,12 +27,13 @@ function inner(issue: v.BaseIssue<unknown>): readonly v.BaseIssue<unknown>[] {
 	return within.map((each) => ({ ...each, path: [...outer, ...(each.path ?? [])] as unknown as typeof each.path }));
 }
 
-const said = (issue: v.BaseIssue<unknown>): ShapeError => ({
-	kind: 'wrong-shape',
-	path: pathOf(issue),
-	expected: issue.expected === 'never' ? 'no such name' : (issue.expected ?? issue.message),
-	found: issue.received,
-});
+const said = (issue: v.BaseIssue<unknown>): ShapeError => {
+	const place = { kind: 'wrong-shape', path: pathOf(issue) } as const;
+	if (issue.expected === 'never') return { ...place, expected: 'no such name', found: issue.received };
+	const isMissing = issue.type === 'strict_object' && issue.received === 'undefined';
+	if (isMissing) return { ...place, expected: 'a value', found: 'nothing' };
+	return { ...place, expected: issue.expected ?? issue.message, found: issue.received };
+};
 
 const pathOf = ({ path }: v.BaseIssue<unknown>): string =>
 	(path ?? [])

@@ -6,7 +6,7 @@ import type { Procedure, Step } from './schema';
 /** What the names of a procedure are checked against: the site's roles, and the unit when it is known. */
 export type Against = { readonly roles: readonly string[]; readonly plant?: Plant };
 
-/** [P2] to [P4]: every id is given once, and every name answers to something. */
+/** [P3] and [P4]: every id is given once, and every name answers to something. */
 export const checkNames = (procedure: Procedure, against: Against): readonly ProcedureFinding[] => [
 	...duplicates(procedure),
 	...namesOfGates(procedure, against),

@@ -31,7 +31,8 @@ export function readCondition(permissive: Permissive): Result<Condition, readonl
 	}
 	const walk = new Walk(permissive);
 	walk.truth(parsed.ast, NOTHING);
-	const findings = [...walk.findings, ...walk.unused()];
+	// In a condition that was refused in part, a name may be used where the walk did not go.
+	const findings = walk.findings.length > 0 ? walk.findings : walk.unused();
 	return findings.length > 0 ? fail(findings) : ok((names) => parsed({ ...names }) === true);
 }
 

@@ -1,4 +1,4 @@
-import { fromSi, isQuantityName, toSi } from '../quantity';
+import { fromSi, isQuantityName, parseNumber, toSi, type QuantityName } from '../quantity';
 import type { Basis, Plant } from '../plant';
 import { readCondition, type ConditionFinding } from './condition';
 import type { Permissive } from './schema';
@@ -25,7 +25,7 @@ export type PermissiveValue = {
 };
 
 /**
- * [P31] TRUE or FALSE only when every name of the permissive is known, and unknown otherwise, whatever && || and ! would
+ * [P30] TRUE or FALSE only when every name of the permissive is known, and unknown otherwise, whatever && || and ! would
  * make of the rest: a missing reading is no reason to start anything.
  */
 export function evaluatePermissive(permissive: Permissive, inputs: PermissiveInputs): PermissiveValue {
@@ -71,12 +71,19 @@ export function readingFor(
 	if (use.quantity !== point.quantity || !isQuantityName(use.quantity)) return { unknown: 'wrong quantity' };
 	// As every age (ST4), this one has run out at exactly its number of minutes; a NaN has no age.
 	if (!(newest.ageMinutes < use.notOlderThanMinutes)) return { unknown: 'stale' };
-	const read = toSi({ value: newest.typed, unit: newest.unit }, use.quantity);
-	const inPointUnit = read.ok ? fromSi(read.value.value, use.quantity, point.unit) : read;
-	const inUseUnit = read.ok ? fromSi(read.value.value, use.quantity, use.unit) : read;
-	if (!inPointUnit.ok || !inUseUnit.ok) return { unknown: 'not a number' };
+	const inPointUnit = shownIn(point.unit, newest, use.quantity);
+	const inUseUnit = shownIn(use.unit, newest, use.quantity);
+	if (inPointUnit === undefined || inUseUnit === undefined) return { unknown: 'not a number' };
 	const { from, to } = point.range;
-	return inPointUnit.value >= from && inPointUnit.value <= to ? inUseUnit.value : { unknown: 'out of range' };
+	return inPointUnit >= from && inPointUnit <= to ? inUseUnit : { unknown: 'out of range' };
+}
+
+/** The typed number itself where it was typed in that unit: a conversion there and back could move it over the limit. */
+function shownIn(unit: string, { typed, unit: typedUnit }: NewestReading, quantity: QuantityName): number | undefined {
+	const si = toSi({ value: typed, unit: typedUnit }, quantity);
+	if (!si.ok) return undefined;
+	const shown = unit === typedUnit ? parseNumber(typed) : fromSi(si.value.value, quantity, unit);
+	return shown.ok ? shown.value : undefined;
 }
 
 const own = <T>(record: { readonly [name: string]: T }, name: string): T | undefined =>

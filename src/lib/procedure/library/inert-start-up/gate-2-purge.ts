@@ -35,6 +35,7 @@ export const GATE_2_PURGE: readonly Draft[] = [
 		title: 'Fan at its least flow',
 		does: 'Start the process-gas fan at its least speed, wait until it holds, and read the Venturi.',
 		why: 'Only the flow of the fan carries inert gas into every corner that the circuit gas sweeps.',
+		source: practice('least speed first; the flow itself is judged in the next step'),
 		minutes: 5,
 		where: ['RD-21', 'FT-201'],
 		fields: [
@@ -99,6 +100,7 @@ export const GATE_2_PURGE: readonly Draft[] = [
 		title: 'Inert gas on to every enclosed volume',
 		does: 'Open the inert gas valves one after the other and see flow on each.',
 		why: 'A volume that no gas enters keeps its air, whatever the circuit reads.',
+		source: practice('every enclosed volume of the plant description'),
 		minutes: 10,
 		where: ['NS-21', 'ML-21', 'FH-21', 'SI-21', 'BY-21', 'CH-21'],
 		rows: (

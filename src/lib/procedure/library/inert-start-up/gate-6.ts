@@ -158,6 +158,7 @@ export const GATE_6 = gate(6, [
 		title: 'False air across mill and filter',
 		does: 'Work out the false air from the oxygen before and after, and enter it with the suction.',
 		why: 'It is the leak at this suction; at another it is another.',
+		source: practice('noted for comparison with the next start'),
 		minutes: 10,
 		where: ['ML-21', 'BF-21'],
 		fields: [
