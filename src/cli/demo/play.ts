@@ -62,7 +62,7 @@ export async function playStartUp(
 		await perform(act, stage);
 	}
 	const named = play.acts.flatMap((act) => [
-		...('photo' in act && act.photo !== undefined ? [act.photo] : []),
+		...('photo' in act ? [act.photo] : []),
 		...(act.do === 'attach' ? [act.file] : []),
 	]);
 	const attachedFiles = [...new Set(named)].map((name) => ({ ...attachment(name, files), bytes: files.read(name) }));
@@ -186,8 +186,7 @@ async function perform(act: Act, stage: Stage): Promise<void> {
 	const device = act.on ?? play.tablets[0] ?? '';
 	const entered = around.instant(act.at);
 	const said: Said = { person: act.by, device, entered };
-	const seen =
-		'observed' in act && act.observed !== undefined ? { ...said, observed: around.instant(act.observed) } : said;
+	const seen = 'observed' in act ? { ...said, observed: around.instant(act.observed) } : said;
 	const local = (time: string | undefined, name: string): object =>
 		time === undefined ? {} : { [name]: around.instant(time) };
 	switch (act.do) {

@@ -6,7 +6,8 @@
 export { capitalised, counted, LANGUAGES, speaker, type Facts, type Key, type Language, type Say } from './say';
 export { duration, momentsAt, type Moments } from './moment';
 export { sayCause, type Names } from './cause';
-export { sayNote, sayNumber } from './note';
+export { sayNote, sayNumber, type SeriesClock } from './note';
+export { purgeSentence } from './purge-sentence';
 export {
 	sayConditionFinding,
 	sayEventError,
