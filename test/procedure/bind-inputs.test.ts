@@ -146,7 +146,7 @@ describe('[P26] readings keep what was typed', () => {
 	});
 
 	test('an instrument that has run out of calibration says so to the Venturi', () => {
-		const late = Date.UTC(2026, 11, 15, 22);
+		const late = Date.UTC(2026, 11, 15, 23);
 		expect(bound('2.15', { now: late - 1 })).toMatchObject({ value: { dpCalibration: 'valid' } });
 		expect(bound('2.15', { now: late })).toMatchObject({ value: { dpCalibration: 'none' } });
 	});

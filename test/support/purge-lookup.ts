@@ -1,7 +1,7 @@
 import type { BoundReading, BoundRow, BoundSeries, Lookup } from '../../src/lib/procedure';
 
-/** 2026-05-04T20:33:00+02:00, the zero of the series. */
-export const ZERO = Date.UTC(2026, 4, 4, 18, 33);
+/** 2026-03-14T20:33:00+01:00, the zero of the series. */
+export const ZERO = Date.UTC(2026, 2, 14, 19, 33);
 const END = 3600;
 
 /** Oxygen that falls to a floor of 4.2 % after the lag of its place, sampled every 10 s for an hour. */
@@ -18,7 +18,7 @@ const steady = (unit: string, value: number): BoundSeries['byTag'][string] => {
 };
 
 const SERIES: BoundSeries = {
-	zero: '2026-05-04T20:33:00+02:00',
+	zero: '2026-03-14T20:33:00+01:00',
 	zeroAt: ZERO,
 	byTag: {
 		'AT-211': decay(5, 1000),

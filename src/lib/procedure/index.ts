@@ -16,7 +16,9 @@ export {
 	type StepKind,
 	type Validity,
 } from './schema';
-export type { Binding } from './binding';
+export { BindingSchema, type Binding } from './binding';
+export { FieldSchema, LimitUseSchema } from './step';
+export { LapsedBySchema, ValiditySchema } from './validity';
 export { readCondition, type Condition, type ConditionFinding } from './condition';
 export {
 	evaluatePermissive,

@@ -18,7 +18,7 @@ export const LimitUseSchema = v.union([
 ]);
 
 /** A number that is read and typed. The basis belongs to the measuring point; it stands here only for a field without one. */
-const Field = v.strictObject({
+export const FieldSchema = v.strictObject({
 	id: Id,
 	title: Text,
 	point: v.exactOptional(Id),
@@ -84,9 +84,9 @@ export const StepSchema = v.variant('kind', [
 			v.strictObject({ id: Id, element: v.exactOptional(Id), title: Text, required: Text, choices: v.array(Text) }),
 		),
 	}),
-	step('reading', { fields: v.array(Field) }),
+	step('reading', { fields: v.array(FieldSchema) }),
 	/** All places on one page, with their limit. */
-	step('quick sheet', { fields: v.array(Field) }),
+	step('quick sheet', { fields: v.array(FieldSchema) }),
 	step('series', {
 		points: v.array(Id),
 		/** Points whose trend must be unbroken: fan flow, inert flow. */
@@ -118,8 +118,8 @@ export const StepSchema = v.variant('kind', [
 	}),
 	step('choice', { options: v.array(v.strictObject({ id: Id, title: Text, passes: v.boolean() })) }),
 	step('photo', { shows: Text }),
-	step('timed hold', { holdMinutes: v.pipe(v.number(), v.minValue(0)), fields: v.exactOptional(v.array(Field)) }),
-	step('watch', { fields: v.array(Field) }),
+	step('timed hold', { holdMinutes: v.pipe(v.number(), v.minValue(0)), fields: v.exactOptional(v.array(FieldSchema)) }),
+	step('watch', { fields: v.array(FieldSchema) }),
 	step('witness point', { party: Text, noticeMinutes: v.pipe(v.number(), v.minValue(0)) }),
 	step('review point', { documents: v.array(Text) }),
 ]);
