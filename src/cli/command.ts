@@ -24,3 +24,9 @@ export type Command = {
 	readonly does: string;
 	readonly run: (args: readonly string[], terminal: Terminal) => Promise<Outcome>;
 };
+
+/** What was given cannot be worked with: says what happened, what is safe and what to do. */
+export function unusable(terminal: Terminal, because: string): Outcome {
+	terminal.complain(because);
+	return 'unusable-input';
+}

@@ -9,6 +9,11 @@ const terminal: Terminal = {
 	readInput: () => text(process.stdin),
 };
 
+// A reader that has seen enough (head) closes the pipe: no fault of the command.
+process.stdout.on('error', (error: NodeJS.ErrnoException) => {
+	if (error.code !== 'EPIPE') throw error;
+});
+
 // Not process.exit: what was printed into a pipe must still arrive.
 process.exitCode = EXIT_CODES[await main(process.argv.slice(2), COMMANDS, terminal).catch(notJudged)];
 

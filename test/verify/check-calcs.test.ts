@@ -20,9 +20,9 @@ describe('a stored calculation', () => {
 	test('whose result was embellished before it was signed', async () => {
 		const found = await calculated((stored) => ({
 			...stored,
-			values: { ...(stored['values'] as object), timeByMixing: { value: 1200, unit: 's' } },
+			values: { ...(stored.values as object), timeByMixing: { value: 1200, unit: 's' } },
 		}));
-		expect(found.map(({ name, outcome, facts }) => [name, outcome, facts['at']])).toEqual([
+		expect(found.map(({ name, outcome, facts }) => [name, outcome, facts.at])).toEqual([
 			[AGAIN, 'failed', 'values.timeByMixing.value'],
 		]);
 	});
@@ -30,7 +30,7 @@ describe('a stored calculation', () => {
 	test('whose inputs were changed and the result kept', async () => {
 		const found = await calculated((stored) => ({
 			...stored,
-			inputs: { ...(stored['inputs'] as object), mixing: 0.5 },
+			inputs: { ...(stored.inputs as object), mixing: 0.5 },
 		}));
 		expect(found.map(({ name, outcome }) => [name, outcome])).toEqual([[AGAIN, 'failed']]);
 	});

@@ -43,7 +43,7 @@ describe('acts that the rules do not allow', () => {
 		});
 		const report = await judge(record);
 		const gates = bad(report).filter(({ name }) => name === 'acts were allowed by the rules');
-		expect(gates.map(({ facts }) => facts['number'])).toEqual([7, 8]);
+		expect(gates.map(({ facts }) => facts.number)).toEqual([7, 8]);
 	});
 });
 
@@ -76,7 +76,7 @@ describe('statements', () => {
 			statement: (said) => ({ ...said, openDeviations: [] }),
 		});
 		const report = await judge(record);
-		expect(bad(report).map(({ name, facts }) => [name, facts['number']])).toEqual([
+		expect(bad(report).map(({ name, facts }) => [name, facts.number])).toEqual([
 			['statements say what stood when they were signed', 7],
 			['statements say what stood when they were signed', 8],
 		]);
@@ -86,7 +86,7 @@ describe('statements', () => {
 describe('the seal', () => {
 	test('that leaves a tablet out, or names an earlier event of it', async () => {
 		const without = await bend({ seal: ({ 'T-2': _, ...heads }) => heads });
-		expect(bad(await judge(without)).map(({ name, facts }) => [name, facts['device']])).toEqual([
+		expect(bad(await judge(without)).map(({ name, facts }) => [name, facts.device])).toEqual([
 			['seal covers every chain', 'T-2'],
 		]);
 		const short = await bend({ seal: (heads) => ({ ...heads, 'T-1': { ...heads['T-1']!, number: 3 } }) });

@@ -58,7 +58,7 @@ describe('a pass that the recorded values do not carry', () => {
 			},
 			site,
 		);
-		expect(bad(await judge(bent)).map(({ facts }) => facts['because'])).toEqual([
+		expect(bad(await judge(bent)).map(({ facts }) => facts.because)).toEqual([
 			'it holds no value for filter',
 			'it does not confirm counted',
 		]);

@@ -43,7 +43,7 @@ describe('signatures', () => {
 		const report = await judge(record, withSignature(to, record.events[from]!.signature));
 		expect(report.class).toBe('TOTAL-FAILED');
 		expect(report.sub).toBe('SIG_CRYPTO_FAILURE');
-		expect(bad(report).map(({ name, sub, facts }) => [name, sub, facts['number']])).toEqual([
+		expect(bad(report).map(({ name, sub, facts }) => [name, sub, facts.number])).toEqual([
 			[SIGNED, 'SIG_CRYPTO_FAILURE', 4],
 		]);
 	});
@@ -168,14 +168,14 @@ describe('keys of a shift', () => {
 			},
 			record.site,
 		);
-		expect(bad(await judge(bent)).map(({ facts }) => facts['because'])).toContain(because);
+		expect(bad(await judge(bent)).map(({ facts }) => facts.because)).toContain(because);
 	});
 
 	test('of another person or another tablet do not sign', async () => {
 		const note = indexOf('T-2', 2);
 		const { shiftKey } = record.events[indexOf('T-1', 3)]!;
 		const lines = await resigned(note, 'TechB T-2', { shiftKey: shiftKey! });
-		expect(bad(await judge(record, lines)).map(({ facts }) => facts['because'])).toContain(
+		expect(bad(await judge(record, lines)).map(({ facts }) => facts.because)).toContain(
 			'shift-key-of-another-certificate',
 		);
 	});

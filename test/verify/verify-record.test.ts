@@ -67,7 +67,7 @@ type Path = readonly (string | number)[];
 const pathsOf = (json: Json, path: Path = []): readonly Path[] =>
 	typeof json === 'object' && json !== null
 		? Object.entries(json)
-				.flatMap(([name, inner]) => pathsOf(inner as Json, [...path, name]))
+				.flatMap(([name, inner]) => pathsOf(inner, [...path, name]))
 				.concat(path.length > 0 ? [path] : [])
 		: [path];
 

@@ -1,4 +1,15 @@
 import type { Command } from '../command';
+import { calc } from './calc';
+import { checkProcedureCommand } from './check-procedure';
+import { schemas } from './schemas';
+import { standingCommand } from './standing';
+import { verify } from './verify';
 
 /** Every command under its name; one file each in this folder. */
-export const COMMANDS: { readonly [name: string]: Command } = {};
+export const COMMANDS: { readonly [name: string]: Command } = {
+	verify,
+	calc,
+	'check-procedure': checkProcedureCommand,
+	standing: standingCommand,
+	schemas,
+};

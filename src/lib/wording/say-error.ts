@@ -73,7 +73,7 @@ export function sayRefusal(refusal: Refusal, say: Say): string {
 
 function rangeOf({ min, max, unit }: Refusal): string {
 	const bound = (word: string, value: unknown): readonly string[] =>
-		typeof value === 'number' ? [`${word} ${value} ${String(unit)}`] : [];
+		typeof value === 'number' ? [`${word} ${value} ${typeof unit === 'string' ? unit : ''}`.trimEnd()] : [];
 	return [...bound('at least', min), ...bound('at most', max)].join(', ');
 }
 
