@@ -29,7 +29,13 @@ describe('[C4] chains made by OpenSSL', () => {
 		certificates: [],
 		revocations: [],
 	};
-	const issuers = [made('narrow-registrar'), made('registrar'), made('second-registrar'), made('good')];
+	const issuers = [
+		made('crl-registrar'),
+		made('narrow-registrar'),
+		made('registrar'),
+		made('second-registrar'),
+		made('good'),
+	];
 	const ask = (name: string, root = 'root') =>
 		judge({
 			certificate: made(name),
@@ -52,7 +58,7 @@ describe('[C4] chains made by OpenSSL', () => {
 		expect(await ask('under-second')).toEqual(['INDETERMINATE', 'NO_CERTIFICATE_CHAIN_FOUND', 'path: undecided']);
 	});
 
-	test.each(['by-a-person', 'unknown-extension', 'encipherment', 'root', 'registrar'])(
+	test.each(['by-a-person', 'under-crl', 'unknown-extension', 'encipherment', 'root', 'registrar'])(
 		'%s: a certificate used for what it is not for fails its constraints',
 		async (name) => {
 			expect(await ask(name)).toEqual(['INDETERMINATE', 'CHAIN_CONSTRAINTS_FAILURE', 'constraints: failed']);

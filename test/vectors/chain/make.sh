@@ -25,7 +25,7 @@ person() { echo "/CN=Ada Example/UID=P-01/title=technician/0.9.2342.19200300.100
 signs='basicConstraints=critical,CA:FALSE\nkeyUsage=critical,digitalSignature,nonRepudiation'
 issues='basicConstraints=critical,CA:TRUE,pathlen:0\nkeyUsage=critical,keyCertSign,cRLSign'
 
-for key in root good registrar under-registrar by-a-person unknown-extension encipherment second-registrar under-second false-root narrow-root narrow-registrar under-narrow; do p256 "$key"; done
+for key in root good registrar under-registrar by-a-person unknown-extension encipherment second-registrar under-second false-root narrow-root narrow-registrar under-narrow crl-registrar under-crl; do p256 "$key"; done
 openssl genrsa -out "$keys/rsa-signer.key" 2048
 openssl ecparam -name secp384r1 -genkey -noout -out "$keys/p384-signer.key"
 p256 sha1
@@ -42,6 +42,8 @@ issue second-registrar registrar '/CN=Second Registrar' sha256 "$issues"
 issue under-second second-registrar "$(person)" sha256 "$signs"
 issue narrow-registrar narrow-root '/CN=Narrow Registrar' sha256 "$issues"
 issue under-narrow narrow-registrar "$(person)" sha256 "$signs"
+issue crl-registrar root '/CN=Registrar of revocations' sha256 'basicConstraints=critical,CA:TRUE,pathlen:0\nkeyUsage=critical,cRLSign'
+issue under-crl crl-registrar "$(person)" sha256 "$signs"
 issue by-a-person good "$(person)" sha256 "$signs"
 issue unknown-extension root "$(person)" sha256 "$signs\n1.2.3.4=critical,ASN1:UTF8String:obey"
 issue encipherment root "$(person)" sha256 'basicConstraints=critical,CA:FALSE\nkeyUsage=critical,keyEncipherment'

@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
-import { fromHex, toHex } from '../../../src/lib/base';
+import { concat, toBase64, toHex } from '../../../src/lib/base';
 import { signIncrement, type ClosingSignature, type Ink } from '../../../src/lib/dossier';
+import { enrolPerson, webRandom } from '../../../src/lib/identity';
 import { checkPdf, readPdf } from '../../../src/lib/verify';
 import { PdfJudges, readPdfsig } from '../../support/pdf-judges';
 import { closing, makeBase, makeSigners, signThree, type Signers } from '../../support/small-dossier';
@@ -91,19 +92,42 @@ describe('[PS3] [PS4] [PS5] a signature that some readers take for none, or for 
 		expect(await complaints(editLast(CONTENTS, () => first))).toEqual(expect.arrayContaining(['failed', DIGEST]));
 	});
 
-	test('that another program made, with attributes that we do not write, is not read', async () => {
-		const [contents] = [...latin1(three).matchAll(new RegExp(CONTENTS, 'g'))].at(-1)!;
-		const der = fromHex(contents.slice('/Contents <'.length, -1))!;
-		// The object identifier of the message digest becomes that of the signing time: one attribute less and one too many.
-		const digestType = Buffer.from('2a864886f70d010904', 'hex');
-		const at = Buffer.from(der).indexOf(digestType) + digestType.length - 1;
-		der[at] = 5;
-		const report = await judge(editLast(CONTENTS, () => `/Contents <${toHex(der)}>`));
-		const check = report.checks.find(({ name, outcome }) => name === READ && outcome === 'failed');
+	test('that OpenSSL made with attributes of its own is good to other readers, and is not read here', async () => {
+		const pair = await crypto.subtle.generateKey({ name: 'ECDSA', namedCurve: 'P-256' }, true, ['sign', 'verify']);
+		const [pkcs8, spki] = [
+			await crypto.subtle.exportKey('pkcs8', pair.privateKey),
+			await crypto.subtle.exportKey('spki', pair.publicKey),
+		];
+		const certificate = await enrolCyra(toBase64(new Uint8Array(spki)));
+		const [, from = 0, to = 0] = [...latin1(three).matchAll(/\/ByteRange \[0 (\d+) +(\d+)/g)].at(-1)!.map(Number);
+		const signed = concat(three.subarray(0, from), three.subarray(to));
+		const der = judges.opensslSign(signed, { certificate, pkcs8: new Uint8Array(pkcs8) });
+		const pdf = editLast(CONTENTS, (all) => `/Contents <${toHex(der).padEnd(all.length - 12, '0')}>`);
+		expect(readPdfsig(judges.pdfsig(pdf))).toEqual({ valid: 3, mismatch: 0, trusted: 3, total: 1 });
+		const check = (await judge(pdf)).checks.find(({ name, outcome }) => name === READ && outcome === 'failed');
 		expect(check).toMatchObject({ field: 'sig_accepted', sub: 'FORMAT_FAILURE' });
 		expect(check?.because).toContain('content type, message digest and signing-certificate-v2, and no other attribute');
 	});
+
+	test('that names another certificate than the one beside it, by its hash or by its number, fails', async () => {
+		const { der, serial, fingerprint } = signers.sig_accepted.certificate;
+		for (const named of [fingerprint, serial]) {
+			// The certificate itself holds its number too: what is changed is the last place.
+			const pdf = editLast(new RegExp(named), (found) => (found.startsWith('5') ? '6' : '5') + found.slice(1));
+			expect(latin1(pdf)).toContain(toHex(der));
+			expect(await complaints(pdf)).toEqual(expect.arrayContaining(['failed', 'certificate of the signer is inside']));
+		}
+	});
 });
+
+/** Enrols the third signer again, for a key that this test knows. */
+async function enrolCyra(publicKey: string): Promise<Bytes> {
+	const { subject, notBefore, notAfter } = signers.sig_accepted.certificate;
+	if (subject.kind !== 'person') throw new Error('the third signer is a person');
+	const { person, printedName, roles, device } = subject;
+	const how = { person, printedName, roles, device, publicKey, validity: { notBefore, notAfter }, random: webRandom };
+	return value(await enrolPerson(site.root, how)).der;
+}
 
 describe('[PS6] [C5] a person with a good certificate who signs what is not true', () => {
 	/** A font that writes one text where another was meant. */
