@@ -35,10 +35,18 @@ export function play(procedure: Procedure, facts: Facts, now: Millis, allowed: A
 	);
 	const entriesAt = groupByInstant(facts.entries);
 	const actsAt = groupByInstant(facts.acts.map((act) => ({ act, observed: act.observedAt })));
-	for (const at of instants(facts, steps, now)) {
-		for (const track of steps.values()) stepForward(track, at, entriesAt.get(at) ?? [], facts, steps, gates);
+	for (const [at, due] of calendar(facts, steps, now)) {
+		const changed = new Set<string>();
+		for (const track of steps.values()) {
+			const { id, redo, waits } = track.step;
+			if (!due.everything && !due.steps.has(id) && ![...redo, ...waits].some((one) => changed.has(one))) continue;
+			const before = track.status.state;
+			stepForward(track, at, entriesAt.get(at) ?? [], facts, steps, gates);
+			if (track.status.state !== before) changed.add(id);
+		}
 		for (const gate of gates) {
-			gate.lookAt(at, facts);
+			if (due.gates || gate.refusal !== undefined || gate.own.some(({ step }) => changed.has(step.id)))
+				gate.lookAt(at, facts);
 			for (const { act } of actsAt.get(at) ?? [])
 				if (act.body.gate === gate.gate.number && allowed(act)) gate.act(act, facts);
 			if (gate.release?.at === at) spendAges(steps, gate.gate.number);
@@ -88,22 +96,31 @@ function newest(entries: readonly EntryFact[]): EntryFact | undefined {
 
 const WORSE: readonly EntryFact['outcome'][] = ['pass', 'not applicable', 'cannot do', 'try', 'fail'];
 
-/** Every instant at which something can change. */
-function instants(facts: Facts, steps: ReadonlyMap<string, StepTrack>, now: Millis): readonly Millis[] {
-	const all = [
-		...facts.entries.flatMap((entry) => [
-			entry.observed,
-			entry.agreed ?? now,
-			entry.observed + (steps.get(entry.step)?.life ?? Infinity),
-		]),
-		...facts.plantEvents.map((event) => event.begin),
-		...facts.findings.map((finding) => finding.observed),
-		...facts.pointsChanged.map((change) => change.at),
-		...facts.deviations.flatMap((deviation) => [deviation.raised, deviation.closed]),
-		...facts.acts.map((act) => act.observedAt),
-		now,
-	];
-	return [...new Set(all)].filter((at) => at <= now).sort((a, b) => a - b);
+/** What can change at an instant; a step changes besides when one changes that it relies on. */
+type Due = { everything: boolean; gates: boolean; readonly steps: Set<string> };
+
+/** Every instant at which something can change, in order. */
+function calendar(
+	facts: Facts,
+	steps: ReadonlyMap<string, StepTrack>,
+	now: Millis,
+): readonly (readonly [Millis, Due])[] {
+	const days = new Map<Millis, Due>();
+	const on = (at: Millis): Due => {
+		const due = days.get(at) ?? { everything: false, gates: false, steps: new Set<string>() };
+		if (at <= now) days.set(at, due);
+		return due;
+	};
+	for (const { step, observed, agreed } of facts.entries) {
+		const ends = observed + (steps.get(step)?.life ?? Infinity);
+		for (const at of [observed, agreed ?? observed, ends]) on(at).steps.add(step);
+	}
+	for (const { begin } of facts.plantEvents) on(begin).everything = true;
+	for (const { observed } of facts.findings) on(observed).everything = true;
+	for (const { at } of facts.pointsChanged) on(at).everything = true;
+	for (const { raised, closed } of facts.deviations) for (const at of [raised, closed]) on(at).gates = true;
+	for (const { observedAt } of facts.acts) on(observedAt).gates = true;
+	return [...days].sort(([a], [b]) => a - b);
 }
 
 function groupByInstant<T extends { readonly observed: Millis }>(
