@@ -1,4 +1,5 @@
 import { toJsonSchema } from '@valibot/to-json-schema';
+import * as v from 'valibot';
 import type { GenericSchema } from 'valibot';
 import { MeasureSchema, PlantSchema, SourceSchema } from '../../src/lib/plant';
 import {
@@ -9,6 +10,7 @@ import {
 	ProcedureSchema,
 	ValiditySchema,
 } from '../../src/lib/procedure';
+import { AnswerSchema, EnvelopeSchema, SITE_BODIES, START_UP_BODIES } from '../../src/lib/record';
 
 /**
  * The JSON Schemas that are published in static/schemas, by file, made from the schemas that the rooms read with: nobody
@@ -28,7 +30,24 @@ export const SCHEMAS: { readonly [file: string]: object } = {
 		source: SourceSchema,
 		validity: ValiditySchema,
 	}),
+	'event.schema.json': published('Event of a record: its envelope with the body of its kind', eventSchema(), {
+		eventId: EnvelopeSchema.entries.previous.wrapped,
+		instant: EnvelopeSchema.entries.entered,
+		reading: START_UP_BODIES.entry.entries.values.wrapped.item,
+		statement: START_UP_BODIES['gate released'].entries.statement.wrapped,
+	}),
+	'standing.schema.json': published('What stands, format gatehold-standing/1', AnswerSchema, {
+		cause: AnswerSchema.entries.steps.item.entries.why.item,
+		instant: AnswerSchema.entries.at,
+	}),
 };
+
+function eventSchema(): GenericSchema {
+	const kinds = Object.entries({ ...START_UP_BODIES, ...SITE_BODIES });
+	return v.union(
+		kinds.map(([kind, body]) => v.strictObject({ ...EnvelopeSchema.entries, kind: v.literal(kind), body })),
+	);
+}
 
 /** @param definitions shapes that occur often or contain themselves, by the name under which they are referred to */
 function published(
@@ -37,7 +56,10 @@ function published(
 	definitions?: { readonly [name: string]: GenericSchema },
 ): object {
 	const { $schema, ...rest } = toJsonSchema(schema, {
+		target: 'draft-2020-12',
 		errorMode: 'throw',
+		// That the calendar has a day has no word in JSON Schema.
+		ignoreActions: ['check'],
 		...(definitions === undefined ? {} : { definitions: { ...definitions } }),
 	});
 	return { $schema, title, ...rest };

@@ -1,9 +1,9 @@
+import { toJsonSchema } from '@valibot/to-json-schema';
 import { CATALOGUE, latest, runCalculator, type Calculator } from '../../lib/calc';
 import { sayRefusal, speaker } from '../../lib/wording';
 import { unusable, type Command, type Outcome, type Terminal } from '../command';
 import { jsonIn } from '../files';
 import { readOptions } from '../options';
-import { inputsSchema } from '../schemas';
 
 const say = speaker('en');
 
@@ -48,7 +48,7 @@ function list(terminal: Terminal, asJson: boolean): Outcome {
 }
 
 const described = (calculator: Calculator) => {
-	const { id, version, title, answers, inputs, outputs, sources } = calculator;
+	const { id, version, title, answers, inputs, schema, outputs, sources } = calculator;
 	return {
 		id,
 		version,
@@ -56,7 +56,7 @@ const described = (calculator: Calculator) => {
 		title,
 		answers,
 		inputs,
-		inputsSchema: inputsSchema(calculator),
+		inputsSchema: toJsonSchema(schema, { errorMode: 'ignore' }),
 		outputs,
 		sources,
 	};

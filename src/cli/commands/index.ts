@@ -1,7 +1,6 @@
 import type { Command } from '../command';
 import { calc } from './calc';
 import { checkProcedureCommand } from './check-procedure';
-import { schemas } from './schemas';
 import { standingCommand } from './standing';
 import { verify } from './verify';
 
@@ -11,5 +10,4 @@ export const COMMANDS: { readonly [name: string]: Command } = {
 	calc,
 	'check-procedure': checkProcedureCommand,
 	standing: standingCommand,
-	schemas,
 };
