@@ -76,9 +76,20 @@ export function factsOf(procedure: Procedure, events: readonly RecordEvent[]): F
 	};
 }
 
+/** Read once per document: every gate act is judged on the same one. */
+const PLANTS = new WeakMap<object, Plant | { readonly unreadable: true }>();
+
 function plantOf(opened: EventOf<'start-up opened'> | undefined): Plant | undefined {
-	const plant = v.safeParse(PlantSchema, opened?.body.documents?.plant);
-	return plant.success ? plant.output : undefined;
+	const document = opened?.body.documents?.plant;
+	if (typeof document !== 'object' || document === null) return undefined;
+	const known = PLANTS.get(document) ?? readPlant(document);
+	PLANTS.set(document, known);
+	return 'unreadable' in known ? undefined : known;
+}
+
+function readPlant(document: object): Plant | { readonly unreadable: true } {
+	const plant = v.safeParse(PlantSchema, document);
+	return plant.success ? plant.output : { unreadable: true };
 }
 
 const isGateAct = (event: RecordEvent): event is GateAct =>
