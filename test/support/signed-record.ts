@@ -136,7 +136,7 @@ function opening(tablets: SigningTablets, { people }: Bent): BodyOf<'start-up op
 }
 
 /** The smallest plant: it is enough that it can be read. */
-const PLANT = {
+export const PLANT = {
 	format: 'gatehold-plant/1',
 	unit: 'FM-9',
 	title: 'Invented mill',
