@@ -101,11 +101,17 @@ test('[PS9] an update that takes an object away is refused', () => {
 	expect(stopped(hidden)?.because).toContain('takes an object away');
 });
 
-test('[PS9] an object between two objects that no cross-reference names is refused', () => {
-	const text = latin1(dossier);
-	const at = text.indexOf('\n6 0 obj');
-	const smuggled = `${text.slice(0, at)}\n99 0 obj\n<< >>\nendobj${text.slice(at)}`;
-	expect(stopped(bytesOf(smuggled))).toMatchObject({ outcome: 'failed' });
+test('[PS9] an object that no cross-reference names is refused, wherever it lies', () => {
+	const update = latin1(
+		appendUnsigned(dossier, [
+			{ number: 90, body: '<< /Hidden true >>' },
+			{ number: 91, body: 'null' },
+		]),
+	);
+	const unnamed = (number: number) =>
+		stopped(bytesOf(update.replace(new RegExp(`${number} 1\\n\\d{10} 00000 n \\n`), '')));
+	expect(unnamed(90)?.because).toMatch(/object 91, which the cross-references put at byte \d+ expected/);
+	expect(unnamed(91)?.because).toMatch(/the cross-references, which startxref puts at byte \d+ expected/);
 });
 
 test('nesting beyond sixty-four levels is refused, however deep it goes', () => {
