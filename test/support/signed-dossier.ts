@@ -1,4 +1,5 @@
-import { buildDossier, INKS, signIncrement } from '../../src/lib/dossier';
+import { BUILD } from '../../src/cli/version';
+import { buildDossier, INKS, signIncrement, type DossierInput } from '../../src/lib/dossier';
 import { sign } from '../../src/lib/identity';
 import { PlantSchema, type Plant } from '../../src/lib/plant';
 import * as v from 'valibot';
@@ -15,8 +16,8 @@ const CLOSING = [
 	{ field: 'sig_accepted', meaning: 'accepted', roles: ['QA'], by: 'QA T-1' },
 ] as const;
 
-/** The small start-up as a dossier with its three closing signatures. */
-export async function makeSignedDossier(record: SignedRecord, writer = 'Gatehold 0.1.0'): Promise<Bytes> {
+/** The small start-up as a dossier with its three closing signatures; what differs from the truth is an insider's work. */
+export async function makeSignedDossier(record: SignedRecord, differs: Partial<DossierInput> = {}): Promise<Bytes> {
 	const { site, tablets, events, lines } = record;
 	const ofSite = (i: number): boolean => events[i]!.log === 'site';
 	const base = value(
@@ -24,13 +25,14 @@ export async function makeSignedDossier(record: SignedRecord, writer = 'Gatehold
 			lines: lines.filter((_, i) => !ofSite(i)),
 			siteLines: lines.filter((_, i) => ofSite(i)),
 			procedure: SMALL_PROCEDURE,
-			plant: v.parse(PlantSchema, PLANT) as Plant,
+			plant: v.parse(PlantSchema, PLANT),
 			root: site.root.certificate.der,
 			certificates: tablets.certificates.map(({ der }) => der),
 			files: [],
 			language: 'en',
-			writer,
+			writer: BUILD,
 			signatures: CLOSING.map(({ field, meaning, roles }) => ({ field, meaning, roles })),
+			...differs,
 		}),
 	);
 	let pdf = base;
