@@ -17,10 +17,10 @@ const EVERY = 10;
  * half the rate, and a slow swirl brings richer and poorer gas past the probe.
  */
 const PLACES = [
-	{ tag: 'AT-211', lag: 5, t90: 8, exchange: 936, sd: 0.05, persists: 0.5, swirl: 0 },
-	{ tag: 'AT-212', lag: 5, t90: 8, exchange: 996, sd: 0.05, persists: 0.5, swirl: 0 },
-	{ tag: 'AT-213', lag: 45, t90: 25, exchange: 1584, sd: 0.06, persists: 0.7, swirl: 0.25 },
-	{ tag: 'AT-214', lag: 40, t90: 25, exchange: 1104, sd: 0.05, persists: 0.6, swirl: 0 },
+	{ tag: 'AT-211', lag: 5, t90: 8, exchange: 936, sd: 0.05, persists: 0.3, swirl: 0 },
+	{ tag: 'AT-212', lag: 5, t90: 8, exchange: 996, sd: 0.05, persists: 0.3, swirl: 0 },
+	{ tag: 'AT-213', lag: 45, t90: 25, exchange: 1620, sd: 0.06, persists: 0.6, swirl: 0.35 },
+	{ tag: 'AT-214', lag: 40, t90: 25, exchange: 1104, sd: 0.05, persists: 0.5, swirl: 0 },
 ];
 
 /**
@@ -32,9 +32,9 @@ const PLACES = [
 const FIRST = {
 	begins: '2026-03-14T20:40:00',
 	minutes: 52,
-	seed: 20260314,
+	seed: 20265314,
 	start: [20.9, 20.9, 20.9, 20.9],
-	floor: [2.3, 2.4, 3.9, 2.6],
+	floor: [2.3, 2.4, 3.7, 2.6],
 	inertFlow: 888,
 	fanFlow: 14_950,
 	stroked: [240, 360],
@@ -44,9 +44,9 @@ const FIRST = {
 const SECOND = {
 	begins: '2026-03-15T03:20:00',
 	minutes: 44,
-	seed: 20260315,
+	seed: 20265315,
 	start: [6.1, 6.3, 8.3, 5.9],
-	floor: [2.3, 2.4, 4.5, 2.6],
+	floor: [2.3, 2.4, 4.3, 2.6],
 	inertFlow: 892,
 	fanFlow: 15_100,
 	stroked: [240, 360],
@@ -85,7 +85,7 @@ function oxygenAt(place, purge, i, times) {
 	/** @param {number} t */
 	const gas = (t) => {
 		if (t <= 0) return start;
-		const swirl = place.swirl * (height / 17) * Math.sin((2 * Math.PI * t) / 800) * Math.exp(-t / 1500);
+		const swirl = place.swirl * (height / 17) * Math.sin((2 * Math.PI * t) / 700) * Math.exp(-t / 1800);
 		return floor + height * Math.exp(-t / place.exchange) + swirl;
 	};
 	const noise = noisy(times, purge.seed + i, place);
