@@ -109,6 +109,13 @@ describe('[PS3] [PS4] [PS5] a signature that some readers take for none, or for 
 		expect(check?.because).toContain('content type, message digest and signing-certificate-v2, and no other attribute');
 	});
 
+	test('that carries a root with one changed byte fails, though nobody signed that byte', async () => {
+		const root = toHex(site.root.certificate.der);
+		const pdf = editLast(new RegExp(root), (found) => found.slice(0, -1) + (found.endsWith('0') ? '1' : '0'));
+		expect(readPdfsig(judges.pdfsig(pdf))).toMatchObject({ valid: 3, total: 1 });
+		expect(await complaints(pdf)).toEqual(['failed', 'certificates inside are those of the chain']);
+	});
+
 	test('that names another certificate than the one beside it, by its hash or by its number, fails', async () => {
 		const { der, serial, fingerprint } = signers.sig_accepted.certificate;
 		for (const named of [fingerprint, serial]) {
