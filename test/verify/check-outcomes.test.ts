@@ -1,5 +1,4 @@
 import { beforeAll, describe, expect, test } from 'vitest';
-import { judgeValue, type Field } from '../../src/lib/record/judge-value';
 import type { Check, Report } from '../../src/lib/verify';
 import { at, judge, makeSignedRecord } from '../support/signed-record';
 import { makeTestSite, type TestSite } from '../support/test-site';
@@ -62,56 +61,5 @@ describe('a pass that the recorded values do not carry', () => {
 			'it holds no value for filter',
 			'it does not confirm counted',
 		]);
-	});
-});
-
-describe('a value against its limit', () => {
-	const source = { kind: 'demonstration', text: 'invented' } as const;
-	const temperature: Field = {
-		id: 'outlet',
-		title: 'mill outlet',
-		quantity: 'temperature',
-		unit: 'degC',
-		limit: { atLeast: { value: '75', unit: 'degC' }, guard: { value: '2', unit: 'K' }, source },
-	};
-
-	test.each([
-		['77', 'degC', 'inside'],
-		['76,9', 'degC', 'outside'],
-		['170.6', 'degF', 'inside'],
-		['170.5', 'degF', 'outside'],
-		['77', 'mbar', 'cannot tell'],
-	])('%s %s at least 75 °C with a guard of 2 K: %s', (typed, unit, kind) => {
-		expect(judgeValue({ typed, unit }, temperature, undefined).kind).toBe(kind);
-	});
-
-	test('a wet reading does not answer a dry limit; a dry one answers a wet maximum, on the safe side', () => {
-		const field = (basis: 'wet' | 'dry'): Field => ({
-			id: 'o2',
-			title: 'oxygen',
-			quantity: `oxygen-${basis}`,
-			unit: '%',
-			limit: { limit: 'L-O2' },
-		});
-		const limit = (basis: 'wet' | 'dry') => ({
-			id: 'L-O2',
-			title: 'O2',
-			quantity: `oxygen-${basis}`,
-			basis,
-			atMost: { value: '8', unit: '%' },
-			source,
-		});
-		const plant = (basis: 'wet' | 'dry') =>
-			({ points: [], limits: [limit(basis)] }) as unknown as Parameters<typeof judgeValue>[2];
-		const reading = { typed: '7', unit: '%' };
-		expect(judgeValue({ ...reading, basis: 'wet' }, field('dry'), plant('dry')).kind).toBe('cannot tell');
-		expect(judgeValue({ ...reading, basis: 'dry' }, field('wet'), plant('wet')).kind).toBe('inside');
-		expect(judgeValue({ ...reading, typed: '8.1', basis: 'dry' }, field('wet'), plant('wet')).kind).toBe('outside');
-	});
-
-	test('a limit that the plant description does not hold', () => {
-		expect(judgeValue({ typed: '1', unit: '%' }, { ...temperature, limit: { limit: 'gone' } }, undefined).kind).toBe(
-			'cannot tell',
-		);
 	});
 });

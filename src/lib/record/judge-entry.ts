@@ -1,5 +1,5 @@
 import { unreachable } from '../base';
-import type { Plant } from '../plant';
+import type { Measure, Plant } from '../plant';
 import type { Step } from '../procedure';
 import { isOf, type BodyOf, type RecordEvent } from './event';
 import { judgeValue, type Field, type Judged, type Reading } from './judge-value';
@@ -21,7 +21,7 @@ export function judgeEntry(
 	around: { readonly plant: Plant | undefined; readonly byId: ReadonlyMap<string, RecordEvent> },
 ): readonly EntryFault[] {
 	return faultsOf(step, entry, {
-		judge: (reading, field) => judgeValue(reading, field, around.plant),
+		judge: (reading, field, U) => judgeValue(reading, field, around.plant, U),
 		byId: around.byId,
 	});
 }
@@ -30,7 +30,7 @@ const fault = (because: string): EntryFault => ({ because, kind: 'does not pass'
 const doubt = (because: string): EntryFault => ({ because, kind: 'cannot tell' });
 
 type Judging = {
-	readonly judge: (reading: Reading, field: Field) => Judged;
+	readonly judge: (reading: Reading, field: Field, U?: Measure) => Judged;
 	readonly byId: ReadonlyMap<string, RecordEvent>;
 };
 
@@ -126,7 +126,7 @@ function faultsOfCalculation(
 				calc?: unknown;
 				scope?: unknown;
 				verdict?: { word?: unknown };
-				values?: { [name: string]: { value?: unknown; unit?: unknown } };
+				values?: { [name: string]: { value?: unknown; unit?: unknown; U?: unknown } };
 		  }
 		| undefined;
 	if (stored === undefined) return [fault('it holds no calculation')];
@@ -136,11 +136,14 @@ function faultsOfCalculation(
 		const word = stored.verdict?.word;
 		return word === 'adequate' ? [] : [fault(`the verdict is "${String(word)}"`)];
 	}
-	const { value, unit } = stored.values?.[proves.output] ?? {};
+	const { value, unit, U } = stored.values?.[proves.output] ?? {};
 	if (typeof value !== 'number' || typeof unit !== 'string') return [fault(`the calculation has no ${proves.output}`)];
 	const { quantity, limit, output } = proves;
 	const field: Field = { id: output, title: output, quantity, unit: proves.unit, limit };
-	return saidOf(`${output} is ${value} ${unit}`, judge({ typed: String(value), unit }, field));
+	return saidOf(
+		`${output} is ${value} ${unit}`,
+		judge({ typed: String(value), unit }, field, typeof U === 'number' ? { value: U, unit } : undefined),
+	);
 }
 
 type SeriesStep = Extract<Step, { readonly kind: 'series' }>;

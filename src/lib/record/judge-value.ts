@@ -19,7 +19,8 @@ type Limit = {
 	readonly basis?: Basis;
 };
 
-export function judgeValue(reading: Reading, field: Field, plant: Plant | undefined): Judged {
+/** @param U expanded uncertainty of a computed value: kept from the limit where it is larger than the guard */
+export function judgeValue(reading: Reading, field: Field, plant: Plant | undefined, U?: Measure): Judged {
 	if (field.limit === undefined) return { kind: 'no limit' };
 	const limit = limitOf(field.limit, plant);
 	if (limit === undefined) return cannotTell('its limit is not in the plant description of the record');
@@ -29,12 +30,13 @@ export function judgeValue(reading: Reading, field: Field, plant: Plant | undefi
 	if (!value.ok) return cannotTell(`${reading.typed} ${reading.unit} is no ${quantity} (${value.error.kind})`);
 	if (basisDisagrees(basisOf(reading, field, plant), limit))
 		return cannotTell('reading and limit are not of one basis, wet or dry');
-	return judge(value.value.value, limit, quantity);
+	return judge(value.value.value, limit, quantity, U);
 }
 
-function judge(value: number, limit: Limit, quantity: QuantityName): Judged {
+function judge(value: number, limit: Limit, quantity: QuantityName, U: Measure | undefined): Judged {
 	const [atMost, atLeast] = [inSi(limit.atMost, quantity), inSi(limit.atLeast, quantity)];
-	const guard = inSi(limit.guard, differenceOf(quantity)) ?? 0;
+	const own = inSi(limit.guard, differenceOf(quantity)) ?? 0;
+	const guard = Math.max(own, inSi(U, differenceOf(quantity)) ?? 0);
 	if ([atMost, atLeast, guard].some((number) => Number.isNaN(number))) return cannotTell('the limit cannot be read');
 	// A reading passes at the limit less the guard; this is the last bit of that difference, not a concession.
 	const slack = (bound: number): number => 1e-12 * Math.max(Math.abs(bound), guard);
@@ -42,7 +44,7 @@ function judge(value: number, limit: Limit, quantity: QuantityName): Judged {
 		kind: 'outside',
 		side,
 		limit: printed(bound),
-		guard: printed(limit.guard),
+		guard: guard > own ? printed(U) : printed(limit.guard),
 	});
 	if (atMost !== undefined && !(value <= atMost - guard + slack(atMost))) return outside('at most', limit.atMost);
 	if (atLeast !== undefined && !(value >= atLeast + guard - slack(atLeast))) return outside('at least', limit.atLeast);
