@@ -2,8 +2,9 @@ import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, test } from 'vitest';
 import { utf8 } from '../../src/lib/base';
-import { parseEvents, parseTrend, type Trend } from '../../src/lib/record';
+import { parseEvents, parseTrend, type RecordEvent, type Trend } from '../../src/lib/record';
 import { verifyRecord, type Report } from '../../src/lib/verify';
+import { foreignRecord } from '../support/foreign-start-up';
 import { damaged } from '../support/make-demo-records.mjs';
 import { demoTrends } from '../support/make-demo-trends.mjs';
 
@@ -98,6 +99,17 @@ describe('the record of another site', () => {
 			documents: { plant: { site: 'Demonstration sugar works' } },
 		});
 	});
+
+	test('is what its story tells, but for its keys', async () => {
+		const told = parseEvents(await foreignRecord());
+		const kept = parseEvents(read('foreign-record.ndjson'));
+		expect(told.ok && told.value.map(withoutKeys)).toEqual(kept.ok && kept.value.map(withoutKeys));
+	});
+});
+
+const withoutKeys = ({ kind, person, device, number, entered, body }: RecordEvent): object => ({
+	...{ kind, person, device, number, entered },
+	body: kind === 'start-up opened' || kind === 'entry' ? { ...body, siteHeads: undefined } : undefined,
 });
 
 describe('the damaged record', () => {

@@ -14,7 +14,7 @@ const EVERY = 10;
 /**
  * Dead time and T90 of each analyser in seconds (as in plant.json), exchange time of the gas that it reads, standard
  * deviation and persistence of its noise in per cent of oxygen. The filter hopper mixes badly: its gas is exchanged at
- * half the rate, and a slow swirl brings richer and poorer gas past the probe.
+ * two thirds of the rate, and a slow swirl brings richer and poorer gas past the probe.
  */
 const PLACES = [
 	{ tag: 'AT-211', lag: 5, t90: 8, exchange: 936, sd: 0.05, persists: 0.3, swirl: 0 },
