@@ -79,6 +79,11 @@ describe.each(decayVectors)('$name', (vector) => {
 	});
 });
 
+/** Once found by chance: all but the first sample say the same, and values so small that their product is zero. */
+const rowsOf = (pairs: readonly (readonly [number, number])[]) => pairs.map(([t, C]) => ({ t, C }));
+const ONE_HIGH_FIRST = rowsOf([[441, 152], [224, 58], [831, 126], [92, 175], [32, 220], [714, 204], [93, 50], [748, 81], [278, 166]]); // prettier-ignore
+const OVER_AT_ONCE = rowsOf([[155, 171], [587, 104], [592, 21], [622, 74]]); // prettier-ignore
+
 describe('laws of the fit', () => {
 	const decay = fc.record({
 		floor: fc.double({ min: 0, max: 10, noNaN: true }),
@@ -108,6 +113,34 @@ describe('laws of the fit', () => {
 		within(turned.Cf, first.Cf, 1e-9);
 		within(turned.lambda * 60, first.lambda, 1e-9);
 		within(turned.bounds.Cf.high, first.bounds.Cf.high, 1e-9);
+	});
+
+	test('whatever the samples are, it answers: a curve of finite numbers, or why there is none', () => {
+		const sample = fc.record({ t: fc.integer({ min: 0, max: 900 }), C: fc.integer({ min: 0, max: 250 }) });
+		fc.assert(
+			fc.property(fc.array(sample, { maxLength: 40 }), fc.constantFrom('alike', 'independent'), (rows, neighbours) => {
+				const fit = decayFit(
+					rows.map(({ t, C }) => ({ t, C: C / 10 })),
+					{ neighbours },
+				);
+				if (!fit.ok) return;
+				const { Cf, C0, lambda, SSR, bounds } = fit.value;
+				expect([Cf, C0, lambda, SSR].every(Number.isFinite)).toBe(true);
+				const sides = [bounds.Cf.low, bounds.Cf.high, bounds.lambda.low, bounds.lambda.high];
+				expect(sides.every((side) => side === null || Number.isFinite(side))).toBe(true);
+				expect(bounds.Cf.low ?? Cf).toBeLessThanOrEqual(Cf);
+				expect(bounds.Cf.high ?? Cf).toBeGreaterThanOrEqual(Cf);
+				expect(bounds.lambda.low ?? lambda).toBeLessThanOrEqual(lambda);
+				expect(bounds.lambda.high ?? lambda).toBeGreaterThanOrEqual(lambda);
+			}),
+			{
+				numRuns: 300,
+				examples: [
+					[ONE_HIGH_FIRST, 'independent'],
+					[OVER_AT_ONCE, 'independent'],
+				],
+			},
+		);
 	});
 
 	test('the profile bound of the floor reaches further than its straight bound on the side of the start', () => {

@@ -24,6 +24,10 @@ test('a root at an end is that end', () => {
 	expect(findRoot((x) => x - 3, 0, 3)).toBe(3);
 });
 
+test('values whose product is too small for the processor still have their signs', () => {
+	expect(findRoot((x) => 1e-200 * (x - 0.25), 0, 1)).toBeCloseTo(0.25, 12);
+});
+
 test('two ends of equal sign are a mistake of the program', () => {
 	expect(() => findRoot((x) => x * x + 1, -1, 1)).toThrow(RangeError);
 });

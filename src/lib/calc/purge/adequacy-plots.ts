@@ -50,7 +50,7 @@ function curvesOf(
 		},
 	});
 	return [
-		...(fit.t === null ? [] : [band(fit.t)]),
+		...[fit.t === null ? [] : band(fit.t)].flat().filter(({ y }) => y.every(Number.isFinite)),
 		points,
 		{ id: `${place.tag} fit`, label, kind: 'line', ...decides, x, y },
 		{ id: `${place.tag} floor`, label, kind: 'line', x: [from, at.judgedAt], y: [fit.Cf, fit.Cf] },

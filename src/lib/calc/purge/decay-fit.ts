@@ -71,16 +71,20 @@ export function decayFit(
 	if (rate === 'high') return fail({ kind: 'too-coarse' });
 	const { Cf, C0, SSR } = freeFloor(data, rate);
 	if (!(C0 > Cf)) return fail({ kind: 'not-falling' });
+	// So steep that carried back to t = 0 it leaves all numbers behind.
+	if (!Number.isFinite(C0)) return fail({ kind: 'too-coarse' });
 
 	const curve = (t: number): number => Cf + (C0 - Cf) * Math.exp(-rate * t);
 	const residuals = data.map(({ t, C }) => C - curve(t));
 	const q = options.neighbours === 'alike' ? inflation(residuals) : 1;
 	const degrees = n / q - 3;
 	const s = Math.sqrt(SSR / (n - 3));
-	const gradient = (t: number): Vector => gradientAt(t, { Cf, C0, lambda: rate });
+	// From the first sample on: far from t = 0 the derivatives by C0 and λ would look the same.
+	const first = data[0]?.t ?? 0;
+	const gradient = (t: number): Vector => gradientAt(t - first, { height: curve(first) - Cf, lambda: rate });
 	const spread = inverse(data.map(({ t }) => gradient(t)));
 	const error = (g: Vector): number => s * Math.sqrt(q * form(spread, g));
-	const standardErrors = { Cf: error([1, 0, 0]), C0: error([0, 1, 0]), lambda: error([0, 0, 1]) };
+	const standardErrors = { Cf: error([1, 0, 0]), C0: error(gradient(0)), lambda: error([0, 0, 1]) };
 
 	const p = options.confidence ?? 0.95;
 	// So alike that fewer than four count as independent: a curve without bounds.
@@ -96,7 +100,7 @@ export function decayFit(
 			lambda: around(rate, standardErrors.lambda),
 		},
 		bounds: {
-			Cf: t === null ? OPEN : floorBounds(data, { Cf, rate, allowed }),
+			Cf: t === null ? OPEN : floorBounds(data, { Cf, rate, allowed, step: t * standardErrors.Cf }),
 			lambda: t === null ? OPEN : rateBounds(data, { rate, allowed }),
 		},
 		curveError: (at) => error(gradient(at)),
@@ -189,7 +193,10 @@ function rateBounds(data: readonly DecaySample[], fit: { rate: number; allowed: 
 }
 
 /** For each floor the rate is fitted anew: a floor is ruled out only when no rate goes with it. */
-function floorBounds(data: readonly DecaySample[], fit: { Cf: number; rate: number; allowed: number }): Bounds {
+function floorBounds(
+	data: readonly DecaySample[],
+	fit: { Cf: number; rate: number; allowed: number; step: number },
+): Bounds {
 	const limits = limitsOf(data);
 	const tooMuch = (Cf: number): number => {
 		const rate = nearRate((lambda) => heldFloor(data, lambda, Cf).slope, fit.rate, limits);
@@ -197,8 +204,9 @@ function floorBounds(data: readonly DecaySample[], fit: { Cf: number; rate: numb
 	};
 	const all = data.map(({ C }) => C);
 	const reach = Math.max(...all) - Math.min(...all);
+	const begin = Math.min(Math.max(fit.step, reach / 1e4), reach / 4);
 	const edge = (sign: -1 | 1): number | null => {
-		for (let [from, step] = [0, reach / 1000]; step < 100 * reach; [from, step] = [step, 2 * step]) {
+		for (let [from, step] = [0, begin]; step < 100 * reach; [from, step] = [step, 2 * step]) {
 			if (tooMuch(fit.Cf + sign * step) > 0) return findRoot(tooMuch, fit.Cf + sign * from, fit.Cf + sign * step);
 		}
 		return null;
@@ -218,10 +226,10 @@ function nearRate(slope: (lambda: number) => number, from: number, { low, high }
 type Vector = readonly [number, number, number];
 type Matrix = readonly [Vector, Vector, Vector];
 
-/** Derivatives of C(t) by Cf, C0, λ: one row of J. */
-function gradientAt(t: number, { Cf, C0, lambda }: { Cf: number; C0: number; lambda: number }): Vector {
+/** Derivatives of C(t) by floor, start and λ: one row of J. */
+function gradientAt(t: number, { height, lambda }: { height: number; lambda: number }): Vector {
 	const e = Math.exp(-lambda * t);
-	return [-Math.expm1(-lambda * t), e, -(C0 - Cf) * t * e];
+	return [-Math.expm1(-lambda * t), e, -height * t * e];
 }
 
 /** (JᵀJ)⁻¹ by cofactors; each parameter is first measured in its own size, so that a small λ does no harm. */

@@ -16,7 +16,8 @@ export function findRoot(f: (x: number) => number, a: number, b: number): number
 	let [f1, f2] = [f(b), f(a)];
 	if (f1 === 0) return x1;
 	if (f2 === 0) return x2;
-	if (!(f1 * f2 < 0)) throw new RangeError(`no change of sign between ${a} and ${b}`);
+	// Not by their product: two very small values multiply to zero.
+	if (Number.isNaN(f1 + f2) || f1 > 0 === f2 > 0) throw new RangeError(`no change of sign between ${a} and ${b}`);
 	let part = 0.5;
 	for (let i = 0; i < 200; i++) {
 		const x = x1 + part * (x2 - x1);

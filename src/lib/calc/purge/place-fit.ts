@@ -49,6 +49,8 @@ export function placeFit(
 	const fit = decayFit(used, { neighbours: 'alike' });
 	if (!fit.ok) return fit;
 	const { lambda, Cf, C0, curveError } = fit.value;
+	// Carried back to the begin it would be more than all of the gas: over before the second sample.
+	if (C0 > 1) return fail({ kind: 'too-coarse' });
 	if (lambda * tau >= TOO_CLOSE_TO_ANALYSER) return fail({ kind: 'rate-of-the-analyser', lambdaTau: lambda * tau });
 	const last = used.at(-1)?.t ?? 0;
 	return ok({
