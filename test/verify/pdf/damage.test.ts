@@ -133,6 +133,58 @@ test('a stream whose length is the length of another stream is refused', () => {
 	expect(stopped(appendUnsigned(dossier, turned))?.facts.expected).toBe('the length of a stream');
 });
 
+/** A whole file of these objects, the first of which is the root: what a stranger may hand in. */
+function fileOf(...bodies: readonly string[]): Bytes {
+	let text = '%PDF-1.7\n';
+	const entries = bodies.map((body, i) => {
+		const entry = `${String(text.length).padStart(10, '0')} 00000 n \n`;
+		text += `${i + 1} 0 obj\n${body}\nendobj\n`;
+		return entry;
+	});
+	const xref = `xref\n0 ${bodies.length + 1}\n0000000000 65535 f \n${entries.join('')}`;
+	return bytesOf(
+		`${text}${xref}trailer\n<< /Size ${bodies.length + 1} /Root 1 0 R >>\nstartxref\n${text.length}\n%%EOF\n`,
+	);
+}
+
+const attachmentsOf = (bytes: Bytes) => readPdf(bytes).checks.find(({ name }) => name === 'attachments');
+
+test('[PS8] a tree of attachments that grows into itself is refused, and not climbed for ever', () => {
+	const kids = `<< /Kids [${'2 0 R '.repeat(50)}] >>`;
+	const circle = fileOf('<< /Names << /EmbeddedFiles 2 0 R >> >>', kids);
+	expect(attachmentsOf(circle)).toMatchObject({ outcome: 'failed', facts: { expected: 'a tree' } });
+	const twice = fileOf('<< /Names << /EmbeddedFiles << /Kids [2 0 R 2 0 R] >> >> >>', '<< /Names [] >>');
+	expect(attachmentsOf(twice)).toMatchObject({ outcome: 'failed', facts: { expected: 'a tree' } });
+});
+
+test('[PS8] two attachments of one name, one without bytes and one packed in an unknown way are refused', () => {
+	const naming = (specifications: string) => `<< /Names << /EmbeddedFiles << /Names [${specifications}] >> >> >>`;
+	const good = '(a) << /UF (a.txt) /EF << /F 2 0 R >> >>';
+	expect(readPdf(fileOf(naming(good), stream('hello'))).attachments).toEqual([
+		{ name: 'a.txt', mediaType: undefined, bytes: utf8('hello') },
+	]);
+	expect(attachmentsOf(fileOf(naming(`${good} ${good}`), stream('hello')))?.facts.expected).toBe(
+		'one attachment named a.txt',
+	);
+	expect(attachmentsOf(fileOf(naming(good.replace('2 0 R', '9 0 R')), stream('hello')))?.facts.expected).toBe(
+		'the bytes of a.txt',
+	);
+	const packed = fileOf(naming(good), stream('hello', '/Filter /LZWDecode'));
+	expect(attachmentsOf(packed)?.facts.expected).toBe('FlateDecode and no other filter');
+	const torn = fileOf(naming(good), stream('hello', '/Filter /FlateDecode'));
+	expect(attachmentsOf(torn)?.facts.expected).toMatch(/^packed bytes/);
+});
+
+test('[PS1] a file with a form of another kind, or without fields, is no dossier', async () => {
+	const none = await judge(fileOf('<< /Type /Catalog >>'));
+	expect(none).toMatchObject({ class: 'TOTAL-FAILED', signatures: [] });
+	expect(none.checks.find(({ name }) => name === 'a signature is asked for')).toMatchObject({ outcome: 'failed' });
+	const text = fileOf('<< /AcroForm << /Fields [2 0 R] >> >>', '<< /FT /Tx /T (name) >>');
+	expect(
+		readPdf(text).checks.find(({ name }) => name === 'form holds signature fields and nothing else')?.outcome,
+	).toBe('failed');
+});
+
 test('[PS1] a program, a launch, a form script and encryption are named with the object that holds them', () => {
 	for (const [body, what] of [
 		['<< /S /JavaScript /JS (app.alert) >>', 'JS in object 90, JavaScript in object 90'],

@@ -20,7 +20,7 @@ export function readAttachments(file: PdfFile): Result<readonly Attachment[], Da
 		const names = resolve(file, get(root, 'Names'), 0);
 		const found = new Map<string, Attachment>();
 		let room = MAX_BYTES;
-		for (const specification of leaves(file, get(names, 'EmbeddedFiles'), 0)) {
+		for (const specification of leaves(file, get(names, 'EmbeddedFiles'), new Set())) {
 			const attachment = readFile(file, specification, room);
 			if (found.has(attachment.name)) damaged(specification.from, `one attachment named ${attachment.name}`);
 			found.set(attachment.name, attachment);
@@ -31,17 +31,19 @@ export function readAttachments(file: PdfFile): Result<readonly Attachment[], Da
 }
 
 /** Unpacked, all attachments together; some hundreds of photos. */
-const MAX_BYTES = 512 * 1024 * 1024;
-const MAX_DEPTH = 8;
+const MAX_BYTES = 256 * 1024 * 1024;
+/** A tree of ours has one branch. */
+const MAX_BRANCHES = 1000;
 
-/** File specifications of a name tree (ISO 32000-1, 7.9.6). */
-function leaves(file: PdfFile, node: PdfValue | undefined, depth: number): readonly PdfValue[] {
+/** File specifications of a name tree (ISO 32000-1, 7.9.6), in which no branch is its own twig or that of two. */
+function leaves(file: PdfFile, node: PdfValue | undefined, seen: Set<number>): readonly PdfValue[] {
 	const dict = resolve(file, node, 0);
 	if (dict === undefined) return [];
-	if (depth > MAX_DEPTH) return damaged(dict.from, `a tree of at most ${MAX_DEPTH} levels`);
+	if (seen.has(dict.from) || seen.size > MAX_BRANCHES) return damaged(dict.from, 'a tree');
+	seen.add(dict.from);
 	const pairs = itemsOf(resolve(file, get(dict, 'Names'), 0));
 	const here = pairs.filter((_, i) => i % 2 === 1).map((value) => resolve(file, value, 0));
-	const below = itemsOf(resolve(file, get(dict, 'Kids'), 0)).flatMap((kid) => leaves(file, kid, depth + 1));
+	const below = itemsOf(resolve(file, get(dict, 'Kids'), 0)).flatMap((kid) => leaves(file, kid, seen));
 	return [...here.filter((value) => value !== undefined), ...below];
 }
 

@@ -14,16 +14,16 @@ export type SignatureField = {
 export function signatureFields(file: PdfFile, revision: number): readonly SignatureField[] | undefined {
 	const root = resolve(file, get(file.revisions[revision]?.trailer, 'Root'), revision);
 	const form = resolve(file, get(root, 'AcroForm'), revision);
-	const fields: SignatureField[] = [];
+	const fields = new Map<string, SignatureField>();
 	for (const item of itemsOf(resolve(file, get(form, 'Fields'), revision))) {
 		const object = objectIn(file, refOf(item), revision);
 		const name = textOf(get(object?.value, 'T'));
 		if (object?.value.type !== 'dict' || name === undefined || nameOf(get(object.value, 'FT')) !== 'Sig')
 			return undefined;
-		if (object.value.entries.has('Kids') || fields.some((field) => field.name === name)) return undefined;
-		fields.push({ name, object: object.number, dict: object.value, value: refOf(get(object.value, 'V')) });
+		if (object.value.entries.has('Kids') || fields.has(name)) return undefined;
+		fields.set(name, { name, object: object.number, dict: object.value, value: refOf(get(object.value, 'V')) });
 	}
-	return fields;
+	return [...fields.values()];
 }
 
 /** The appearance stream that a field shows in a state. */

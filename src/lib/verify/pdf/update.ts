@@ -121,7 +121,7 @@ function trailerTrespasses(file: PdfFile, revision: number): readonly string[] {
 	const unknown = [...now.trailer.entries.keys()].filter((key) => !TRAILER_KEYS.includes(key));
 	if (unknown.length > 0) trespasses.push(`its trailer holds /${unknown.join(', /')}`);
 	if (numberOf(get(now.trailer, 'Prev')) !== before.xrefAt) trespasses.push('its trailer leaves out a state');
-	const highest = Math.max(0, ...(file.objects[revision]?.keys() ?? []));
+	const highest = [...(file.objects[revision]?.keys() ?? [])].reduce((max, number) => Math.max(max, number), 0);
 	const size = Math.max(sizeOf(file, revision - 1), highest + 1);
 	if (sizeOf(file, revision) !== size)
 		trespasses.push(`its trailer counts ${sizeOf(file, revision)} objects, not ${size}`);
