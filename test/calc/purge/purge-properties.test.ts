@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
+import { canonicalJson, type Json } from '../../../src/lib/base';
 import type { CalcResult } from '../../../src/lib/calc';
 import { ANALYSERS, purgeInputs, reasons, run, word, type Inputs, type Scene } from './purge-scene';
 
@@ -156,6 +157,26 @@ test('the same inputs give the same answer, and the inputs are left alone', () =
 			expect(inputs).toEqual(before);
 		}),
 		{ numRuns: 10 },
+	);
+});
+
+test('whatever the analysers read, the answer is a verdict in plain JSON', () => {
+	const odd = fc.array(fc.tuple(fc.integer({ min: -300, max: 3000 }), fc.integer({ min: -20, max: 260 })), {
+		maxLength: 60,
+	});
+	fc.assert(
+		fc.property(fc.tuple(odd, odd, odd, odd), fc.constantFrom(0, 20, 600), (series, T90) => {
+			const inputs = purgeInputs({ minutes: 30 }, 60);
+			ANALYSERS.forEach(({ tag }, i) => {
+				const rows = series[i]!;
+				inputs.series[tag] = { unit: '%', t: rows.map(([t]) => t), values: rows.map(([, C]) => C / 10) };
+				inputs.places[i]!.T90 = T90;
+			});
+			const result = run(inputs);
+			// Refuses NaN, infinities and undefined by throwing.
+			expect(canonicalJson(result as unknown as Json)).toContain('"verdict"');
+		}),
+		{ numRuns: 100 },
 	);
 });
 
