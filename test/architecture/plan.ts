@@ -33,7 +33,7 @@ const RANKS = [
 	['procedure'],
 	['record'],
 	['drawing', 'wording'],
-	['dossier', 'verify', 'protocol', 'store'],
+	['dossier', 'verify', 'protocol', 'store', 'demo'],
 	['sync', 'server', 'ui'],
 	['app'],
 ] as const;
@@ -59,11 +59,12 @@ export const MAY_IMPORT: Readonly<Record<Room | 'cli' | 'routes' | 'outside', re
 	// Never dossier: the writer's bug must not be invisible to the reader.
 	verify: upTo(4),
 	protocol: ['base', 'identity', 'record'],
+	demo: upTo(5),
 	store: ['base', 'identity', 'plant', 'procedure', 'record'],
 	sync: ['base', 'identity', 'record', 'protocol', 'store'],
 	server: ['base', 'identity', 'procedure', 'record', 'protocol', 'verify'],
 	ui: [...upTo(5), 'verify'],
-	app: [...upTo(5), 'dossier', 'verify', 'protocol', 'store', 'sync'],
+	app: [...upTo(5), 'dossier', 'verify', 'protocol', 'store', 'demo', 'sync'],
 	routes: ROOMS,
 	cli: upTo(6).filter((room) => room !== 'store'),
 	// start.mjs, build.mjs, service-worker.ts: no room at all.

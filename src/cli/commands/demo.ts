@@ -3,9 +3,9 @@ import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { toPem } from '../../lib/identity';
 import { standing } from '../../lib/record';
-import { closedDossier } from '../demo/close';
-import { DemoStopped } from '../demo/must';
-import { playStartUp } from '../demo/play';
+import { closedDossier } from '../close-dossier';
+import { DemoStopped } from '../../lib/demo';
+import { playStartUp } from '../../lib/demo';
 import type { Command, Outcome, Terminal } from '../command';
 
 /** Beside the built program, and beside its source when a test runs it there. */

@@ -1,4 +1,4 @@
-import type { Result } from '../../lib/base';
+import type { Result } from '../base';
 
 /** The value of a step of the demonstration that cannot fail unless its data are wrong: then the run stops and says so. */
 export function must<T>(result: Result<T, unknown>, what = 'the demonstration'): T {

@@ -1,7 +1,7 @@
-import type { Plant } from '../../lib/plant';
-import type { Procedure } from '../../lib/procedure';
-import { gateSheet, headsOf, statementOf, standing, type BodyOf, type Statement, type Trend } from '../../lib/record';
-import { DECLARATION, releaseStatement, sealStatement, STATEMENT_VERSION } from '../../lib/wording';
+import type { Plant } from '../plant';
+import type { Procedure } from '../procedure';
+import { gateSheet, headsOf, statementOf, standing, type BodyOf, type Statement, type Trend } from '../record';
+import { DECLARATION, releaseStatement, sealStatement, STATEMENT_VERSION } from '../wording';
 import type { Person } from './demo-site';
 import type { Around } from './entry-body';
 import type { Act, PlayFile } from './play-file';

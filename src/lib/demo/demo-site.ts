@@ -12,7 +12,7 @@ import {
 	type Role,
 	type SigningKey,
 	type SiteRootFile,
-} from '../../lib/identity';
+} from '../identity';
 import { must } from './must';
 
 export type Person = { readonly person: string; readonly name: string; readonly roles: readonly Role[] };

@@ -1,9 +1,9 @@
-import { buildDossier, INKS, signIncrement, type RequiredSignature } from '../../lib/dossier';
-import { sha256Hex, readableCode } from '../../lib/base';
-import { openGateKey, sign } from '../../lib/identity';
-import { inOrder, printEventLine } from '../../lib/record';
-import { BUILD, type PlayedStartUp } from './play';
-import { must } from './must';
+import { buildDossier, INKS, signIncrement, type RequiredSignature } from '../lib/dossier';
+import { sha256Hex, readableCode } from '../lib/base';
+import { openGateKey, sign } from '../lib/identity';
+import { inOrder, printEventLine } from '../lib/record';
+import { BUILD, type PlayedStartUp } from '../lib/demo';
+import { must } from '../lib/demo';
 
 type Bytes = Uint8Array<ArrayBuffer>;
 

@@ -1,8 +1,8 @@
-import { sha256Hex } from '../../lib/base';
-import { runCalculator, type CalcResult } from '../../lib/calc';
-import type { Plant } from '../../lib/plant';
-import { bindInputs, fieldsOf, type Procedure, type Step } from '../../lib/procedure';
-import { judgeEntry, lookupIn, type BodyOf, type RecordEvent, type Standing, type Trend } from '../../lib/record';
+import { sha256Hex } from '../base';
+import { runCalculator, type CalcResult } from '../calc';
+import type { Plant } from '../plant';
+import { bindInputs, fieldsOf, type Procedure, type Step } from '../procedure';
+import { judgeEntry, lookupIn, type BodyOf, type RecordEvent, type Standing, type Trend } from '../record';
 import { DemoStopped, must } from './must';
 import type { Act } from './play-file';
 

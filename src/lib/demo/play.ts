@@ -1,8 +1,8 @@
 import * as v from 'valibot';
-import { canonicalJson, sha256Hex, toBase64, fromUtf8, type Json } from '../../lib/base';
-import { signTrustList } from '../../lib/identity';
-import { parsePlant, type Plant } from '../../lib/plant';
-import { LIBRARY, parseProcedure, type Procedure, type Step } from '../../lib/procedure';
+import { canonicalJson, sha256Hex, toBase64, fromUtf8, type Json } from '../base';
+import { signTrustList } from '../identity';
+import { parsePlant, type Plant } from '../plant';
+import { LIBRARY, parseProcedure, type Procedure, type Step } from '../procedure';
 import {
 	headsOf,
 	millis,
@@ -12,7 +12,7 @@ import {
 	type RecordEvent,
 	type Standing,
 	type Trend,
-} from '../../lib/record';
+} from '../record';
 import { DemoSite, type Person } from './demo-site';
 import { attachment, calculatedBody, enteredBody, type Around, type Files } from './entry-body';
 import { answer, handOver, refuse, release, seal, withdrawEvent, type Stage } from './gate-acts';

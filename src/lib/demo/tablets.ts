@@ -1,5 +1,5 @@
-import { utf8 } from '../../lib/base';
-import { makeEntryKey, openGateKey, sign, toJwk, type SigningKey } from '../../lib/identity';
+import { utf8 } from '../base';
+import { makeEntryKey, openGateKey, sign, toJwk, type SigningKey } from '../identity';
 import {
 	headCode,
 	headsOf,
@@ -12,8 +12,8 @@ import {
 	type EventKind,
 	type EventOf,
 	type RecordEvent,
-} from '../../lib/record';
-import type { Procedure } from '../../lib/procedure';
+} from '../record';
+import type { Procedure } from '../procedure';
 import type { DemoSite } from './demo-site';
 import { must } from './must';
 
