@@ -12,7 +12,7 @@ import {
 	type Standing,
 } from '../../src/lib/record';
 import { verifyRecord, type Report } from '../../src/lib/verify';
-import { playStartUp, type PlayedStartUp } from '../../src/cli/demo/play';
+import { playStartUp, type PlayedStartUp } from '../../src/lib/demo';
 
 const FOLDER = join(import.meta.dirname, '../../static/demo');
 let played: PlayedStartUp;

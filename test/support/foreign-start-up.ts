@@ -1,6 +1,6 @@
 import { utf8 } from '../../src/lib/base';
 import { printEventLine } from '../../src/lib/record';
-import { playStartUp } from '../../src/cli/demo/play';
+import { playStartUp } from '../../src/lib/demo';
 
 /**
  * A short start-up of another invented site, with its own people and its own root: what somebody hands in who belongs
