@@ -3,7 +3,9 @@
 import { writeFileSync } from 'node:fs';
 import { withChromium } from './chromium.mjs';
 
-const frame = (drawing) => `<body style="margin:0;background:#d9d6cc"><svg width="640" height="480" viewBox="0 0 640 480"
+const frame = (
+	drawing,
+) => `<body style="margin:0;background:#d9d6cc"><svg width="640" height="480" viewBox="0 0 640 480"
 	fill="none" stroke="#14171a" stroke-width="5" font-family="sans-serif">${drawing}
 	<text x="20" y="462" font-size="22" fill="#14171a" stroke="none">Demonstration picture, drawn. No real plant.</text></svg></body>`;
 
