@@ -1,5 +1,7 @@
 import type { Result } from '../base';
+import { processSketch, type Drawing, type Timeline } from '../drawing';
 import type { DossierError, DossierInput } from './input';
+import { measure } from './fonts/faces';
 import { Flow } from './layout/flow';
 import { frameShapes } from './layout/title-block';
 import type { Sheet } from './layout/sheet';
@@ -16,7 +18,9 @@ import { refusals } from './pages/refusals';
 import { signatures } from './pages/signatures';
 import { timeline } from './pages/timeline';
 import { writePdf } from './pdf/write-pdf';
+import { seenAtEnd } from './story/last-seen';
 import { storyOf, type Story } from './story/story';
+import { timelineOf } from './story/timeline';
 
 /**
  * The dossier of one sealed start-up, before anybody signed it: the base revision, to which each closing signature adds one
@@ -42,23 +46,36 @@ export async function buildDossier(input: DossierInput): Promise<Result<Uint8Arr
 	});
 }
 
-/** Laid out until every pointer names the sheet that it means: twice, unless pointing moved something. */
-function layOut(story: Story, manifest: Manifest): readonly Sheet[] {
-	let anchors = new Anchors();
-	for (let round = 0; round < 4; round++) {
-		const flow = new Flow();
-		const next = new Anchors(anchors.marked);
-		chapters(flow, story, manifest, next);
-		if (next.settled || round === 3) return flow.sheets;
-		anchors = next;
-	}
-	throw new Error('unreachable');
+/** What is drawn once, however often the sheets are laid out. */
+type Pictures = { readonly sketch: Drawing; readonly timeline: Timeline };
+
+function picturesOf(story: Story): Pictures {
+	const { readings, positions } = seenAtEnd(story);
+	const look = { width: 1200, lettering: 16, measure, readings, positions };
+	return { sketch: processSketch(story.input.plant, look), timeline: timelineOf(story) };
 }
 
-function chapters(flow: Flow, story: Story, manifest: Manifest, anchors: Anchors): void {
+/** Laid out until every pointer names the sheet that it means: twice, unless pointing moved something. */
+function layOut(story: Story, manifest: Manifest): readonly Sheet[] {
+	const pictures = picturesOf(story);
+	let anchors = new Anchors();
+	let flow = new Flow();
+	for (let round = 0; round < ROUNDS; round++) {
+		flow = new Flow();
+		const next = new Anchors(anchors.marked);
+		chapters(flow, story, { manifest, pictures, anchors: next });
+		if (next.settled) break;
+		anchors = next;
+	}
+	return flow.sheets;
+}
+
+type Beside = { readonly manifest: Manifest; readonly pictures: Pictures; readonly anchors: Anchors };
+
+function chapters(flow: Flow, story: Story, { manifest, pictures, anchors }: Beside): void {
 	cover(flow, story);
-	holdPoints(flow, story, anchors);
-	timeline(flow, story);
+	holdPoints(flow, story, anchors, pictures.sketch);
+	timeline(flow, story, pictures.timeline);
 	for (const { number } of story.input.procedure.gates) {
 		const before = flow.sheets.length;
 		gatePages(flow, story, number);
@@ -71,6 +88,8 @@ function chapters(flow: Flow, story: Story, manifest: Manifest, anchors: Anchors
 	instruments(flow, story);
 	signatures(flow, story, manifest);
 }
+
+const ROUNDS = 4;
 
 function framed(sheets: readonly Sheet[], story: Story, manifest: Manifest): readonly Sheet[] {
 	const { say, input, moments, sealed } = story;

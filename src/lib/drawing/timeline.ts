@@ -49,7 +49,7 @@ export function drawTimeline(
 	const y = (at: number): number =>
 		top + (Math.min(Math.max(at, line.from), line.to) - line.from) * ((height - top - size) / span);
 	const left = measure('00:00', 'text', size) + size;
-	const pitch = Math.min(size * 2.4, (width * 0.45) / Math.max(1, line.gates.length));
+	const pitch = Math.min(size * 2.8, (width * 0.45) / Math.max(1, line.gates.length));
 	const right = left + pitch * line.gates.length;
 	const x = (gate: number): number => left + pitch * (gate + 0.5);
 	return {
@@ -63,7 +63,7 @@ export function drawTimeline(
 			...line.gates.map(({ name }, i) =>
 				lettering(name, { x: x(i), y: size * 1.2 }, { size: size * 1.1, voice: 'title', anchor: 'middle' }),
 			),
-			...notes(line, y, right, { width, height, size }),
+			...notes(line, y, right, { width, height, size, measure }),
 		],
 	};
 }
@@ -114,10 +114,15 @@ function gateLine(
 	];
 }
 
-type Sheet = { readonly width: number; readonly height: number; readonly size: number };
+type Sheet = { readonly width: number; readonly height: number; readonly size: number; readonly measure: Measure };
 
 /** What happened, in words beside the lines: pushed apart, smaller when there are many, each led to its moment. */
-function notes(line: Timeline, y: ToY, right: number, { height, size: usual }: Sheet): readonly Shape[] {
+function notes(
+	line: Timeline,
+	y: ToY,
+	right: number,
+	{ width, height, size: usual, measure }: Sheet,
+): readonly Shape[] {
 	const sorted = [...line.notes].sort((a, b) => a.at - b.at);
 	const size = Math.min(usual, (height - usual * 3) / Math.max(1, sorted.length) / 1.3);
 	const lines = apart(
@@ -128,10 +133,15 @@ function notes(line: Timeline, y: ToY, right: number, { height, size: usual }: S
 	const [bend, edge] = [right + usual * 0.6, right + usual * 2.4];
 	return sorted.flatMap(({ at, text, tone, mark }, i) => {
 		const level = lines[i] ?? y(at);
+		const x = edge + size * (mark === undefined ? 0.4 : 1.6);
 		return [
 			stroke([...segment(right, y(at), bend, y(at)), ['L', edge, level]], { pen: 'hair', tone: 'soft' }),
 			...(mark === undefined ? [] : markShapes(mark, { x: edge + size * 0.75, y: level }, size * 0.8)),
-			lettering(text, { x: edge + size * (mark === undefined ? 0.4 : 1.6), y: level + size * 0.35 }, { size, tone }),
+			lettering(
+				text,
+				{ x, y: level + size * 0.35 },
+				{ size: size * Math.min(1, (width - x) / Math.max(1, measure(text, 'text', size))), tone },
+			),
 		];
 	});
 }

@@ -4,7 +4,8 @@ import { COVER } from './en/cover';
 import { ERRORS } from './en/errors';
 import { FINDINGS } from './en/findings';
 import { GATES } from './en/gates';
+import { NOTES } from './en/notes';
 import { STATES } from './en/states';
 
 /** English. Every message under a key that says where it stands; another language has the same keys. */
-export const EN = { ...STATES, ...COVER, ...GATES, ...CHAPTERS, ...CLOSING, ...ERRORS, ...FINDINGS } as const;
+export const EN = { ...STATES, ...COVER, ...GATES, ...CHAPTERS, ...CLOSING, ...ERRORS, ...FINDINGS, ...NOTES } as const;

@@ -20,7 +20,7 @@ export function momentsAt(utcOffsetMinutes: number, say: Say): Moments {
 	return {
 		clock,
 		day,
-		short: (instant) => `${day(instant)} ${clock(instant)}`,
+		short: (instant) => `${day(instant)}\u00a0${clock(instant)}`,
 		full: (instant) => {
 			const text = local(instant);
 			return `${dayOf(text, say, 'long')} ${text.slice(0, 4)}, ${clock(instant)} ${text.slice(-6)}`;

@@ -1,24 +1,75 @@
 import type { Json } from '../base';
 import type { CalcNote } from '../calc';
+import { fromSi, shownUnit, type QuantityName } from '../quantity';
+import { NOTES } from './en/notes';
+import { STATES } from './en/states';
+import { duration, type Moments } from './moment';
+import { capitalised } from './say';
+import { printInstant, millis } from '../record';
+
+/** What a moment of a series means on the clock: the instant of its zero, when the calculation knows it. */
+export type SeriesClock = { readonly zero: string | undefined; readonly moments: Moments };
 
 /**
- * A calculator's note as a line of text: what it is called, then its facts with their names, so that nothing a calculator
- * said is lost. Facts are in SI units, as in the stored result.
+ * A calculator's note as a sentence of the catalogue; where there is none, as its name and facts in SI units, so that
+ * nothing a calculator said is lost.
  */
-export function sayNote({ kind, level: _level, criterion, ...facts }: CalcNote): string {
+export function sayNote(note: CalcNote, clock?: SeriesClock): string {
+	const { kind, level: _level, criterion, ...facts } = note;
+	const head = typeof criterion === 'string' && criterion.length === 1 ? `(${criterion}) ` : '';
+	const key = `note.${kind}`;
+	const filled = isNote(key) ? fill(NOTES[key], note, clock) : undefined;
+	return head + (filled ?? plainly(kind, facts));
+}
+
+const isNote = (key: string): key is keyof typeof NOTES => Object.hasOwn(NOTES, key);
+
+/** @returns undefined when the note lacks a fact that the sentence needs: then it is said plainly */
+function fill(template: string, note: CalcNote, clock: SeriesClock | undefined): string | undefined {
+	const missing = [...template.matchAll(PLACEHOLDER)].some(([, name = '']) => (note[name] ?? null) === null);
+	if (missing) return undefined;
+	return template.replace(PLACEHOLDER, (_, name: string, form: string | undefined) =>
+		shownFact(note[name] ?? null, form, clock),
+	);
+}
+
+const PLACEHOLDER = /\{(\w+)(?::([\w%]+))?\}/g;
+
+function shownFact(fact: Json, form: string | undefined, clock: SeriesClock | undefined): string {
+	if (form === 'basis' && (fact === 'wet' || fact === 'dry')) return STATES[`basis.${fact}`];
+	if (typeof fact !== 'number' || form === undefined) return sayFact(fact);
+	if (form === 'time') return duration(fact * 1000);
+	if (form === 'clock')
+		return clock?.zero === undefined
+			? `${sayNumber(fact)}\u00a0s`
+			: clock.moments.clock(printInstant(millis(clock.zero) + fact * 1000, 0));
+	const shown = FORMS[form];
+	if (shown === undefined) return sayNumber(fact);
+	const value = fromSi(fact, shown.quantity, shown.unit);
+	return `${sayNumber(value.ok ? value.value : fact)}\u00a0${shownUnit(shown.unit)}`;
+}
+
+const FORMS: { readonly [form: string]: { readonly quantity: QuantityName; readonly unit: string } } = {
+	'%': { quantity: 'fraction', unit: '%' },
+	flow: { quantity: 'volume-flow-normal-wet', unit: 'm3(n)/h' },
+	m3n: { quantity: 'volume-normal', unit: 'm3(n)' },
+	degC: { quantity: 'temperature', unit: 'degC' },
+	K: { quantity: 'temperature-difference', unit: 'K' },
+};
+
+function plainly(kind: string, facts: { readonly [name: string]: Json }): string {
 	const said = Object.entries(facts).flatMap(([name, value]) =>
 		value === null ? [] : [`${spaced(name)} ${sayFact(value)}`],
 	);
-	const title = capital(spaced(kind));
-	const head = typeof criterion === 'string' ? `(${criterion}) ${title}` : title;
-	return said.length === 0 ? `${head}.` : `${head}: ${said.join(', ')}.`;
+	const title = capitalised(spaced(kind));
+	return said.length === 0 ? `${title}.` : `${title}: ${said.join(', ')}.`;
 }
 
 function sayFact(value: Json): string {
 	if (typeof value === 'number') return sayNumber(value);
 	if (typeof value === 'string') return value;
 	if (typeof value === 'boolean' || value === null) return String(value);
-	if (Array.isArray(value)) return value.map(sayFact).join(' / ');
+	if (Array.isArray(value)) return value.map(sayFact).join(', ');
 	return Object.entries(value)
 		.map(([name, part]) => `${spaced(name)} ${sayFact(part)}`)
 		.join(' ');
@@ -28,11 +79,13 @@ function sayFact(value: Json): string {
 export function sayNumber(value: number): string {
 	if (!Number.isFinite(value)) return String(value);
 	const size = Math.abs(value);
-	if (size !== 0 && (size < 1e-3 || size >= 1e7)) return value.toExponential(3).replace('-', '−').replace('+', '');
-	return String(Number(value.toPrecision(4))).replace('-', '−');
+	if (size !== 0 && (size < 1e-3 || size >= 1e7)) return value.toExponential(3).replaceAll('-', '−').replace('+', '');
+	const [whole = '', decimals] = String(Number(value.toPrecision(4)))
+		.replace('-', '−')
+		.split('.');
+	const grouped = /\d{5}/.test(whole) ? whole.replaceAll(/\B(?=(?:\d{3})+$)/g, '\u00a0') : whole;
+	return decimals === undefined ? grouped : `${grouped}.${decimals}`;
 }
 
 const spaced = (name: string): string =>
 	name.replaceAll('-', ' ').replace(/([a-z])([A-Z])/g, (_, a: string, b: string) => `${a} ${b.toLowerCase()}`);
-
-const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

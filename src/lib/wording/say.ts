@@ -15,6 +15,10 @@ export const LANGUAGES = { en: EN } as const satisfies {
 
 export const isKey = (text: string): text is Key => Object.hasOwn(EN, text);
 
+/** The facts that a message needs. */
+export const asksFor = (key: Key): readonly string[] =>
+	[...EN[key].matchAll(/\{(\w+)\}/g)].map(([, name = '']) => name);
+
 /** A message that asks for a fact which is not given is a programmer's error, not a sentence with a hole. */
 export function speaker(language: Language): Say {
 	const words: { readonly [key in Key]: string } = LANGUAGES[language];
@@ -28,3 +32,6 @@ export function speaker(language: Language): Say {
 
 /** "1 deviation", "3 deviations": the message of the number, from a pair of keys. */
 export const counted = (say: Say, one: Key, other: Key, n: number): string => say(n === 1 ? one : other, { n });
+
+/** As the first word of a line. */
+export const capitalised = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

@@ -22,10 +22,20 @@ export type Column = {
 };
 
 export type Cell =
-	string | { readonly text: string; readonly voice?: Voice; readonly tone?: Tone; readonly mark?: Mark };
+	| string
+	| {
+			readonly text: string;
+			readonly voice?: Voice;
+			readonly tone?: Tone;
+			readonly mark?: Mark;
+			/** How many columns it may run over; the next of them are empty. */
+			readonly span?: number;
+	  };
 
 export type Row = {
 	readonly cells: readonly Cell[];
+	/** Belongs to the row above: no rule between them. */
+	readonly joined?: true;
 	/** Kept and overruled: smaller and grey. */
 	readonly superseded?: true;
 	/** Under the row, in small type, from the second column on. */
@@ -45,7 +55,12 @@ export function table(flow: Flow, columns: readonly Column[], rows: readonly Row
 	const edges = edgesOf(columns);
 	flow.keep(HEAD + 2 * LEAD + 2 * PAD);
 	drawHead(flow, columns, edges);
-	for (const row of rows) drawRow(flow, columns, edges, row);
+	rows.forEach((row, i) => {
+		if (i > 0 && row.joined !== true) flow.rule();
+		const next = rows[i + 1];
+		drawRow(flow, columns, edges, row, next?.joined === true ? LEAD : 0);
+	});
+	flow.rule();
 	flow.space(3);
 }
 
@@ -75,21 +90,23 @@ function drawHead(flow: Flow, columns: readonly Column[], edges: readonly Edge[]
 	flow.space(HEAD);
 }
 
-function drawRow(flow: Flow, columns: readonly Column[], edges: readonly Edge[], row: Row): void {
+/** @param tail height of what must not be parted from the row */
+function drawRow(flow: Flow, columns: readonly Column[], edges: readonly Edge[], row: Row, tail: number): void {
 	const size = row.superseded === true ? SMALL : SIZE;
 	const lead = row.superseded === true ? SMALL_LEAD : LEAD;
-	const cells = columns.map((column, i): SetCell =>
-		setCell(row.cells[i] ?? '', column, edges[i] ?? { x: 0, width: 0 }, row),
-	);
+	const cells = columns.map((column, i) => setCell(row.cells[i] ?? '', column, edges.slice(i), row));
 	const notes = setNotes(row, edges);
 	const count = Math.max(1, ...cells.map(({ lines }) => lines.length));
-	const height = count * lead + notes.length * SMALL_LEAD + 2 * PAD;
 	const again = () => {
+		flow.rule();
 		flow.keep(Infinity);
 		drawHead(flow, columns, edges);
 	};
-	if (height > flow.room && height <= AREA.height - HEAD) again();
-	flow.space(PAD);
+	// The row and the first of its notes stay together; a long tail of notes may go over.
+	const together = count * lead + Math.min(notes.length, 2) * SMALL_LEAD + 2 * PAD + tail;
+	const moves = together > flow.room && together <= AREA.height - HEAD;
+	if (moves) again();
+	flow.space(row.joined === true && !moves ? 0 : PAD);
 	for (let line = 0; line < count; line++) {
 		if (lead > flow.room) again();
 		flow.draw(...cells.flatMap((cell) => lineShapes(cell, line, flow.y, { size, lead })));
@@ -101,16 +118,19 @@ function drawRow(flow: Flow, columns: readonly Column[], edges: readonly Edge[],
 		flow.space(SMALL_LEAD);
 	}
 	flow.space(PAD);
-	flow.rule();
 }
 
-function setCell(cell: Cell, column: Column, { x, width }: Edge, { superseded }: Row): SetCell {
+/** @param edges those of the cell's column and of all after it */
+function setCell(cell: Cell, column: Column, edges: readonly Edge[], { superseded }: Row): SetCell {
 	const {
 		text,
 		voice = column.voice ?? 'text',
 		tone,
 		mark,
+		span = 1,
 	} = typeof cell === 'string' ? ({ text: cell } as Exclude<Cell, string>) : cell;
+	const x = edges[0]?.x ?? 0;
+	const width = edges.slice(0, span).reduce((sum, edge) => sum + edge.width, 0);
 	const size = superseded === true ? SMALL : SIZE;
 	const indent = mark === undefined ? 0 : MARK;
 	const lines = wrap(text, width - 2 * SIDE - indent, { voice, size });
@@ -133,7 +153,7 @@ function setNotes({ notes = [] }: Row, edges: readonly Edge[]): readonly SetCell
 	const x = (edges[1]?.x ?? AREA.x) + SIDE;
 	const right = AREA.x + AREA.width - SIDE;
 	return notes.flatMap((note) => {
-		const { text, voice = 'text' as Voice, tone = 'soft' as Tone } = typeof note === 'string' ? { text: note } : note;
+		const { text, voice = 'text', tone = 'soft' } = typeof note === 'string' ? { text: note } : note;
 		return wrap(text, right - x, { voice, size: SMALL }).map((line) => ({
 			x,
 			right,

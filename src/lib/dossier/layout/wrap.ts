@@ -4,7 +4,7 @@ import { measure } from '../fonts/faces';
 export type Setting = { readonly voice: Voice; readonly size: number };
 
 /**
- * A text as lines no wider than a column. It breaks at spaces and after hyphens; a word that is wider than the column, such
+ * A text as lines no wider than a column. It breaks at spaces and at hyphens between letters, never inside a tag or a number; a word that is wider than the column, such
  * as a hash, breaks anywhere. Line ends in the text are kept; tabs and other blank control characters count as spaces.
  */
 export function wrap(text: string, width: number, setting: Setting): readonly string[] {
@@ -18,7 +18,7 @@ function wrapParagraph(text: string, width: number, { voice, size }: Setting): r
 	const fits = (line: string): boolean => measure(line, voice, size) <= width;
 	const lines: string[] = [];
 	let line = '';
-	for (const piece of text.match(/[^ -]*-+|[^ -]+| /g) ?? []) {
+	for (const piece of text.match(/ |[^ ]+?[A-Za-z]-(?=[A-Za-z])|[^ ]+/g) ?? []) {
 		if (fits((line + piece).trimEnd())) {
 			line += piece;
 			continue;

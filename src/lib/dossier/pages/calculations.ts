@@ -1,46 +1,57 @@
-import { lettering, MARK_TONES, markShapes, rectangle, stroke, drawPlot, type Mark } from '../../drawing';
-import type { CalcNote, CalcResult, Plot } from '../../calc';
+import { drawPlot } from '../../drawing';
+import type { CalcResult, Plot } from '../../calc';
 import { millis } from '../../record';
-import { sayNote } from '../../wording';
+import { capitalised, sayNote, type SeriesClock } from '../../wording';
 import { measure } from '../fonts/faces';
 import { AREA } from '../layout/sheet';
 import { STYLES, type Flow } from '../layout/flow';
 import { table } from '../layout/table';
-import { wrap } from '../layout/wrap';
-import { calculationsOf, type ToldCalculation } from '../story/calculations';
+import { calculationsOf, zeroOf, type ToldCalculation } from '../story/calculations';
 import { coverageOf } from '../story/coverage';
 import { shownPlot } from '../story/shown-plot';
-import { outputOf, shownValue } from '../story/shown-value';
 import type { Story } from '../story/story';
 import type { Anchors } from './anchors';
+import { inputTable, resultTables, sources, wholeTable } from './calculation-tables';
+import { verdict } from './verdict';
 
-/** Every calculation that was entered: its verdict, its picture, its numbers with their uncertainty, and what it was made from. */
+/**
+ * Every calculation that was entered. The one that counted at the seal in full: verdict, picture, numbers with their
+ * uncertainty, and what it was made from; what came before it and what was no proof with its verdict or its numbers.
+ */
 export function calculations(flow: Flow, story: Story, anchors: Anchors): void {
 	const told = calculationsOf(story);
-	for (const each of told.filter(({ counts, entry }) => counts || entry.body.outcome === 'pass')) {
+	for (const each of told.filter(({ counts }) => counts)) {
+		const before = flow.sheets.length;
 		calculation(flow, story, each);
-		anchors.mark(`calculation ${each.entry.id}`, flow.sheets.length);
+		anchors.mark(`calculation ${each.entry.id}`, before + 1);
 	}
-	const tries = told.filter(({ counts, entry }) => !counts && entry.body.outcome !== 'pass');
-	if (tries.length === 0) return;
-	flow.newSheet(story.say('calc.tries'));
-	flow.head(story.say('calc.tries caption'), story.say('calc.tries'));
-	for (const { entry, result } of tries) {
-		flow.heading(
-			story.say('calc.try', {
-				step: entry.body.step,
-				title: story.names.stepTitle(entry.body.step),
-				at: story.moments.short(entry.observed ?? entry.entered),
-			}),
-			{ style: STYLES.subheading },
-		);
-		verdict(flow, story, result);
-	}
+	const others = told.filter(({ counts }) => !counts);
+	if (others.length === 0) return;
+	flow.newSheet(story.say('calc.others'));
+	flow.head(story.say('calc.others caption'), story.say('calc.others'));
+	for (const other of others) inShort(flow, story, other);
 }
 
-function calculation(flow: Flow, story: Story, { entry, result, counts }: ToldCalculation): void {
+function inShort(flow: Flow, story: Story, { entry, result }: ToldCalculation): void {
 	const { say, names, moments } = story;
-	const title = names.stepTitle(entry.body.step);
+	const { step, outcome } = entry.body;
+	const facts = {
+		step,
+		title: names.stepTitle(step),
+		at: moments.short(entry.observed ?? entry.entered),
+		person: names.person(entry.person),
+		outcome: say(`outcome.${outcome}`),
+	};
+	flow.heading(say('calc.in short', facts), { style: STYLES.subheading, with: 100 });
+	verdict(flow, story, result);
+	const [first] = result.plots ?? [];
+	if (result.verdict !== undefined && first !== undefined) picture(flow, story, first, result);
+	else wholeTable(flow, story, result);
+}
+
+function calculation(flow: Flow, story: Story, { entry, result }: ToldCalculation): void {
+	const { say, names, moments } = story;
+	const title = capitalised(names.stepTitle(entry.body.step));
 	flow.newSheet(say('calc.sheet', { step: entry.body.step, title }));
 	flow.head(
 		say('calc.caption', {
@@ -48,89 +59,48 @@ function calculation(flow: Flow, story: Story, { entry, result, counts }: ToldCa
 			calc: result.calc,
 			at: moments.short(entry.observed ?? entry.entered),
 			person: names.person(entry.person),
-			place: say(counts ? 'calc.counted' : 'calc.earlier'),
+			place: say('calc.counted'),
 		}),
 		title,
 	);
 	verdict(flow, story, result);
 	for (const plot of result.plots ?? []) picture(flow, story, plot, result);
-	const coverage = coverageOf(entry, story);
-	if (coverage !== undefined) {
-		flow.heading(say('coverage.title'), { with: 60 });
-		table(
-			flow,
-			[
-				{ head: say('coverage.volume'), width: 150 },
-				{ head: say('coverage.how') },
-				{ head: say('coverage.seen'), width: 70 },
-			],
-			coverage,
-		);
-		flow.write(say('coverage.note'), STYLES.note);
-	}
-	numbers(flow, story, result);
-	const notes = result.notes;
-	if (notes.length > 0) {
-		flow.heading(say('calc.notes'), { style: STYLES.subheading });
-		for (const note of notes) flow.write(sayNote(note), STYLES.note);
-	}
-	flow.heading(say('calc.made from'), { style: STYLES.subheading });
-	flow.write(say('calc.inputs', { constants: result.constants }), STYLES.note);
-	flow.write(inputsText(result.inputs), STYLES.note);
+	coverage(flow, story, entry);
+	resultTables(flow, story, result);
+	notes(flow, story, result);
+	inputTable(flow, story, result);
+	sources(flow, story, result);
 }
 
-const WORDS: { readonly [word in NonNullable<CalcResult['verdict']>['word']]: Mark } = {
-	adequate: 'stands',
-	'not yet': 'not yet',
-	'cannot be shown': 'failed',
-};
-
-/** The verdict in a frame, with every reason; under an adequate one what it does not mean. */
-function verdict(flow: Flow, { say }: Story, { verdict: judged, scope }: CalcResult): void {
-	const outside = scope === 'outside scope' ? say('calc.outside scope') : undefined;
-	if (judged === undefined) {
-		if (outside !== undefined) flow.write(outside, { ...STYLES.body, tone: 'bad' });
-		return;
-	}
-	const mark = WORDS[judged.word];
-	const reasons = judged.reasons.map((reason: CalcNote) => sayNote(reason));
-	const lines = [
-		...(judged.word === 'adequate' ? [say('calc.adequate')] : reasons),
-		...(outside === undefined ? [] : [outside]),
-	];
-	const left = 40;
-	const set = lines.flatMap((line) => wrap(line, AREA.width - left - 14, STYLES.body));
-	const height = 30 + set.length * STYLES.body.lead;
-	flow.block(height, ({ x, y, width }) => [
-		stroke(rectangle({ x, y, width, height: height - 6 }), { pen: 'line' }),
-		...markShapes(mark, { x: x + 21, y: y + 17 }, 15),
-		lettering(
-			say(`verdict.${judged.word}`),
-			{ x: x + left, y: y + 19 },
-			{ size: 12, voice: 'title', tone: MARK_TONES[mark] === 'soft' ? 'ink' : MARK_TONES[mark] },
-		),
-		...set.map((line, i) =>
-			lettering(line, { x: x + left, y: y + 32 + i * STYLES.body.lead }, { size: STYLES.body.size }),
-		),
-	]);
-	flow.space(4);
+function coverage(flow: Flow, story: Story, entry: ToldCalculation['entry']): void {
+	const rows = coverageOf(entry, story);
+	if (rows === undefined) return;
+	const { say } = story;
+	flow.heading(say('coverage.title'), { with: 60 });
+	table(
+		flow,
+		[
+			{ head: say('coverage.volume'), width: 170 },
+			{ head: say('coverage.how') },
+			{ head: say('coverage.seen'), width: 70 },
+		],
+		rows,
+	);
+	flow.write(say('coverage.note'), STYLES.note);
 }
 
-function picture(flow: Flow, story: Story, plot: Plot, { inputs }: CalcResult): void {
-	const zero =
-		typeof inputs === 'object' && inputs !== null && 'zero' in inputs && typeof inputs.zero === 'string'
-			? inputs.zero
-			: undefined;
+function picture(flow: Flow, story: Story, plot: Plot, result: CalcResult): void {
+	const zero = zeroOf(result);
 	const clock =
-		zero === undefined || Number.isNaN(millis(zero)) || !['s', 'min', 'h'].includes(plot.x.unit)
+		zero === undefined || !CLOCK_UNITS.includes(plot.x.unit)
 			? undefined
 			: { zero: millis(zero), utcOffsetMinutes: story.input.plant.utcOffsetMinutes };
-	const steps = plot.curves.every(({ kind }) => kind === 'steps');
-	flow.heading(plot.title, { with: steps ? 150 : 290, style: STYLES.subheading });
+	const isStrip = plot.curves.every(({ kind }) => kind === 'steps');
+	flow.heading(plot.title, { with: isStrip ? 140 : 290, style: STYLES.subheading });
 	flow.figure(
-		drawPlot(shownPlot(plot), {
+		drawPlot(shownPlot(plot, { isClock: clock !== undefined }), {
 			width: AREA.width,
-			height: steps ? 128 : 272,
+			height: isStrip ? 118 : 276,
 			lettering: 8.4,
 			measure,
 			...(clock === undefined ? {} : { x: { clock } }),
@@ -138,36 +108,11 @@ function picture(flow: Flow, story: Story, plot: Plot, { inputs }: CalcResult): 
 	);
 }
 
-function numbers(flow: Flow, { say }: Story, { calc, values }: CalcResult): void {
-	flow.heading(say('calc.numbers'), { with: 60 });
-	table(
-		flow,
-		[
-			{ head: say('calc.name'), width: 120 },
-			{ head: say('calc.means') },
-			{ head: say('calc.value'), width: 130, align: 'end', voice: 'strong' },
-		],
-		Object.entries(values).map(([name, value]) => {
-			const output = outputOf(calc, name);
-			return {
-				cells: [
-					name,
-					[output?.symbol, output?.means].filter((part) => part !== undefined).join(', '),
-					shownValue(value, output?.quantity ?? ''),
-				],
-			};
-		}),
-	);
+function notes(flow: Flow, story: Story, result: CalcResult): void {
+	if (result.notes.length === 0) return;
+	const clock: SeriesClock = { zero: zeroOf(result), moments: story.moments };
+	flow.heading(story.say('calc.notes'), { style: STYLES.subheading });
+	for (const note of result.notes) flow.write(sayNote(note, clock), STYLES.note);
 }
 
-/** Inputs as they are stored; a series is told by its length, since the record holds it whole. */
-function inputsText(inputs: CalcResult['inputs']): string {
-	return JSON.stringify(inputs, (_, value: unknown) =>
-		Array.isArray(value) && value.length > 8 && value.every((item) => typeof item === 'number')
-			? `${value.length} numbers`
-			: value,
-	)
-		.replaceAll(/[{}"]/g, '')
-		.replaceAll(',', ', ')
-		.replaceAll(':', ': ');
-}
+const CLOCK_UNITS = ['s', 'min', 'h'];

@@ -20,7 +20,7 @@ export function cover(flow: Flow, story: Story): void {
 	flow.write(lead(story), STYLES.lead);
 	flow.space(7);
 	const captions = new Map(releasesOf(story).map(({ gate, caption }) => [gate, caption]));
-	const drawn = ladder(input.procedure, end, { width: 700, rungHeight: 48, captions, measure });
+	const drawn = ladder(input.procedure, end, { width: 700, rungHeight: 54, captions, measure });
 	flow.figure(drawn, AREA.width - 6);
 	flow.space(9);
 	const { result, because } = processResult(story);
@@ -54,8 +54,8 @@ function lead(story: Story): string {
 						released: end.gates.filter(({ state }) => state === 'released').length,
 						all: end.gates.length,
 					}),
-					from: moments.short(first.at),
-					to: moments.full(last.at).replace(/ [+-]\d\d:\d\d$/, ''),
+					from: withoutOffset(moments.full(first.at)),
+					to: withoutOffset(moments.full(last.at)),
 				}),
 		say('cover.steps', {
 			proved: counted(say, 'count.step proved', 'count.steps proved', proved),
@@ -70,6 +70,8 @@ function lead(story: Story): string {
 	];
 	return sentences.join(' ');
 }
+
+const withoutOffset = (moment: string): string => moment.replace(/ [+-]\d\d:\d\d$/, '');
 
 function startType({ end, input }: Story): string {
 	return input.procedure.startTypes.find(({ id }) => id === end.startType)?.title ?? end.startType ?? '';

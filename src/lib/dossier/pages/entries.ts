@@ -1,5 +1,6 @@
+import { capitalised } from '../../wording';
 import { shownState } from '../story/state-words';
-import { entriesUnder, type ToldEntry, type ToldStep } from '../story/entries';
+import { entriesUnder, type Found, type ToldEntry, type ToldStep } from '../story/entries';
 import type { Story } from '../story/story';
 import { STYLES, type Flow } from '../layout/flow';
 import { table, type Cell, type Column, type Row } from '../layout/table';
@@ -20,55 +21,46 @@ export function entriesOfGate(flow: Flow, story: Story, gate: number): void {
 const columnsOf = ({ say }: Story): readonly Column[] => [
 	{ head: say('entries.step'), width: 36, voice: 'strong' },
 	{ head: say('entries.what') },
-	{ head: say('entries.value'), width: 82, align: 'end', voice: 'strong' },
-	{ head: say('entries.limit'), width: 88 },
-	{ head: say('entries.seen'), width: 57 },
-	{ head: say('entries.with'), width: 44 },
-	{ head: say('entries.state'), width: 64 },
+	{ head: say('entries.value'), width: 76, align: 'end', voice: 'strong' },
+	{ head: say('entries.limit'), width: 100 },
+	{ head: say('entries.seen'), width: 63 },
+	{ head: say('entries.with'), width: 46 },
+	{ head: say('entries.state'), width: 62 },
 ];
 
 function rowsOf({ step, standing, entries }: ToldStep, story: Story): readonly Row[] {
-	const [newest, ...others] = entries;
-	const state = shownState(standing, story);
-	if (newest === undefined) return [{ cells: [step.id, step.title, '', '', '', '', state] }];
-	const earlier = (newest.place === 'counts' ? others : entries).map((entry) => ({
-		text: story.say('entries.before', { what: inOneLine(entry, story) }),
-	}));
-	const [first, ...more] = newest.place === 'counts' ? newest.found : [];
-	const seen = newest.place === 'counts' ? story.moments.short(newest.event.observed ?? newest.event.entered) : '';
-	const only = first !== undefined && more.length === 0 && (first.what === '' || first.what === step.title);
-	const titleRow: Row = {
+	const counting = entries.find(({ place }) => place === 'counts');
+	const earlier = entries
+		.filter((entry) => entry !== counting)
+		.map((entry) => story.say('entries.before', { what: inOneLine(entry, story) }));
+	const found = counting?.found ?? [];
+	const [only] = found.length === 1 ? found : [];
+	const inTitle = only !== undefined && (only.what === '' || only.what === step.title) ? only : undefined;
+	const seen = counting === undefined ? '' : story.moments.short(counting.event.observed ?? counting.event.entered);
+	const notes = [...(counting === undefined ? [] : [aboutEntry(counting, story)]), ...earlier];
+	const title: Row = {
 		cells: [
 			step.id,
-			{ text: step.title, voice: 'strong' },
-			only ? first.value : '',
-			only ? first.limit : '',
+			{ text: capitalised(step.title), voice: 'strong', span: inTitle === undefined ? 3 : 1 },
+			inTitle?.value ?? '',
+			inTitle?.limit ?? '',
 			seen,
-			only ? first.instrument : '',
-			state,
+			inTitle?.instrument ?? '',
+			shownState(standing, story),
 		],
-		...(newest.place === 'counts' && (only || first === undefined)
-			? { notes: [aboutEntry(newest, story), ...earlier] }
-			: newest.place === 'counts'
-				? {}
-				: { notes: earlier }),
 	};
-	if (newest.place !== 'counts' || only || first === undefined) return [titleRow];
-	return [
-		titleRow,
-		...newest.found.map(({ what, value, limit, instrument, fails }, i): Row => {
-			const shown: Cell = fails === true ? { text: value, voice: 'strong', tone: 'bad' } : value;
-			const last = i === newest.found.length - 1;
-			return {
-				cells: ['', what, shown, limit, '', instrument, ''],
-				...(last ? { notes: [aboutEntry(newest, story), ...earlier] } : {}),
-			};
-		}),
-	];
+	const rows: readonly Row[] = [title, ...(inTitle === undefined ? found.map(foundRow) : [])];
+	return rows.map((row, i) => (i === rows.length - 1 && notes.length > 0 ? { ...row, notes } : row));
+}
+
+function foundRow({ what, value, limit, instrument, fails }: Found): Row {
+	const shown: Cell = fails === true ? { text: value, voice: 'strong', tone: 'bad' } : value;
+	const wide = value === '' && limit === '' ? { text: what, span: 4 } : what;
+	return { joined: true, cells: ['', wide, shown, limit, '', instrument, ''] };
 }
 
 /** Who, on which tablet, when it was typed in, and everything said with it. */
-function aboutEntry({ event, lateMinutes }: ToldEntry, { say, names, moments }: Story): string {
+function aboutEntry({ event, found, lateMinutes }: ToldEntry, { say, names, moments }: Story): string {
 	const { body, person, device, entered } = event;
 	const readBy = [
 		...new Set(
@@ -83,7 +75,7 @@ function aboutEntry({ event, lateMinutes }: ToldEntry, { say, names, moments }: 
 		...(readBy.length === 0 ? [] : [say('entries.read by', { people: readBy.join(', ') })]),
 		...(body.from === undefined ? [] : [say('entries.from', { from: moments.short(body.from) })]),
 		...(body.flow === undefined ? [] : [say('entries.flow', { flow: body.flow })]),
-		...(body.limit === undefined ? [] : [body.limit]),
+		...(body.limit === undefined || found.some(({ limit }) => limit !== '') ? [] : [body.limit]),
 		...(body.reason === undefined ? [] : [say('entries.reason', { reason: body.reason })]),
 		...(body.note === undefined ? [] : [say('entries.remark', { note: body.note })]),
 	].join('; ');

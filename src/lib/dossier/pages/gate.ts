@@ -1,10 +1,11 @@
-import { coilShapes, lettering, rectangle, stroke, type Shape } from '../../drawing';
+import { coilShapes, lettering, segment, stroke, type Shape } from '../../drawing';
 import { millis } from '../../record';
 import { AREA } from '../layout/sheet';
 import { facts } from '../layout/facts';
 import { STYLES, type Flow } from '../layout/flow';
 import { table } from '../layout/table';
 import { wrap } from '../layout/wrap';
+import { capitalised } from '../../wording';
 import { linesOf } from '../story/act-lines';
 import { releasesOf } from '../story/releases';
 import type { Act, Story } from '../story/story';
@@ -62,12 +63,12 @@ function actOf(flow: Flow, story: Story, act: Act): void {
 		[
 			{ head: say('entries.step'), width: 36, voice: 'strong' },
 			{ head: say('entries.what') },
-			{ head: say('gate.evidence'), width: 150 },
-			{ head: say('gate.as known when signed'), width: 84 },
-			{ head: say('gate.as known at sealing'), width: 90 },
+			{ head: say('gate.evidence'), width: 158 },
+			{ head: say('gate.as known when signed'), width: 88 },
+			{ head: say('gate.as known at sealing'), width: 84 },
 		],
 		linesOf(act, story).map(({ step, title, evidence, asKnown, asSealed, learned }) => ({
-			cells: [step, title, evidence, asKnown, asSealed],
+			cells: [step, capitalised(title), evidence, asKnown, asSealed],
 			...(learned.length === 0 ? {} : { notes: learned.map((text) => ({ text, tone: 'warn' as const })) }),
 		})),
 	);
@@ -75,18 +76,22 @@ function actOf(flow: Flow, story: Story, act: Act): void {
 
 /** What was signed, word for word, in the voice that is kept for it, with a line at its side. */
 function signedText(flow: Flow, paragraphs: readonly string[]): void {
-	const indent = 14;
+	const { lead, size } = STYLES.signed;
+	const lines = paragraphs.flatMap((paragraph, i) => [
+		...(i === 0 ? [] : ['']),
+		...wrap(paragraph, AREA.width - INDENT, STYLES.signed),
+	]);
 	flow.space(3);
-	for (const paragraph of paragraphs) {
-		for (const line of wrap(paragraph, AREA.width - indent, STYLES.signed)) {
-			flow.block(STYLES.signed.lead, ({ x, y, height }): readonly Shape[] => [
-				stroke(rectangle({ x: x + 3, y, width: 0.01, height }), { pen: 'bold', tone: 'hand' }),
-				lettering(line, { x: x + indent, y: y + height / 2 + 3.5 }, { size: STYLES.signed.size, voice: 'signed' }),
-			]);
-		}
+	for (const line of lines) {
+		flow.block(line === '' ? 5 : lead, ({ x, y, height }): readonly Shape[] => [
+			stroke(segment(x + 3, y, x + 3, y + height), { pen: 'bold', tone: 'hand' }),
+			...(line === '' ? [] : [lettering(line, { x: x + INDENT, y: y + height / 2 + 3.5 }, { size, voice: 'signed' })]),
+		]);
 	}
 	flow.space(4);
 }
+
+const INDENT = 14;
 
 /** What the signer's tablet knew of the others, and what it did not. */
 function knownThen({ event, unknown }: Act, story: Story): readonly string[] {

@@ -1,15 +1,13 @@
-import { processSketch } from '../../drawing';
-import { measure } from '../fonts/faces';
+import type { Drawing } from '../../drawing';
 import { STYLES, type Flow } from '../layout/flow';
 import { table } from '../layout/table';
 import { releasesOf } from '../story/releases';
-import { seenAtEnd } from '../story/last-seen';
 import type { Story } from '../story/story';
 import type { Anchors } from './anchors';
 
 /** Who let what happen, when, and where its evidence stands; under it the plant with its last values. */
-export function holdPoints(flow: Flow, story: Story, anchors: Anchors): void {
-	const { say, moments, input } = story;
+export function holdPoints(flow: Flow, story: Story, anchors: Anchors, sketch: Drawing): void {
+	const { say, moments } = story;
 	flow.newSheet(say('hold.sheet'));
 	flow.head(say('hold.caption'), say('hold.title'));
 	table(
@@ -33,8 +31,7 @@ export function holdPoints(flow: Flow, story: Story, anchors: Anchors): void {
 	);
 	flow.space(6);
 	flow.heading(say('sketch.title'), { with: 300 });
-	const { readings, positions } = seenAtEnd(story);
-	flow.figure(processSketch(input.plant, { width: 1100, lettering: 15.5, measure, readings, positions }));
+	flow.figure(sketch);
 	flow.space(4);
 	flow.write(say('sketch.note'), STYLES.note);
 }

@@ -1,12 +1,11 @@
-import { drawTimeline } from '../../drawing';
+import { drawTimeline, type Timeline } from '../../drawing';
 import { measure } from '../fonts/faces';
 import { STYLES, type Flow } from '../layout/flow';
 import { AREA } from '../layout/sheet';
-import { timelineOf } from '../story/timeline';
 import type { Story } from '../story/story';
 
 /** The whole start-up on one sheet. */
-export function timeline(flow: Flow, story: Story): void {
+export function timeline(flow: Flow, story: Story, line: Timeline): void {
 	const { say, moments, opened, sealed } = story;
 	flow.newSheet(say('timeline.title'));
 	flow.head(
@@ -15,5 +14,5 @@ export function timeline(flow: Flow, story: Story): void {
 	);
 	flow.write(say('timeline.note'), STYLES.note);
 	flow.space(4);
-	flow.figure(drawTimeline(timelineOf(story), { width: AREA.width, height: flow.room - 4, lettering: 8.4, measure }));
+	flow.figure(drawTimeline(line, { width: AREA.width, height: flow.room - 4, lettering: 8.4, measure }));
 }

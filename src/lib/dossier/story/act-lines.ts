@@ -1,4 +1,5 @@
-import { allOf, type Cause, type StepStanding } from '../../record';
+import type { Verdict } from '../../calc';
+import { allOf, type BodyOf, type Cause, type EventOf, type StepStanding } from '../../record';
 import { sayCause } from '../../wording';
 import { boundsOf, printBounds, printReading } from './print';
 import { rejudged } from './rejudged';
@@ -38,39 +39,67 @@ export function linesOf(act: Act, story: Story): readonly ActLine[] {
 	});
 }
 
-/** The list that was signed says it in its own words; else it is put together from the entry that counted then. */
+/** What the proof said, with which instrument, by whom and when: as it was signed, or put together from its entry. */
 function evidenceOf(act: Act, step: string, then: StepStanding | undefined, story: Story): string {
-	const signed = act.event.body.statement?.list.find((line) => line.step === step);
-	if (signed?.value !== undefined) {
-		return [signed.value, signed.limit, ...(signed.instruments === undefined ? [] : [signed.instruments.join(', ')])]
-			.filter((part) => part !== undefined && part !== '')
-			.join('; ');
-	}
 	const entry = allOf(story.events, 'entry').find(({ id }) => id === then?.entry);
-	if (entry === undefined) return '';
-	const procedure = story.names.step(step);
-	const fields = procedure !== undefined && 'fields' in procedure ? (procedure.fields ?? []) : [];
-	const values = (entry.body.values ?? []).map((reading) => {
+	const signed = act.event.body.statement?.list.find((line) => line.step === step);
+	const said = signed?.value === undefined ? (entry === undefined ? [] : foundIn(entry, story)) : asSigned(signed);
+	const by =
+		entry === undefined
+			? []
+			: [`${story.names.person(entry.person)}, ${story.moments.short(entry.observed ?? entry.entered)}`];
+	return [...said, ...by].filter((line) => line !== '').join('\n');
+}
+
+type SignedLine = NonNullable<Act['event']['body']['statement']>['list'][number];
+
+const asSigned = ({ value, limit, guard, instruments }: SignedLine): readonly string[] => [
+	[value, (instruments ?? []).join(', ')].filter((part) => part !== undefined && part !== '').join('; '),
+	[limit, guard].filter((part) => part !== undefined && part !== '').join(', '),
+];
+
+function foundIn({ body }: EventOf<'entry'>, story: Story): readonly string[] {
+	const step = story.names.step(body.step);
+	const fields = step !== undefined && 'fields' in step ? (step.fields ?? []) : [];
+	const values = (body.values ?? []).map((reading) => {
 		const field = fields.find(({ id, point }) =>
 			reading.field === undefined ? point === reading.point : id === reading.field,
 		);
 		const bounds = boundsOf(field?.limit, story.input);
 		const instrument = reading.instrument ?? reading.point ?? field?.point ?? '';
 		return {
-			text: [instrument, printReading(reading, story)].filter((part) => part !== '').join(' '),
+			text: [instrument, printReading(reading, story)].filter((part) => part !== '').join('\u00a0'),
 			limit: bounds === undefined ? '' : printBounds(bounds, story),
 		};
 	});
 	const limits = [...new Set(values.map(({ limit }) => limit).filter((limit) => limit !== ''))];
-	const rows = entry.body.rows ?? [];
+	const rows = body.rows ?? [];
+	const calculation = verdictOf(body.calculation);
 	return [
 		...values.map(({ text }) => text),
+		...limits,
 		...(rows.length === 0
 			? []
 			: [story.say('gate.rows', { good: rows.filter(({ passes }) => passes).length, all: rows.length })]),
-		...limits,
-	].join('; ');
+		...(calculation === undefined ? [] : [story.say(`verdict.${calculation}`)]),
+		...withInstruments(body.instruments ?? step?.instruments ?? [], values, story),
+	];
 }
+
+/** Instruments that the values do not already name. */
+function withInstruments(
+	ids: readonly string[],
+	values: readonly { readonly text: string }[],
+	{ say }: Story,
+): readonly string[] {
+	const others = ids.filter((id) => !values.some(({ text }) => text.startsWith(id)));
+	return others.length === 0 ? [] : [say('gate.with', { instruments: others.join(', ') })];
+}
+
+const verdictOf = (calculation: BodyOf<'entry'>['calculation']): Verdict['word'] | undefined => {
+	const word = (calculation?.verdict as { readonly word?: unknown } | undefined)?.word;
+	return word === 'adequate' || word === 'not yet' || word === 'cannot be shown' ? word : undefined;
+};
 
 function learnedOf(why: readonly Cause[], entry: string | undefined, story: Story): readonly string[] {
 	return why.flatMap((cause) => [

@@ -1,6 +1,7 @@
 import * as v from 'valibot';
 import { canonicalJson } from '../../base';
 import { runCalculator, type CalcResult } from '../../calc';
+import { isInstant } from '../../identity';
 import { allOf, type EventOf } from '../../record';
 import type { Story } from './story';
 
@@ -20,12 +21,24 @@ export function calculationsOf(story: Story): readonly ToldCalculation[] {
 			.filter(({ body }) => body.step === id)
 			.sort((a, b) => b.observedAt - a.observedAt)
 			.flatMap((entry) => {
-				const stored = v.safeParse(StoredResult, entry.body.calculation);
-				if (!stored.success) return [];
+				const result = calculationOf(entry);
+				if (result === undefined) return [];
 				const counts = story.end.steps.some((step) => step.entry === entry.id);
-				return [{ entry, counts, result: withPlots(stored.output as unknown as CalcResult) }];
+				return [{ entry, counts, result: withPlots(result) }];
 			}),
 	);
+}
+
+/** The stored result of an entry, when it has the shape of one. */
+export function calculationOf({ body }: EventOf<'entry'>): CalcResult | undefined {
+	const stored = v.safeParse(StoredResult, body.calculation);
+	return stored.success ? (stored.output as unknown as CalcResult) : undefined;
+}
+
+/** The instant of a series' zero, when the calculation was told. */
+export function zeroOf({ inputs }: CalcResult): string | undefined {
+	const zero = typeof inputs === 'object' && inputs !== null && 'zero' in inputs ? inputs.zero : undefined;
+	return typeof zero === 'string' && isInstant(zero) ? zero : undefined;
 }
 
 /** A record need not keep pictures: the calculator draws them again, when it still says the same. */

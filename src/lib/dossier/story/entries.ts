@@ -115,13 +115,8 @@ function rowFound(row: NonNullable<Body['rows']>[number], step: Step, story: Sto
 }
 
 function chosen({ choice, confirmed }: Body, step: Step): readonly Found[] {
-	const line = (what: string, value: string): Found => ({ what, value, limit: '', instrument: '' });
-	return [
-		...(choice === undefined || step.kind !== 'choice'
-			? []
-			: [line('', step.options.find(({ id }) => id === choice)?.title ?? choice)]),
-		...(confirmed === undefined || step.kind !== 'confirm'
-			? []
-			: step.confirms.filter(({ id }) => confirmed.includes(id)).map(({ text }) => line(text, ''))),
-	];
+	const line = (what: string): Found => ({ what, value: '', limit: '', instrument: '' });
+	const option = step.kind === 'choice' ? step.options.find(({ id }) => id === choice)?.title : undefined;
+	const items = step.kind === 'confirm' ? step.confirms.filter(({ id }) => confirmed?.includes(id) === true) : [];
+	return [...(choice === undefined ? [] : [line(option ?? choice)]), ...items.map(({ text }) => line(text))];
 }

@@ -1,5 +1,9 @@
+import * as v from 'valibot';
+import type { CalcResult } from '../../calc';
+import { MeasureSchema, type Measure } from '../../plant';
 import { fromSi, parseNumber, quantitiesIn, shownUnit, toSi } from '../../quantity';
-import { allOf, type Cause } from '../../record';
+import { allOf, type Cause, type EventOf } from '../../record';
+import { calculationOf } from './calculations';
 import { boundsOf } from './print';
 import type { Story } from './story';
 
@@ -13,32 +17,62 @@ export function rejudged(entryId: string, finding: Finding, story: Story): reado
 	const found = allOf(story.site, 'instrument finding').find(({ id }) => id === finding.event)?.body.asFound;
 	const entry = allOf(story.events, 'entry').find(({ id }) => id === entryId);
 	if (found === undefined || entry === undefined) return [];
-	const step = story.names.step(entry.body.step);
+	return [...typedValues(entry, finding, found, story), ...calculatedValue(entry, finding, found, story)];
+}
+
+type AsFound = { readonly error: string; readonly unit: string };
+
+function typedValues(
+	{ body }: EventOf<'entry'>,
+	{ instrument }: Finding,
+	found: AsFound,
+	story: Story,
+): readonly string[] {
+	const step = story.names.step(body.step);
 	const fields = step !== undefined && 'fields' in step ? (step.fields ?? []) : [];
-	return (entry.body.values ?? [])
-		.filter(({ instrument, point }) => (instrument ?? point) === finding.instrument)
+	return (body.values ?? [])
+		.filter((reading) => (reading.instrument ?? reading.point) === instrument)
 		.flatMap(({ typed, unit, point, field }) => {
-			const corrected = withErrorOff(typed, unit, found);
-			if (corrected === undefined) return [];
-			const bounds = boundsOf(
-				fields.find((each) => (field === undefined ? each.point === point : each.id === field))?.limit,
-				story.input,
-			);
-			const limit = bounds?.atMost ?? bounds?.atLeast;
-			const said = { typed, corrected, unit: shownUnit(unit), instrument: finding.instrument };
-			return [
-				limit === undefined
-					? story.say('gate.rejudged', said)
-					: story.say('gate.rejudged against', { ...said, limit: String(limit.value) }),
-			];
+			const asked = fields.find((each) => (field === undefined ? each.point === point : each.id === field));
+			const bounds = boundsOf(asked?.limit, story.input);
+			return told({ typed, unit, limit: bounds?.atMost ?? bounds?.atLeast }, instrument, found, story);
 		});
 }
 
-function withErrorOff(
-	typed: string,
-	unit: string,
-	{ error, unit: errorUnit }: { readonly error: string; readonly unit: string },
-): string | undefined {
+/** A calculation that judged a series: the last reading of the place, against the limit that it was given. */
+function calculatedValue(
+	entry: EventOf<'entry'>,
+	{ instrument }: Finding,
+	found: AsFound,
+	story: Story,
+): readonly string[] {
+	const result = calculationOf(entry);
+	const last = result?.values[`${instrument}.last`]?.value;
+	if (result === undefined || last === undefined || last === null) return [];
+	const shown = fromSi(last, 'fraction', found.unit);
+	if (!shown.ok) return [];
+	return told({ typed: shown.value.toFixed(1), unit: found.unit, limit: limitOf(result) }, instrument, found, story);
+}
+
+function limitOf({ inputs }: CalcResult): Measure | undefined {
+	const given = v.safeParse(v.looseObject({ limit: v.looseObject({ oxygen: MeasureSchema }) }), inputs);
+	return given.success ? given.output.limit.oxygen : undefined;
+}
+
+type Rested = { readonly typed: string; readonly unit: string; readonly limit: Measure | undefined };
+
+function told({ typed, unit, limit }: Rested, instrument: string, found: AsFound, { say }: Story): readonly string[] {
+	const corrected = withErrorOff(typed, unit, found);
+	if (corrected === undefined) return [];
+	const facts = { typed, corrected, unit: shownUnit(unit), instrument };
+	return [
+		limit === undefined
+			? say('gate.rejudged', facts)
+			: say('gate.rejudged against', { ...facts, limit: String(limit.value) }),
+	];
+}
+
+function withErrorOff(typed: string, unit: string, { error, unit: errorUnit }: AsFound): string | undefined {
 	const [value, off] = [parseNumber(typed), parseNumber(error)];
 	if (!value.ok || !off.ok) return undefined;
 	const same = unit === errorUnit ? off.value : inUnit(error, errorUnit, unit);

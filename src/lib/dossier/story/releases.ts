@@ -14,7 +14,7 @@ export type Release = {
 		readonly code: string | undefined;
 	}[];
 	readonly at: string | undefined;
-	/** "Released 07:10, commissioning lead" */
+	/** "Released 15 Mar 07:10, Tove Arrensdal" */
 	readonly caption: string;
 };
 
@@ -38,10 +38,9 @@ export function releasesOf(story: Story): readonly Release[] {
 				code: event.body.statement?.code,
 			}));
 		const at = standing?.releasedAt;
-		const roles = [...new Set(by.map((each) => each.roles))].join(', ');
 		const caption =
 			state === 'released' && at !== undefined
-				? say('cover.released', { at: moments.clock(at), roles })
+				? say('cover.released', { at: moments.short(at), by: by.map(({ person }) => person).join(', ') })
 				: say(`gate.${state}`);
 		return { gate, title, holdPoint, by, at, caption };
 	});

@@ -1,9 +1,12 @@
 import type { Plot, PlotAxis } from '../../calc';
 import { fromSi, shownUnit, type QuantityName } from '../../quantity';
 
-/** A calculator's picture in the units that people of the plant read: percent, cubic metres an hour, degrees. */
-export function shownPlot(plot: Plot): Plot {
-	const [x, y] = [scaleOf(plot.x), scaleOf(plot.y)];
+/**
+ * A calculator's picture in the units that people of the plant read: percent, cubic metres an hour, minutes
+ * where the axis of time is not printed as clock time.
+ */
+export function shownPlot(plot: Plot, { isClock }: { readonly isClock: boolean }): Plot {
+	const [x, y] = [isClock ? asIs(plot.x) : scaleOf(plot.x), scaleOf(plot.y)];
 	return {
 		...plot,
 		x: x.axis,
@@ -23,9 +26,11 @@ export function shownPlot(plot: Plot): Plot {
 
 type Shown = { readonly axis: PlotAxis; readonly shown: (value: number) => number };
 
+const asIs = (axis: PlotAxis): Shown => ({ axis: { ...axis, unit: shownUnit(axis.unit) }, shown: (value) => value });
+
 function scaleOf(axis: PlotAxis): Shown {
 	const better = BETTER[axis.unit];
-	if (better === undefined) return { axis: { ...axis, unit: shownUnit(axis.unit) }, shown: (value) => value };
+	if (better === undefined) return asIs(axis);
 	return {
 		axis: { ...axis, unit: shownUnit(better.unit) },
 		shown: (value) => {
@@ -37,5 +42,6 @@ function scaleOf(axis: PlotAxis): Shown {
 
 const BETTER: { readonly [si: string]: { readonly quantity: QuantityName; readonly unit: string } } = {
 	'1': { quantity: 'fraction', unit: '%' },
+	s: { quantity: 'time', unit: 'min' },
 	'm3(n)/s': { quantity: 'volume-flow-normal-wet', unit: 'm3(n)/h' },
 };

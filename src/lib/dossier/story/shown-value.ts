@@ -9,9 +9,21 @@ export function outputOf(calc: string, name: string): OutputSpec | undefined {
 	return outputs.find((output) => output.name === name) ?? outputs.find((output) => output.name === `{place}.${last}`);
 }
 
+/** Names of results in the order in which their calculator says them; canonical JSON has put them into that of the alphabet. */
+export function inOrderOf(calc: string, names: readonly string[]): readonly string[] {
+	const outputs = (Object.hasOwn(CATALOGUE, calc) ? CATALOGUE[calc] : undefined)?.outputs.map(({ name }) => name) ?? [];
+	const place = (name: string): number => {
+		const at = outputs.findIndex((output) => output === name || output.endsWith(`.${name}`));
+		return at === -1 ? outputs.length : at;
+	};
+	return [...names].sort((a, b) => place(a) - place(b));
+}
+
 /** A number of a result as people read it, with its expanded uncertainty. */
-export function shownValue({ value, unit, U, because }: CalcValue, quantity: string): string {
+export function shownValue({ value, unit, U: given, because }: CalcValue, quantity: string): string {
 	if (value === null) return because ?? '–';
+	// What is left of an uncertainty that is none after rounding in the last bit.
+	const U = given === undefined || given < Math.abs(value) * 1e-9 ? undefined : given;
 	const plain = () => printed(sayNumber(value), U === undefined ? undefined : sayNumber(U), unit);
 	const better = isQuantityName(quantity) ? BETTER[quantity] : undefined;
 	if (better === undefined || !isQuantityName(quantity)) return plain();
@@ -37,4 +49,22 @@ const BETTER: { readonly [quantity in QuantityName]?: string } = {
 	'volume-flow-normal-wet': 'm3(n)/h',
 	'volume-flow-normal-dry': 'm3(n)/h',
 	time: 'min',
+	rate: '1/h',
+};
+
+/** A symbol as it stands in the source: Greek letters by their sign. */
+export const shownSymbol = (symbol: string): string =>
+	symbol.replace(/^(epsilon|beta|tau|rho|mu|kappa|lambda|alpha|delta|phi)(?![a-z])/, (name) => GREEK[name] ?? name);
+
+const GREEK: { readonly [name: string]: string } = {
+	alpha: 'α',
+	beta: 'β',
+	delta: 'δ',
+	epsilon: 'ε',
+	kappa: 'κ',
+	lambda: 'λ',
+	mu: 'μ',
+	phi: 'φ',
+	rho: 'ρ',
+	tau: 'τ',
 };

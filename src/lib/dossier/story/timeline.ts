@@ -1,5 +1,5 @@
 import type { Span, Timeline } from '../../drawing';
-import { allOf, millis, printInstant, standing, type Standing } from '../../record';
+import { allOf, millis, printInstant, standing, type RecordEvent, type Standing } from '../../record';
 import type { Story } from './story';
 
 /** The whole start-up as spans and moments. A release lasts until what broke it happened, however late that was typed. */
@@ -96,13 +96,35 @@ export function timelineOf(story: Story): Timeline {
 
 const instant = (at: number): string => printInstant(at, 0);
 
-/** Moments at which a gate may have changed its state, as it was recorded then. */
+/** Moments at which a gate may have changed its state, as it was recorded then: proofs in their time change none that was released. */
 function changes({ events, site, end, sealed }: Story): readonly number[] {
-	const moments = [...events, ...site]
-		.filter((event) => event.kind !== 'entry' || event.body.outcome !== 'pass' || event.observedAt !== event.enteredAt)
-		.map(({ enteredAt }) => enteredAt);
+	const moments = [...events, ...site].filter(mayChangeGates).map(({ enteredAt }) => enteredAt);
 	const gaps = end.watchGaps.flatMap(({ from, to }) => [millis(from), ...(to === null ? [] : [millis(to)])]);
 	return [...new Set([...moments, ...gaps, millis(sealed.entered)])].sort((a, b) => a - b);
+}
+
+function mayChangeGates(event: RecordEvent): boolean {
+	switch (event.kind) {
+		case 'entry':
+			return event.body.outcome !== 'pass' || event.observedAt !== event.enteredAt;
+		case 'gate released':
+		case 'gate refused':
+		case 'refusal answered':
+		case 'entry withdrawn':
+		case 'plant event begun':
+		case 'plant event ended':
+		case 'plant event corrected':
+		case 'deviation raised':
+		case 'deviation dispositioned':
+		case 'shift hand-over':
+		case 'copy received':
+		case 'clock noted':
+		case 'instrument finding':
+		case 'plant described':
+			return true;
+		default:
+			return false;
+	}
 }
 
 type Sample = { readonly at: number; readonly states: Standing['gates'] };

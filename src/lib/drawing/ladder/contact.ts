@@ -91,13 +91,19 @@ function bridge({ x, y }: Point, gap: number, height: number, through: Pen | und
 	return stroke(polyline(points), { pen: through === 'power' ? 'bold' : 'line', dash: 'bridge' });
 }
 
+/** A permissive's bubble: on a stalk where there is room for one, else close on its bars. */
 function stalk({ x, y }: Point, height: number, size: ContactSize): readonly Shape[] {
-	const radius = { large: 8, small: 5, tiny: 3.5 }[size];
-	const bottom = y - height + 3;
+	const { radius, length } = STALKS[size];
+	const foot = y - height - 1;
 	return [
-		stroke(segment(x, bottom - 4, x, bottom - 10), { pen: 'line' }),
-		stroke(circle({ x, y: bottom - 10 - radius }, radius), { pen: 'line', fill: 'paper' }),
+		...(length === 0 ? [] : [stroke(segment(x, foot, x, foot - length), { pen: 'line' })]),
+		stroke(circle({ x, y: foot - length - radius }, radius), { pen: 'line', fill: 'paper' }),
 	];
 }
 
+const STALKS = {
+	large: { radius: 8, length: 6 },
+	small: { radius: 3.6, length: 0 },
+	tiny: { radius: 2.6, length: 0 },
+} as const;
 const BRIDGE_FEET = { large: 8, small: 6, tiny: 3 } as const;

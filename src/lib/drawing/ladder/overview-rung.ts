@@ -13,8 +13,8 @@ export function overviewRung(rung: Rung, { y, rails, caption: text, height }: Pl
 	const pitch = Math.min(WIDEST, (coil.x - 40 - first) / Math.max(1, rung.contacts.length - 1));
 	const size: ContactSize = pitch < 34 ? 'tiny' : 'small';
 	const shapes: readonly Shape[] = [
-		...gateName(rung, { x: rails.left + 16, y: line - 20 }, 15.5),
-		caption(text, rung.coil, { x: rails.right - 14, y: line - 20 }, 14.5),
+		...gateName(rung, { x: rails.left + 16, y: line - NAME }, 15.5),
+		caption(text, rung.coil, { x: rails.right - 14, y: line - NAME }, 14.5),
 		...wires(rung, { line, from: rails.left, first, pitch, size, to: coil.x - RADIUS }),
 		...rung.contacts.map((contact, i) => {
 			const through = penThrough(contact.state, i < rung.passes);
@@ -26,5 +26,7 @@ export function overviewRung(rung: Rung, { y, rails, caption: text, height }: Pl
 	return { shapes, height, enters: line };
 }
 
+/** Baseline of the names over the line: clear of bars, clocks and bubbles. */
+const NAME = 24;
 const RADIUS = 13;
 const WIDEST = 40;

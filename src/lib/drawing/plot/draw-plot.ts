@@ -46,7 +46,7 @@ export function drawPlot(
 		...grid(frame),
 		...marks.flatMap((mark) => groundOf(mark, frame)),
 		...curves.flatMap((curve) => curveShapes(curve, frame, dashOf(curve, named))),
-		...marks.flatMap((mark) => linesOf(mark, frame, size)),
+		...marks.flatMap((mark) => linesOf(mark, frame, { size, measure, curves, unit: plot.y.unit })),
 		...axes(plot, frame, size, x?.clock !== undefined),
 		...endNames(named, frame, size),
 		...spots.flatMap((curve) => spotName(curve, frame, { size, measure })),
@@ -138,7 +138,7 @@ function spotName(
 		stroke(circle(at, size * 0.32), { pen: curve.decides === true ? 'bold' : 'line', fill: 'paper' }),
 		lettering(
 			curve.label,
-			{ x: at.x + (fits ? size * 0.7 : -size * 0.7), y: at.y - size * 0.5 },
+			{ x: at.x + (fits ? size * 0.7 : -size * 0.7), y: at.y + size * 1.2 },
 			{ size, voice: 'strong', anchor: fits ? 'start' : 'end' },
 		),
 	];

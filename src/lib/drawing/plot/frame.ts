@@ -22,12 +22,19 @@ export type AxisLook = {
 /** The axes of a plot, wide enough for every finite number of its curves and marks. */
 export function frameOf(plot: Plot, box: Box, look: { readonly x?: AxisLook; readonly y?: AxisLook }): Frame {
 	const xs = [...plot.curves.flatMap(({ x }) => x), ...marksOn(plot, 'x')];
-	const ys = [...plot.curves.flatMap(heights), ...marksOn(plot, 'y')];
+	const ys = [...groundOf(plot), ...plot.curves.flatMap(heights), ...marksOn(plot, 'y')];
 	return {
 		box,
 		x: scaleOf(xs, plot.x, look.x ?? {}, { start: box.x, length: box.width, count: 7, margin: 0 }),
 		y: scaleOf(ys, plot.y, look.y ?? {}, { start: box.y + box.height, length: -box.height, count: 8, margin: 0.04 }),
 	};
+}
+
+/** A flow that is drawn in steps is seen against no flow, with room above it for the names of events. */
+function groundOf(plot: Plot): readonly number[] {
+	if (!plot.curves.every(({ kind }) => kind === 'steps')) return [];
+	const highest = Math.max(0, ...plot.curves.flatMap(({ y }) => y.filter((value) => Number.isFinite(value))));
+	return [0, highest * 1.4];
 }
 
 const heights = ({ y, y2 }: PlotCurve): readonly number[] => [...y, ...(y2 ?? [])];

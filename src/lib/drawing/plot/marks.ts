@@ -1,6 +1,6 @@
-import type { PlotMark } from '../../calc';
+import type { PlotCurve, PlotMark } from '../../calc';
 import { hatching, rectangle, segment } from '../path';
-import { area, lettering, stroke, type Box, type Shape, type Tone } from '../shape';
+import { area, lettering, stroke, type Box, type Measure, type Shape, type Tone } from '../shape';
 import type { Frame } from './frame';
 
 /** What lies under the curves: the wash of an event or a hold window, and the hatched guard band. */
@@ -13,34 +13,77 @@ export function groundOf(mark: PlotMark, frame: Frame): readonly Shape[] {
 	return mark.kind === 'event' ? [area(rectangle(box), 'warn-wash')] : [];
 }
 
+export type Lettered = {
+	readonly size: number;
+	readonly measure: Measure;
+	readonly curves: readonly PlotCurve[];
+	readonly unit: string;
+};
+
 /** What lies over the curves: the limit, the edges of a window, the beginning of an event, and their names. */
-export function linesOf(mark: PlotMark, frame: Frame, size: number): readonly Shape[] {
-	const { box } = frame;
+export function linesOf(mark: PlotMark, frame: Frame, lettered: Lettered): readonly Shape[] {
 	const scale = mark.axis === 'x' ? frame.x : frame.y;
 	const edges = [mark.at, ...(mark.to === undefined ? [] : [mark.to])].map(scale.at).filter((at) => at !== undefined);
 	if (edges.length === 0) return [];
-	const across = (at: number) =>
-		mark.axis === 'y' ? segment(box.x, at, box.x + box.width, at) : segment(at, box.y, at, box.y + box.height);
-	if (mark.axis === 'y') {
-		const [at] = edges as [number];
-		const below = edges.length > 1 ? Math.max(...edges) : at;
-		const y = mark.kind === 'limit' ? at - size * 0.45 : below + size * 1.05;
-		return [
-			...(mark.kind === 'limit' ? [stroke(across(at), { pen: 'bold', tone: 'bad' })] : []),
-			...(mark.kind === 'window' ? [stroke(edges.flatMap(across), { pen: 'line', dash: 'dashed' })] : []),
-			lettering(mark.label, { x: box.x + size, y }, { size, voice: 'strong', tone: LABEL_TONES[mark.kind] }),
-		];
-	}
+	return mark.axis === 'y' ? level(mark, edges, frame, lettered) : moment(mark, edges, frame, lettered);
+}
+
+function level(
+	mark: PlotMark,
+	edges: readonly number[],
+	frame: Frame,
+	{ size, measure, curves, unit }: Lettered,
+): readonly Shape[] {
+	const { box } = frame;
+	const across = (at: number) => segment(box.x, at, box.x + box.width, at);
+	const [at = 0] = edges;
+	const y = mark.kind === 'limit' ? at - size * 0.45 : Math.max(...edges) + size * 1.05;
+	const name = [mark.label, shown(mark.at), unit].filter((part) => part !== '').join(' ');
+	const width = measure(name, 'strong', size);
+	const left = { x: box.x + size, y: y - size, width, height: size * 1.3 };
+	const right = { ...left, x: box.x + box.width - size - width };
+	const { x } = crowd(right, curves, frame) < crowd(left, curves, frame) ? right : left;
+	return [
+		...(mark.kind === 'limit' ? [stroke(across(at), { pen: 'bold', tone: 'bad' })] : []),
+		...(mark.kind === 'window' ? [stroke(edges.flatMap(across), { pen: 'line', dash: 'dashed' })] : []),
+		lettering(name, { x, y }, { size, voice: 'strong', tone: LABEL_TONES[mark.kind] }),
+	];
+}
+
+/** How many points of the curves lie where a name would stand. */
+const crowd = ({ x, y, width, height }: Box, curves: readonly PlotCurve[], frame: Frame): number =>
+	curves.reduce(
+		(count, curve) =>
+			count +
+			curve.x.filter((value, i) => {
+				const [atX, atY] = [frame.x.at(value), frame.y.at(curve.y[i] ?? Number.NaN)];
+				return atX !== undefined && atY !== undefined && atX >= x && atX <= x + width && atY >= y && atY <= y + height;
+			}).length,
+		0,
+	);
+
+function moment(
+	mark: PlotMark,
+	edges: readonly number[],
+	{ box }: Frame,
+	{ size, measure }: Lettered,
+): readonly Shape[] {
+	const across = (at: number) => segment(at, box.y, at, box.y + box.height);
 	const left = Math.min(...edges);
+	const isMoment = mark.kind === 'event' && mark.to === undefined;
+	const fits = left + size * 0.4 + measure(mark.label, 'strong', size) <= box.x + box.width;
 	return [
 		stroke(edges.flatMap(across), { pen: 'line', tone: mark.kind === 'limit' ? 'bad' : 'ink', dash: 'dashed' }),
 		lettering(
 			mark.label,
-			{ x: left + size * 0.4, y: box.y + size },
-			{ size, voice: 'strong', tone: LABEL_TONES[mark.kind] },
+			{ x: left + size * (fits ? 0.4 : -0.4), y: box.y + size },
+			{ size, voice: 'strong', tone: isMoment ? 'ink' : LABEL_TONES[mark.kind], anchor: fits ? 'start' : 'end' },
 		),
 	];
 }
+
+/** A limit is named with its value. */
+const shown = (value: number): string => String(Number(value.toPrecision(4))).replace('-', '−');
 
 function boxOf({ axis, at, to }: PlotMark, frame: Frame): Box | undefined {
 	if (to === undefined) return undefined;

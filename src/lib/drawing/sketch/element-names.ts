@@ -4,6 +4,7 @@ import { lettering, stroke, type Box, type Point, type Shape } from '../shape';
 import type { Type } from './bubble';
 import type { Item, Place } from './placing';
 
+/** Where it was seen; `word` is said in place of the position, and may be nothing. */
 export type SketchElement = { readonly position: string; readonly mark?: Mark; readonly word?: string };
 
 /** Tag and position of a valve or damper, beside it. */
@@ -46,7 +47,7 @@ export const elementNameShapes =
 			...(seen?.mark === undefined
 				? []
 				: markShapes(seen.mark, { x: box.x + small * 0.4, y: below - small * 0.34 }, small * 0.75)),
-			...(seen === undefined
+			...(seen === undefined || !hasWord(seen)
 				? []
 				: [lettering(wordOf(seen), { x: box.x + indentOf(seen, small), y: below }, { size: small, tone })]),
 		];
@@ -62,11 +63,14 @@ function leader(at: Point, { x, y, width, height }: Box, near: number): readonly
 function sizeOf({ tag, seen }: ElementName, { size, measure }: Type) {
 	const small = size * SMALL;
 	const word = seen === undefined ? 0 : indentOf(seen, small) + measure(wordOf(seen), 'text', small);
-	return { width: Math.max(measure(tag, 'strong', small), word), height: small * (seen === undefined ? 1.25 : 2.5) };
+	return { width: Math.max(measure(tag, 'strong', small), word), height: small * (hasWord(seen) ? 2.5 : 1.25) };
 }
 
 /** A position such as "automatic, open for purge" is named by its first words. */
 const wordOf = ({ word, position }: SketchElement): string => word ?? position.split(',')[0] ?? position;
+
+const hasWord = (seen: SketchElement | undefined): boolean =>
+	seen !== undefined && (wordOf(seen) !== '' || seen.mark !== undefined);
 
 const indentOf = ({ mark }: SketchElement, small: number): number => (mark === undefined ? 0 : small * 1.1);
 

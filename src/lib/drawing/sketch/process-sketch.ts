@@ -1,14 +1,15 @@
 import type { Plant } from '../../plant';
 import { roughly } from '../roughly';
-import { group, lettering, type Box, type Drawing, type Measure, type Point, type Shape } from '../shape';
+import { group, lettering, type Box, type Drawing, type Measure, type Shape } from '../shape';
 import { bubbleItem, bubbleShapes, type SketchReading, type Type } from './bubble';
 import { arrowShapes, ductShapes, hasWalls, piecesOf } from './ducts';
 import { elementNameItem, elementNameShapes, type ElementName, type SketchElement } from './element-names';
+import { around, grown } from './clash';
 import { alongDuct, elementShapes } from './elements';
 import { equipmentShapes, type Equipment } from './equipment';
 import { layoutOf, type Layout } from './layout';
 import { nameItem, nameShapes } from './names';
-import { grown, placeItems, type Obstacles } from './placing';
+import { placeItems, type Obstacles } from './placing';
 import { sheetShapes } from './sheet';
 
 export type SketchLook = {
@@ -66,7 +67,7 @@ function obstaclesOf({ equipment, elements, runs }: Layout, duct: number, sheet:
 	const along = (walled: boolean, by: number): readonly Box[] =>
 		runs
 			.filter((run) => hasWalls(run) === walled)
-			.flatMap((run) => piecesOf(run.points).map(({ a, b }) => grown(around(a, b), by)));
+			.flatMap((run) => piecesOf(run.points).map(({ a, b }) => grown(around([a, b]), by)));
 	return {
 		hard: [
 			...equipment.map(({ box }) => box),
@@ -77,13 +78,6 @@ function obstaclesOf({ equipment, elements, runs }: Layout, duct: number, sheet:
 		sheet,
 	};
 }
-
-const around = (a: Point, b: Point): Box => ({
-	x: Math.min(a.x, b.x),
-	y: Math.min(a.y, b.y),
-	width: Math.abs(a.x - b.x),
-	height: Math.abs(a.y - b.y),
-});
 
 function equipmentGroup({ id, title, outline, box, content }: Equipment, size: number): Shape {
 	const middle = { x: box.x + box.width / 2, y: box.y + box.height / 2 + size * 0.4 };

@@ -17,7 +17,7 @@ export const COVER = {
 	'cover.steps': '{proved}, {again} proved again after they had lapsed or been renewed, {deviations}.',
 	'cover.start type': 'Start type: {type}. Inert gas: {inert}.',
 	'cover.data': 'The whole record is attached to this file as data.',
-	'cover.released': 'Released {at}, {roles}',
+	'cover.released': 'Released {at}, {by}',
 	'cover.integrity': 'Integrity of this file',
 	'cover.integrity.text':
 		'Not for the file itself to say. {signatures} closing signatures belong to it; any reader of PDF signatures shows whether a byte was changed after each. Verification answers with a class: TOTAL-PASSED, INDETERMINATE or TOTAL-FAILED, and checks the signers against the site root, every event with its signature and chain, the rules of the procedure and every calculation. How: last sheets.',
