@@ -1,7 +1,7 @@
 import { BUILD } from '../../src/cli/version';
 import { buildDossier, INKS, signIncrement, type DossierInput } from '../../src/lib/dossier';
 import { sign } from '../../src/lib/identity';
-import { PlantSchema, type Plant } from '../../src/lib/plant';
+import { PlantSchema } from '../../src/lib/plant';
 import * as v from 'valibot';
 import type { SignedRecord } from './signed-record';
 import { PLANT } from './signed-record';
