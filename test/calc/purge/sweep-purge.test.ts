@@ -211,7 +211,8 @@ describe('stock', () => {
 describe('uncertainty', () => {
 	test('time and gas carry the uncertainty of flow, volume and mixing', () => {
 		const result = run({
-			mixing: { value: 0.5, unit: '1', U: 0.1 },
+			...{ temperature: { value: 0, unit: 'degC', U: 0 }, pressure: { value: 1013.25, unit: 'hPa(a)', U: 0 } },
+			...{ mixing: { value: 0.5, unit: '1', U: 0.1 }, inertOxygen: { value: 0, unit: '%', U: 0 } },
 			volumes: [{ ...base.volumes[0], volume: { value: 500, unit: 'm3', U: 25 } }],
 			inertFlow: { value: 1000, unit: 'm3(n)/h', U: 20 },
 		});
@@ -223,7 +224,11 @@ describe('uncertainty', () => {
 		expect(rows.reduce((sum, { share }) => sum + share, 0)).toBeCloseTo(1, 12);
 	});
 
-	test('a plan from bare numbers states none', () => {
+	test('a plan from bare numbers states none, and says for which inputs', () => {
+		expect(run().notes).toContainEqual({
+			...{ level: 'warning', kind: 'uncertainty-not-stated' },
+			inputs: ['temperature', 'pressure', 'inertFlow', 'mixing', 'inertOxygen', 'volumes.loop'],
+		});
 		expect(run().values.time).toEqual({ value: expect.closeTo(1800, 6) as number, unit: 's' });
 	});
 });

@@ -108,6 +108,8 @@ type Warnings = {
 	'no-dead-leg-named': unknown;
 	'stock-too-small': Stock;
 	'stock-without-repeat': Stock;
+	/** Inputs without a stated uncertainty: what rests on them has none. */
+	'uncertainty-not-stated': { readonly inputs: readonly string[] };
 	/** A person vouches for what no recorder shows. */
 	'seen-not-recorded': Stretch & { readonly record: string; readonly by: string };
 };

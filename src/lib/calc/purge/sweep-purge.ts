@@ -1,12 +1,13 @@
 import { fail, ok, type Result } from '../../base';
 import { si } from '../../quantity';
 import type { CalcResult, CalcValue, Plot, Refusal } from '../calculator';
+import { OXYGEN_IN_AIR } from '../constants';
 import { defineCalculator } from '../define-calculator';
+import { propagate, type Numbers, type Uncertain } from '../uncertainty';
 import { leakAtSuction } from './in-leakage';
 import { normalVolume } from './normal-volume';
 import type { PurgeNote } from './notes';
 import { oxygenAfter } from './oxygen-after';
-import { propagate, type Uncertain } from './propagate';
 import { refuseMeter } from './shared-inputs';
 import { sweepFields, sweepOutputs, type SweepInputs } from './sweep-inputs';
 import { sweepPlan, type SweepPlan } from './sweep-plan';
@@ -49,57 +50,74 @@ function compute(given: SweepInputs): Computed {
 	const { leak, notes } = leakNow(given);
 	const least = given.minimumVolumeChanges?.value ?? (given.outletRead === 'every volume' ? 1 : 3);
 	const inputs = uncertainInputs(given, leak);
-	const plan = (x: readonly number[]) => planOf(x, least);
-	const values = plan(inputs.map(({ x }) => x));
-	const { U, budget } = propagate(plan, inputs);
-	const left =
-		given.stock === undefined || values.stockNeeded === null
-			? null
-			: given.stock.value - given.reserve.value - values.stockNeeded;
-	const why = given.stock === undefined ? 'not-given' : 'unreachable';
+	const values = planOf(Object.fromEntries(inputs.map(({ name, value }) => [name, value])), least);
+	const { U, budget, unstated } = propagate((at) => numbersOf(planOf(at, least)), inputs);
+	const left = stockLeft(given, values);
 	return ok({
 		values: Object.fromEntries(
-			sweepOutputs.map(({ name, unit }) => {
-				const value = name === 'stockLeft' ? left : values[name];
-				const width = name === 'stockLeft' ? undefined : U[name];
-				return [name, valueOf(value, unit, name === 'stockLeft' ? why : 'unreachable', width)];
-			}),
+			sweepOutputs.map(({ name, unit }) => [
+				name,
+				name === 'stockLeft' ? { ...left, unit } : valueOf(values[name], unit, U[name]),
+			]),
 		),
 		scope: 'in scope',
-		notes: [...notes, ...sweepWarnings(given, { plan: values, least })] satisfies readonly PurgeNote[],
+		notes: [
+			...notes,
+			...sweepWarnings(given, { plan: values, least }),
+			...(unstated.length > 0 ? [{ level: 'warning', kind: 'uncertainty-not-stated', inputs: unstated } as const] : []),
+		] satisfies readonly PurgeNote[],
 		budget: budget.filter(({ output }) => ['floor', 'time', 'inertGas'].includes(output)),
 		plots: [plotOf(given, values)],
 	});
 }
 
-const valueOf = (value: number | null, unit: string, because: string, U: number | undefined): CalcValue => ({
+const valueOf = (value: number | null, unit: string, U: number | undefined): CalcValue => ({
 	...{ value, unit },
-	...(U === undefined ? {} : { U }),
-	...(value === null ? { because } : {}),
+	...(U === undefined || U === 0 ? {} : { U }),
+	...(value === null ? { because: 'unreachable' } : {}),
 });
 
-/** The whole plan from plain numbers in the order of `uncertainInputs`, so that its uncertainty is found by trying. */
-function planOf(x: readonly number[], least: number) {
-	const [T = 0, p = 0, Q_I = 0, Q_L = 0, K = 0, C0 = 0, Ci = 0, Ct = 0, ...V_i] = x;
-	const size = V_i.reduce((sum, each) => sum + each, 0);
+function stockLeft({ stock, reserve }: SweepInputs, { stockNeeded }: Plan): Omit<CalcValue, 'unit'> {
+	if (stock === undefined) return { value: null, because: 'not-given' };
+	if (stockNeeded === null) return { value: null, because: 'unreachable' };
+	return { value: stock.value - reserve.value - stockNeeded };
+}
+
+type Plan = ReturnType<typeof planOf>;
+
+/** The whole plan from plain numbers, so that its uncertainty is found by trying. */
+function planOf(at: Numbers, least: number) {
+	const { temperature: T = 0, pressure: p = 0, inertFlow: Q_I = 0, leak: Q_L = 0, mixing: K = 0 } = at;
+	const { startOxygen: C0 = 0, inertOxygen: Ci = 0, target: Ct = 0 } = at;
+	const size = Object.entries(at).reduce((sum, [name, V_i]) => (name.startsWith(VOLUME) ? sum + V_i : sum), 0);
 	const V = normalVolume(size, { temperature: si('temperature', T), pressure: si('pressure-absolute', p) });
 	const plan = sweepPlan({ V, K, Q_I, Q_L, C0, Ci, Ct, least });
 	return { normalVolume: V, ...plan, stockNeeded: plan.inertGas === null ? null : 2 * plan.inertGas };
 }
 
+const VOLUME = 'volumes.';
+
+/** What is unreachable has no uncertainty either. */
+const numbersOf = (plan: Plan): Numbers =>
+	Object.fromEntries(Object.entries(plan).flatMap(([name, value]) => (value === null ? [] : [[name, value]])));
+
 function uncertainInputs(given: SweepInputs, leak: LeakNow): readonly Uncertain[] {
+	const of = (name: string, symbol: string, unit: string, { value, U }: LeakNow): Uncertain => ({
+		...{ name, symbol, unit, value },
+		...(U === undefined ? {} : { U }),
+	});
+	const { startOxygen: start } = given;
 	return [
-		{ input: 'temperature', symbol: 'T', unit: 'K', x: given.temperature.value, U: given.temperature.U },
-		{ input: 'pressure', symbol: 'p', unit: 'Pa(a)', x: given.pressure.value, U: given.pressure.U },
-		{ input: 'inertFlow', symbol: 'Q_I', unit: 'm3(n)/s', x: given.inertFlow.value, U: given.inertFlow.U },
-		{ input: 'leak', symbol: 'Q_L', unit: 'm3(n)/s', x: leak.value, U: leak.U },
-		{ input: 'mixing', symbol: 'K', unit: '1', x: given.mixing.value, U: given.mixing.U },
-		{ input: 'startOxygen', symbol: 'C0', unit: '1', x: given.startOxygen.value, U: given.startOxygen.U },
-		{ input: 'inertOxygen', symbol: 'Ci', unit: '1', x: given.inertOxygen.value, U: given.inertOxygen.U },
-		{ input: 'target', symbol: 'Ct', unit: '1', x: given.target.value - given.guard.value },
-		...given.volumes.map(({ id, volume }) => {
-			return { input: `volumes.${id}`, symbol: 'V_i', unit: 'm3', x: volume.value, U: volume.U };
-		}),
+		of('temperature', 'T', 'K', given.temperature),
+		of('pressure', 'p', 'Pa(a)', given.pressure),
+		of('inertFlow', 'Q_I', 'm3(n)/s', given.inertFlow),
+		of('leak', 'Q_L', 'm3(n)/s', leak),
+		of('mixing', 'K', '1', given.mixing),
+		// Air is what it is; an oxygen that was read has its uncertainty stated, or not.
+		of('startOxygen', 'C0', '1', start.value === OXYGEN_IN_AIR ? { U: 0, ...start } : start),
+		of('inertOxygen', 'Ci', '1', given.inertOxygen),
+		of('target', 'Ct', '1', { value: given.target.value - given.guard.value, U: 0 }),
+		...given.volumes.map(({ id, volume }) => of(`${VOLUME}${id}`, 'V_i', 'm3', volume)),
 	];
 }
 
@@ -126,7 +144,7 @@ type LeakNow = { readonly value: number; readonly U?: number | undefined };
 
 /** The leak at the suction of this purge: more suction draws in more air, less is not credited. */
 function leakNow(given: SweepInputs): { readonly leak: LeakNow; readonly notes: readonly PurgeNote[] } {
-	if (given.leak === undefined) return { leak: { value: 0 }, notes: [] };
+	if (given.leak === undefined) return { leak: { value: 0, U: 0 }, notes: [] };
 	const { flow, suction: found = 0 } = given.leak;
 	const now = given.suction?.value;
 	if (found === 0 || now === undefined) {
