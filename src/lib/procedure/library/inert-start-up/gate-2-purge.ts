@@ -177,9 +177,11 @@ export const GATE_2_PURGE: readonly Draft[] = [
 		title: 'All places once, with the mode of each analyser',
 		does: 'Go to each analyser, see that it measures, and read it.',
 		why: 'An analyser in hold shows the best value of the night for ever.',
+		source: practice('every analyser looked at once while it measures'),
 		minutes: 5,
 		where: ANALYSERS,
-		fields: oxygen('purge-oxygen'),
+		// No limit here: a purge that is not yet adequate has failed nothing; the judgement below decides.
+		fields: oxygen(),
 		lapsedBy: LOST_PURGE,
 		redo: ANALYSER_CHECKS,
 		instruments: ANALYSERS,

@@ -73,7 +73,7 @@ export const PLACES = [
 export const ANALYSERS = PLACES.map(({ tag }) => tag);
 export const ANALYSER_CHECKS = PLACES.map(({ check }) => check);
 
-export const oxygen = (limit: string): readonly Field[] =>
+export const oxygen = (limit?: string): readonly Field[] =>
 	PLACES.map(({ tag, place }) => oxygenAt(tag, `Oxygen, ${place}`, limit));
 
 /** What ends everything that was proved about the gas in the circuit. */
