@@ -74,6 +74,24 @@ describe('laws of what stands', () => {
 		);
 	});
 
+	test('[ST2] a plant event that no step names changes nothing, whenever it happened', () => {
+		fc.assert(
+			fc.property(HISTORIES, fc.array(fc.nat(400), { maxLength: 12 }), (told, times) => {
+				const history = tellHistory(NIGHT_PROCEDURE, told);
+				const expected = statesOf(ask(history, history.end + 1));
+				// Told on a tablet of its own, entered at the end: nobody's act can have known of it.
+				for (const minute of times.filter((time) => time <= history.end))
+					history.teller.say(
+						'plant event begun',
+						{ what: 'burner-purge', begin: clock(minute), end: clock(minute) },
+						{ person: 'TechB', device: 'T-9', entered: history.end },
+					);
+				expect(statesOf(ask(history, history.end + 1))).toEqual(expected);
+			}),
+			RUNS,
+		);
+	});
+
 	test('[ST8] a gate is never shown released over one that is not', () => {
 		fc.assert(
 			fc.property(HISTORIES, (told) => {
