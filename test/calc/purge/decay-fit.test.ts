@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { decayFit, type DecayFit, type DecaySample } from '../../../src/lib/calc/purge/decay-fit';
-import checks from '../../vectors/purge/checks_A.json';
+import checks from '../../vectors/purge/engineering-checks.json';
 import { decayVectors, samplesOf } from './decay-vectors';
 
 const fitted = (samples: readonly DecaySample[]): DecayFit => {

@@ -1,8 +1,8 @@
 import { expect, test } from 'vitest';
 import { inLeakage, leakAtSuction } from '../../../src/lib/calc/purge/in-leakage';
-import checks from '../../vectors/purge/checks_A.json';
+import checks from '../../vectors/purge/engineering-checks.json';
 
-// Source: the floors of checks_A.json, which were made from these leaks.
+// Source: the floors of engineering-checks.json, which were made from these leaks.
 test.each(checks.A4_single_zone)(
 	'a floor of $floor % under $Q_inert m³/h of inert gas is a leak of $Q_leak m³/h',
 	(zone) => {

@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 import { mixingFactor } from '../../../src/lib/calc/purge/mixing-factor';
-import checks from '../../vectors/purge/checks_A.json';
+import checks from '../../vectors/purge/engineering-checks.json';
 
 // Source: engineering check value A5: V = 500 m³, Q = 100 m³/min, K = 0.7245 from the rate of scipy's fit.
 test('the sixteen readings in 500 m³ at 100 m³/min have a mixing factor of 0.7245', () => {

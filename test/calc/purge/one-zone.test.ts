@@ -5,14 +5,14 @@ import { floor } from '../../../src/lib/calc/purge/floor';
 import { leastInertFlow } from '../../../src/lib/calc/purge/least-inert-flow';
 import { oxygenAfter } from '../../../src/lib/calc/purge/oxygen-after';
 import { timeTo } from '../../../src/lib/calc/purge/time-to';
-import checks from '../../vectors/purge/checks_A.json';
+import checks from '../../vectors/purge/engineering-checks.json';
 
 const close = (actual: number | null, expected: number): void => {
 	expect(actual).not.toBeNull();
 	expect(Math.abs((actual ?? 0) / expected - 1)).toBeLessThan(1e-9);
 };
 
-// Source: closed forms evaluated with numpy in an independent program; percent, m³ and m³/h, hours (checks_A.json).
+// Source: closed forms evaluated with numpy in an independent program; percent, m³ and m³/h, hours (engineering-checks.json).
 describe.each(checks.A4_single_zone)('zone of $V m³, leak $Q_leak, inert $Q_inert m³/h', (zone) => {
 	const settles = floor({ Q_I: zone.Q_inert, Q_L: zone.Q_leak, Ci: zone.C_inert / 100 });
 	const rate = exchangeRate({ V: zone.V, K: 1, Q_I: zone.Q_inert, Q_L: zone.Q_leak });

@@ -29,6 +29,17 @@ describe('a purge with every condition met', () => {
 		expect(result.notes).toContainEqual(expect.objectContaining({ kind: 'in-leakage', suction }));
 	});
 
+	test('states floor, rate and leak with the farther of their bounds as uncertainty', () => {
+		for (const name of ['AT-211.floor', 'AT-211.rate', 'inLeakage']) {
+			const [at, low, high] = ['', 'Low', 'High'].map((side) => value(result, name + side)!) as [
+				number,
+				number,
+				number,
+			];
+			expect(result.values[name]!.U).toBe(Math.max(high - at, at - low));
+		}
+	});
+
 	test('counts the gas by its own meter: 75 minutes at 888 m³(n)/h', () => {
 		expect(value(result, 'admitted')).toBeCloseTo(1110, 6);
 		expect(result.values.admitted!.U).toBeCloseTo(22.2, 6);

@@ -1,8 +1,8 @@
 import { expect, test } from 'vitest';
 import { sweepPlan } from '../../../src/lib/calc/purge/sweep-plan';
-import checks from '../../vectors/purge/checks_A.json';
+import checks from '../../vectors/purge/engineering-checks.json';
 
-// Source: closed form evaluated with numpy in an independent program (checks_A.json, A1).
+// Source: closed form evaluated with numpy in an independent program (engineering-checks.json, A1).
 test.each(checks.A1_sweep)('V $V, Q $Q, from $C0 to $Ct % with $Ci %, K $K: $volumes volumes', (row) => {
 	const plan = sweepPlan({
 		...{ V: row.V, K: row.K, Q_I: row.Q, Q_L: 0, least: 0 },

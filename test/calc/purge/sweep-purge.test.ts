@@ -29,7 +29,7 @@ const refusals = (change: Inputs): readonly Refusal[] => {
 const value = (result: CalcResult, name: string): number => result.values[name]!.value!;
 const kinds = (result: CalcResult): readonly string[] => result.notes.map(({ kind }) => kind);
 
-// Source: closed form evaluated with numpy (checks_A.json); minutes as printed in the engineering check values A5.
+// Source: closed form evaluated with numpy (engineering-checks.json); minutes as printed in the engineering check values A5.
 test.each([
 	{ Q: 1000, Ci: 0, Ct: 8, K: 1, V: 500, volumes: '0.962697', minutes: '28.8809' },
 	{ Q: 1000, Ci: 0, Ct: 8, K: 0.5, V: 500, volumes: '1.925394', minutes: '57.7618' },
@@ -50,7 +50,7 @@ test.each([
 
 test('floor and time with an in-leakage are those of the one-zone balance', () => {
 	const result = run({ inertFlow: { value: 1500, unit: 'Nm3/h' }, leak: { flow: { value: 300, unit: 'm3(n)/h' } } });
-	// Source: checks_A.json, A4: floor 3.491667 %, 8 % after 0.376080 h.
+	// Source: engineering-checks.json, A4: floor 3.491667 %, 8 % after 0.376080 h.
 	expect((value(result, 'floor') * 100).toFixed(6)).toBe('3.491667');
 	expect((value(result, 'timeByMixing') / 3600).toFixed(6)).toBe('0.376080');
 });
@@ -234,7 +234,7 @@ describe('uncertainty', () => {
 });
 
 test('floor within 1 % of the line is warned of', () => {
-	// Source: checks_A.json, A4: V 500, leak 600, inert 1000 m³/h: floor 7.856250 %, target 8 % minus a guard of 0.1.
+	// Source: engineering-checks.json, A4: V 500, leak 600, inert 1000 m³/h: floor 7.856250 %, target 8 % minus a guard of 0.1.
 	const leak = { flow: { value: 600, unit: 'm3(n)/h' } };
 	expect(kinds(run({ leak, guard: { value: 0.1, unit: '%' } }))).toContain('floor-close-to-line');
 	expect(kinds(run({ leak }))).not.toContain('floor-close-to-line');

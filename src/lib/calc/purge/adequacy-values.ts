@@ -1,5 +1,6 @@
 import type { CalcValue } from '../calculator';
 import { placeOutputs, purgeOutputs } from './adequacy-outputs';
+import type { Bounds } from './decay-fit';
 import type { JudgedPlace, PurgeJudgement } from './judge-purge';
 import { riseInHold } from './place-judgement';
 
@@ -40,7 +41,7 @@ function valuesOfPurge({
 		forecast: orElse(seconds, 'unreachable'),
 		forecastGas:
 			seconds === null ? { because: 'unreachable' } : orElse(inertFlow && seconds * inertFlow, 'not-metered'),
-		inLeakage: orElse(leak?.leak, 'no-floor'),
+		inLeakage: bounded(leak?.leak, leak?.bounds) ?? { because: 'no-floor' },
 		inLeakageLow: leak === undefined ? { because: 'no-floor' } : orElse(leak.bounds.low, 'open'),
 		inLeakageHigh: leak === undefined ? { because: 'no-floor' } : orElse(leak.bounds.high, 'open'),
 	};
@@ -63,10 +64,10 @@ function valuesOfPlace(
 		margin: last === undefined ? { because: 'no-valid-samples' } : { value: accept - last.C },
 		adequateSince: orElse(adequateSince, 'above-line'),
 		slopeLow: orElse(slope?.low, 'too-few-readings'),
-		floor: ofFit(Cf),
+		floor: refused ?? bounded(Cf, bounds?.Cf) ?? { because: 'open' },
 		floorLow: ofFit(bounds?.Cf.low),
 		floorHigh: ofFit(bounds?.Cf.high),
-		rate: ofFit(lambda),
+		rate: refused ?? bounded(lambda, bounds?.lambda) ?? { because: 'open' },
 		rateLow: ofFit(bounds?.lambda.low),
 		rateHigh: ofFit(bounds?.lambda.high),
 		exchanges: ofFit(fit?.exchanges),
@@ -80,6 +81,13 @@ function valuesOfPlace(
 function mixingOf(mixing: number | undefined): Said {
 	if (mixing === undefined) return { because: 'not-metered' };
 	return mixing > 1 ? { because: 'above-one' } : { value: mixing };
+}
+
+/** With the farther of its bounds as U; without U where a bound is open. */
+function bounded(value: number | undefined, bounds: Bounds | undefined): Said | undefined {
+	if (value === undefined) return undefined;
+	const { low = null, high = null } = bounds ?? {};
+	return low === null || high === null ? { value } : { value, U: Math.max(high - value, value - low) };
 }
 
 const orElse = (value: number | null | undefined, because: string): Said =>

@@ -25,7 +25,7 @@ import { sweepWarnings } from './sweep-warnings';
  * Source: sweep-through purging with mixing factor, CEN/TR 15281 annex A and NFPA 69 annex (from memory, verify); the
  * in-leakage is an oxygen balance (derived).
  * Checked against: Branan, Rules of Thumb for Chemical Engineers, purging chart; published 1 and 0.74 volumes
- * (test/calc/purge/sweep-purge.test.ts).
+ * (test/calc/purge/sweep-plan.test.ts).
  */
 export const sweepPurge = defineCalculator({
 	id: 'sweep-purge',
