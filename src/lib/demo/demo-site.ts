@@ -4,6 +4,7 @@ import {
 	makeEntryKey,
 	makeGateKey,
 	makeSiteRoot,
+	openGateKey,
 	openSiteRoot,
 	webRandom,
 	type Certificate,
@@ -26,30 +27,36 @@ export class DemoSite {
 	readonly rootFile: SiteRootFile;
 	readonly #people = new Map<string, PersonKey>();
 	readonly #devices = new Map<string, { readonly certificate: Certificate; readonly key: SigningKey }>();
+	readonly #open = new Map<string, SigningKey>();
 	readonly #validity: { readonly notBefore: string; readonly notAfter: string };
+	readonly #pin: string | undefined;
 
-	private constructor(root: OpenSiteRoot, rootFile: SiteRootFile, validity: DemoSite['validity']) {
+	private constructor(root: OpenSiteRoot, rootFile: SiteRootFile, validity: DemoSite['validity'], pin?: string) {
 		this.root = root;
 		this.rootFile = rootFile;
 		this.#validity = validity;
+		this.#pin = pin;
 	}
 
 	get validity(): { readonly notBefore: string; readonly notAfter: string } {
 		return this.#validity;
 	}
 
-	/** @param begins the day on which the story begins: root and certificates are a little older */
-	static async make(name: string, begins: string): Promise<DemoSite> {
+	/**
+	 * @param begins the day on which the story begins: root and certificates are a little older
+	 * @param pin everybody's, where somebody shall act in their place afterwards; by default everybody has one of their own
+	 */
+	static async make(name: string, begins: string, pin?: string): Promise<DemoSite> {
 		const before = (days: number): string =>
 			new Date(Date.parse(begins) - days * 86_400_000).toISOString().replace('.000Z', 'Z');
 		const passphrase = randomWords(8);
 		const rootFile = must(await makeSiteRoot({ name, now: before(30), passphrase, random: webRandom }));
 		const root = must(await openSiteRoot(rootFile, passphrase));
-		return new DemoSite(root, rootFile, { notBefore: before(10), notAfter: before(-700) });
+		return new DemoSite(root, rootFile, { notBefore: before(10), notAfter: before(-700) }, pin);
 	}
 
 	async enrol(person: Person, device: string): Promise<PersonKey> {
-		const pin = randomDigits(8);
+		const pin = this.#pin ?? randomDigits(8);
 		const gateKey = must(await makeGateKey({ person: person.person, device, pin, random: webRandom }));
 		const certificate = must(
 			await enrolPerson(this.root, {
@@ -85,6 +92,26 @@ export class DemoSite {
 		const key = this.#people.get(keyName(person, device));
 		if (key === undefined) throw new Error(`${person} is not enrolled on ${device}`);
 		return key;
+	}
+
+	/** The key of a person, opened by the PIN once and kept open for as long as the run takes. */
+	async openKey(person: string, device: string): Promise<SigningKey> {
+		const name = keyName(person, device);
+		const { gateKey, pin } = this.personKey(person, device);
+		const key = this.#open.get(name) ?? must(await openGateKey(gateKey, pin), `PIN of ${person}`);
+		this.#open.set(name, key);
+		return key;
+	}
+
+	/** Everybody's key on one tablet. */
+	keysOn(device: string): readonly PersonKey[] {
+		return [...this.#people.values()].filter(
+			({ certificate: { subject } }) => subject.kind === 'person' && subject.device === device,
+		);
+	}
+
+	tabletCertificate(device: string): Certificate | undefined {
+		return this.#devices.get(device)?.certificate;
 	}
 
 	tabletKey(device: string): SigningKey {

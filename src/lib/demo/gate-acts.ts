@@ -33,7 +33,10 @@ function sheetAt({ procedure, tablets }: Stage, gate: number, { device, entered 
 function statementFor(stage: Stage, gate: number, meaning: string, said: Said, copy?: Statement['copy']): Statement {
 	const sheet = sheetAt(stage, gate, said);
 	return statementOf(sheet, {
-		text: releaseStatement(sheet, meaning, hourOf),
+		text: releaseStatement(sheet, meaning, {
+			local: hourOf,
+			event: (what) => stage.procedure.plantEvents.find(({ id }) => id === what)?.title ?? what,
+		}),
 		language: 'en',
 		textVersion: STATEMENT_VERSION,
 		build: stage.build,

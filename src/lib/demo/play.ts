@@ -8,6 +8,7 @@ import {
 	millis,
 	parseTrend,
 	printInstant,
+	seriesBody,
 	standing,
 	type RecordEvent,
 	type Standing,
@@ -31,6 +32,13 @@ export type PlayedStartUp = Stage & {
 	}[];
 };
 
+export type How = {
+	/** Called before every act. */
+	readonly progress?: (done: number, of: number) => void;
+	/** Everybody is enrolled on every tablet with this PIN, so that somebody can go on in their place. */
+	readonly pin?: string;
+};
+
 const OFFICE = 'OFFICE';
 
 /**
@@ -38,12 +46,8 @@ const OFFICE = 'OFFICE';
  * calculations are run, acts that the rules do not allow become refused acts, everything is signed.
  *
  * @param files the folder of the start-up
- * @param progress called before every act
  */
-export async function playStartUp(
-	files: Files,
-	progress: (done: number, of: number) => void = () => undefined,
-): Promise<PlayedStartUp> {
+export async function playStartUp(files: Files, how: How = {}): Promise<PlayedStartUp> {
 	const play = readPlayFile(files);
 	const plant = must(parsePlant(json(files, play.plant)), play.plant);
 	const procedure = LIBRARY[play.procedure] ?? must(parseProcedure(json(files, play.procedure)), play.procedure);
@@ -51,14 +55,14 @@ export async function playStartUp(
 	const instant = (local: string): string => `${local}${printInstant(0, plant.utcOffsetMinutes).slice(19)}`;
 	const first = play.acts[0];
 	if (first === undefined) throw new DemoStopped('the file tells of no act');
-	const site = await DemoSite.make(plant.site, instant(first.at));
+	const site = await DemoSite.make(plant.site, instant(first.at), how.pin);
 	const tablets = new Tablets(site, play.startUp);
-	await enrolEveryone(play, people, site);
+	await enrolEveryone({ play, people, site, everywhere: how.pin !== undefined });
 	await writeSiteLog({ play, plant, procedure, people, site, tablets, begins: instant(first.at) });
 	const around: Around = { procedure, plant, files, instant };
 	const stage: Stage = { play, plant, procedure, people, tablets, around, trends: new Map(), build: BUILD };
 	for (const [i, act] of play.acts.entries()) {
-		progress(i, play.acts.length);
+		how.progress?.(i, play.acts.length);
 		await perform(act, stage);
 	}
 	const named = play.acts.flatMap((act) => [
@@ -84,11 +88,17 @@ const PeopleSchema = v.object({
 	people: v.array(v.object({ person: v.string(), name: v.string(), roles: v.array(v.string()) })),
 });
 
-async function enrolEveryone(play: PlayFile, people: readonly Person[], site: DemoSite): Promise<void> {
+async function enrolEveryone(of: {
+	readonly play: PlayFile;
+	readonly people: readonly Person[];
+	readonly site: DemoSite;
+	readonly everywhere: boolean;
+}): Promise<void> {
+	const { play, people, site, everywhere } = of;
 	const acting = new Set(play.acts.map((act) => JSON.stringify([act.by, act.on ?? play.tablets[0]])));
 	for (const person of people) {
 		for (const tablet of play.tablets)
-			if (acting.has(JSON.stringify([person.person, tablet]))) await site.enrol(person, tablet);
+			if (everywhere || acting.has(JSON.stringify([person.person, tablet]))) await site.enrol(person, tablet);
 		if (isOffice(person)) await site.enrol(person, OFFICE);
 	}
 	for (const tablet of [...play.tablets, OFFICE]) await site.enrolTablet(tablet);
@@ -352,39 +362,15 @@ async function attachSeries(
 	const kept = attachment(act.file, around.files);
 	const trend: Trend = must(parseTrend(fromUtf8(around.files.read(act.file)), plant.utcOffsetMinutes), act.file);
 	(trends as Map<string, Trend>).set(kept.hash, trend);
-	const points = trend.columns.map(({ name, unit, basis }) => {
-		const point = plant.points.find(({ tag }) => tag === name);
-		if (point === undefined) throw new DemoStopped(`${act.file}: no measuring point ${name}`);
-		if (basis !== undefined && basis !== point.basis)
-			throw new DemoStopped(`${act.file}: ${name} is read ${String(point.basis)}, the column says ${basis}`);
-		return {
-			point: name,
-			column: name,
-			unit: unit ?? point.unit,
-			...(point.basis === undefined ? {} : { basis: point.basis }),
-		};
-	});
-	const print = (at: number | undefined): string => printInstant(at ?? 0, plant.utcOffsetMinutes);
-	const [from, to] = [print(trend.times[0]), print(trend.times.at(-1))];
-	const series = await tablets.say(
-		'series attached',
-		{
-			points,
-			from,
-			to,
-			samples: trend.times.length,
-			attachment: kept,
-			...(act.note === undefined ? {} : { note: act.note }),
-		},
-		said,
-	);
+	const attached = must(seriesBody(trend, kept, plant, act.note), act.file);
+	const series = await tablets.say('series attached', attached, said);
 	const step = stepOf(procedure, act.step);
 	const enter = { ...act, do: 'enter' as const, photo: undefined, file: undefined };
 	const { photo: _photo, file: _file, ...plain } = enter;
 	const body = {
 		...enteredBody(plain, step, around, tablets.startUp(said.device)),
 		series: [series.id],
-		from: act.from === undefined ? from : around.instant(act.from),
+		from: act.from === undefined ? attached.from : around.instant(act.from),
 	};
 	await tablets.say('entry', { ...body, outcome: 'pass' }, said);
 }

@@ -1,5 +1,5 @@
 import { utf8 } from '../base';
-import { makeEntryKey, openGateKey, sign, toJwk, type SigningKey } from '../identity';
+import { makeEntryKey, sign, toJwk, type SigningKey } from '../identity';
 import {
 	headCode,
 	headsOf,
@@ -15,7 +15,6 @@ import {
 } from '../record';
 import type { Procedure } from '../procedure';
 import type { DemoSite } from './demo-site';
-import { must } from './must';
 
 export const SITE_LOG = 'site';
 
@@ -129,8 +128,7 @@ export class Tablets {
 	async #keyFor(draft: Draft): Promise<SigningKey> {
 		const shift = draft.shiftKey === undefined ? undefined : this.#shifts.get(shiftName(draft));
 		if (shift !== undefined) return shift.key;
-		const { gateKey, pin } = this.#site.personKey(draft.person, draft.device);
-		return must(await openGateKey(gateKey, pin), `PIN of ${draft.person}`);
+		return this.#site.openKey(draft.person, draft.device);
 	}
 }
 

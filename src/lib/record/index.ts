@@ -26,6 +26,15 @@ export { checkChains, headCode, headsOf, type ChainFinding } from './chain';
 export { headText, keyFor, rightFor, type KeyNeeded } from './signing-rules';
 export { parseTrend, type Trend, type TrendColumn, type TrendError } from './trend';
 export { judgeEntry, type EntryFault } from './judge-entry';
+export {
+	calculatedBody,
+	enteredBody,
+	type ComposeError,
+	type Typed,
+	type TypedRow,
+	type TypedValue,
+} from './compose-entry';
+export { seriesBody, type SeriesError } from './compose-series';
 export { signedEvent } from './sign-event';
 export { gateSheet, headline, otherTablets, statementOf, type GateSheet, type Statement } from './gate-sheet';
 export { lookupIn } from './lookup';
