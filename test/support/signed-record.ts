@@ -1,7 +1,16 @@
 import { canonicalJson, sha256Hex, utf8, type Json } from '../../src/lib/base';
 import { runCalculator } from '../../src/lib/calc';
 import { signTrustList, type SignedTrustList } from '../../src/lib/identity';
-import { gateSheet, merge, printEventLine, standing, type BodyOf, type RecordEvent } from '../../src/lib/record';
+import {
+	gateSheet,
+	merge,
+	printEventLine,
+	standing,
+	statementOf,
+	type BodyOf,
+	type RecordEvent,
+	type Statement,
+} from '../../src/lib/record';
 import { verifyRecord, type Report } from '../../src/lib/verify';
 import { asText, SigningTablets } from './signing-tablets';
 import { PURGE_INPUTS, SMALL_PROCEDURE } from './small-procedure';
@@ -45,8 +54,6 @@ export type Bent = {
 	readonly seal?: (heads: BodyOf<'sealed'>['heads']) => BodyOf<'sealed'>['heads'];
 	readonly afterSeal?: (tablets: SigningTablets) => Promise<void>;
 };
-
-type Statement = NonNullable<BodyOf<'gate released'>['statement']>;
 
 export async function makeSignedRecord(bent: Bent = {}, onSite?: TestSite): Promise<SignedRecord> {
 	const site = onSite ?? (await makeTestSite());
@@ -155,30 +162,23 @@ async function release(
 	entered: string,
 	bent: Bent,
 ): Promise<void> {
-	const statement = (bent.statement ?? ((same) => same))(statementOf(tablets, gate, entered));
+	const statement = (bent.statement ?? ((same) => same))(shownTo(tablets, gate, entered));
 	await tablets.say('gate released', { gate, statement }, { person, device: 'T-1', entered, ...how });
 }
 
 /** What a signer on T-1 sees before signing. */
-function statementOf(tablets: SigningTablets, gate: number, entered: string): Statement {
+function shownTo(tablets: SigningTablets, gate: number, entered: string): Statement {
 	const own = tablets.held('T-1').filter(({ log }) => log === START_UP);
-	const stood = standing(SMALL_PROCEDURE, own, tablets.held('OFFICE'), entered);
-	const sheet = gateSheet(SMALL_PROCEDURE, stood, own, { gate, device: 'T-1' });
-	return {
+	const site = tablets.held('OFFICE');
+	const stood = standing(SMALL_PROCEDURE, own, site, entered);
+	const sheet = gateSheet(SMALL_PROCEDURE, stood, [...own, ...site], { gate, device: 'T-1' });
+	return statementOf(sheet, {
 		text: `Gate ${gate}: the steps below stand.`,
 		language: 'en',
 		textVersion: '1',
 		build: 'test',
-		code: '0000-0000-0000-0000',
-		list: [...sheet.list],
-		counts: sheet.counts,
-		openDeviations: [...sheet.openDeviations],
-		lapsesSince: [],
-		late: [...sheet.late],
-		others: [...sheet.others],
-		clock: 'agreed',
 		declaration: 'No fan stop, opening or loss of inert gas other than listed.',
-	};
+	});
 }
 
 /** As the judge gets it: lines that may have been tampered with, and the root that the judge knows. */

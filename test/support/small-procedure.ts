@@ -3,6 +3,20 @@ import type { Procedure } from '../../src/lib/procedure';
 const shared = { lapsedBy: [], redo: [], waits: [], instruments: [], minutes: 5 } as const;
 const source = { kind: 'demonstration', text: 'invented' } as const;
 
+export const PURGE_INPUTS = {
+	volumes: [{ id: 'loop', title: 'Circuit', volume: { value: 500, unit: 'm3' }, deadLeg: false }],
+	outletRead: 'every volume',
+	temperature: { value: 0, unit: 'degC' },
+	pressure: { value: 1013.25, unit: 'hPa(a)' },
+	inertFlow: { value: 1000, unit: 'm3(n)/h' },
+	meter: { tag: 'FT-241', medium: 'inert gas' },
+	outlet: 'stack damper HV-16',
+	inertOxygen: { value: 0, unit: '%' },
+	target: { value: 8, unit: '%' },
+	mixing: 1,
+	mixingFrom: 'measured fit',
+};
+
 /** Two gates, one step of most kinds: enough for everything that a judge of records asks. */
 export const SMALL_PROCEDURE: Procedure = {
 	format: 'gatehold-procedure/1',
@@ -48,7 +62,12 @@ export const SMALL_PROCEDURE: Procedure = {
 			kind: 'calculation',
 			validity: { kind: 'once' },
 			calculator: 'sweep-purge@1',
-			bind: {},
+			bind: {
+				...Object.fromEntries(
+					Object.entries(PURGE_INPUTS).map(([name, value]) => [name, { from: 'procedure', value }] as const),
+				),
+				mixing: { from: 'typed', title: 'Mixing factor' },
+			},
 			proves: {
 				output: 'timeByMixing',
 				quantity: 'time',
@@ -89,18 +108,4 @@ export const SMALL_PROCEDURE: Procedure = {
 	],
 	plantEvents: [{ id: 'fan-stop', title: 'Fan stopped' }],
 	startTypes: [{ id: 'first', title: 'First start', without: [], needsReleasingRole: false, excludedBy: [] }],
-};
-
-export const PURGE_INPUTS = {
-	volumes: [{ id: 'loop', title: 'Circuit', volume: { value: 500, unit: 'm3' }, deadLeg: false }],
-	outletRead: 'every volume',
-	temperature: { value: 0, unit: 'degC' },
-	pressure: { value: 1013.25, unit: 'hPa(a)' },
-	inertFlow: { value: 1000, unit: 'm3(n)/h' },
-	meter: { tag: 'FT-241', medium: 'inert gas' },
-	outlet: 'stack damper HV-16',
-	inertOxygen: { value: 0, unit: '%' },
-	target: { value: 8, unit: '%' },
-	mixing: 1,
-	mixingFrom: 'measured fit',
 };

@@ -62,8 +62,28 @@ describe('statements', () => {
 		expect(report.class).toBe('TOTAL-FAILED');
 		expect(bad(report).map(({ because }) => because)).toEqual([
 			'T-1 number 6 (gate released, gate 1) says that L1 "waits"; it was "stands".',
-			'T-1 number 7 (gate released, gate 2) leaves out C1.',
 			'T-1 number 7 (gate released, gate 2) names another proof of R1 than the one that counted.',
+			'T-1 number 7 (gate released, gate 2) leaves out C1.',
+		]);
+	});
+
+	test('whose value, count, other tablet or code of the words is not what was there', async () => {
+		const wrong = await bend({
+			stopAfter: 'gate 1',
+			statement: (said) => ({
+				...said,
+				code: '0000-0000-0000-0000',
+				list: said.list.map((line) => (line.step === 'K1' ? { ...line, value: 'adequate' } : line)),
+				counts: { ...said.counts, tries: 7 },
+				others: said.others.map((other) => ({ ...other, lastHeard: at('08:39') })),
+			}),
+		});
+		const found = bad(await judge(wrong)).filter(({ name }) => name.startsWith('statements'));
+		expect(found.map(({ because }) => /(code|shows|counts|other tablets)/.exec(because)?.[0])).toEqual([
+			'code',
+			'shows',
+			'counts',
+			'other tablets',
 		]);
 	});
 

@@ -1,6 +1,7 @@
 import type { TrustList } from '../identity';
 import { allOf, inOrder, standing, type RecordEvent } from '../record';
 import { checkAttachments } from './check-attachments';
+import { checkBindings } from './check-bindings';
 import { checkCalcs } from './check-calcs';
 import { checkCertificates } from './check-certificates';
 import { checkChain } from './check-chain';
@@ -11,6 +12,7 @@ import { checkPerformers, checkRoles } from './check-performers';
 import { checkSeal } from './check-seal';
 import { checkSignatures } from './check-signatures';
 import { checkSiteHeads } from './check-site-heads';
+import { checkStatements } from './check-statements';
 import { undecided, type Check } from './pdf/check';
 import { countsOf, processResult } from './process-result';
 import { makeReport, type Report } from './report';
@@ -69,7 +71,11 @@ export async function judgeRecord(question: RecordQuestion): Promise<JudgedRecor
 			...checkCalcs(startUp),
 			...(replayed === undefined
 				? [undecided('acts were allowed by the rules', 'The record holds no procedure that can be read.')]
-				: checkGates(replayed)),
+				: [
+						...checkGates(replayed),
+						...checkStatements(replayed),
+						...checkBindings(replayed, documents.plant, question.attachments ?? []),
+					]),
 			...checkSeal(startUp),
 		],
 		about: {
