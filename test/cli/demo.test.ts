@@ -69,7 +69,7 @@ describe('the dossier of the demonstration start-up', () => {
 		expect(page).toMatch(/Released 15.Mar.*07:0\d by Tove Arrensdal/);
 		expect(page).toMatch(/commissioning lead/);
 		expect(page).toMatch(/AT-213/);
-		expect(page).toMatch(/asphyxiate/);
+		expect(stdout).toMatch(/asphyxiate/);
 	});
 
 	test('every page of it is marked as a demonstration or stands in a file that is', () => {

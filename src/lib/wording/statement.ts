@@ -7,9 +7,15 @@ export const STATEMENT_VERSION = 'statement-en/1';
  * The sentence that a signatory signs at a hold point, made from the sheet and nothing else: what is released, on which
  * evidence, what happened since the last act, and what the tablet does not know.
  *
- * @param local prints an instant as plant local time, "02:11"
+ * @param words.local prints an instant as plant local time, "02:11"
+ * @param words.event the procedure's name of a plant event: "Process-gas fan stopped"
  */
-export function releaseStatement(sheet: GateSheet, meaning: string, local: (instant: string) => string): string {
+export function releaseStatement(
+	sheet: GateSheet,
+	meaning: string,
+	words: { readonly local: (instant: string) => string; readonly event: (what: string) => string },
+): string {
+	const { local, event } = words;
 	const { counts } = sheet;
 	const sentences = [
 		`Gate ${String(sheet.gate)}, ${sheet.title}: ${meaning}. This lets ${sheet.holdPoint} happen.`,
@@ -21,7 +27,7 @@ export function releaseStatement(sheet: GateSheet, meaning: string, local: (inst
 			: `Plant events since the last act on this gate: ${sheet.eventsSince
 					.map(
 						({ what, item, begin, end }) =>
-							`${what}${item === undefined ? '' : ` of ${item}`} ${local(begin)} to ${end === null ? 'not ended' : local(end)}`,
+							`${event(what)}${item === undefined ? '' : ` (${item})`} ${local(begin)} to ${end === null ? 'not ended' : local(end)}`,
 					)
 					.join('; ')}.`,
 		...sheet.findingsSince.map(
