@@ -97,8 +97,11 @@ export function clipped(a: Point, b: Point, { x, y, width, height }: Box): reado
 		else t1 = Math.min(t1, q / p);
 	}
 	if (t0 > t1) return undefined;
-	const on = (t: number): Point => ({ x: a.x + t * dx, y: a.y + t * dy });
-	return [t0 === 0 ? a : on(t0), t1 === 1 ? b : on(t1)];
+	// What rounding leaves of a very long line is put back on the edge.
+	const inside = (value: number, from: number, length: number) => Math.min(from + length, Math.max(from, value));
+	const onEdge = (point: Point): Point => ({ x: inside(point.x, x, width), y: inside(point.y, y, height) });
+	const on = (t: number): Point => onEdge({ x: a.x + t * dx, y: a.y + t * dy });
+	return [t0 === 0 ? onEdge(a) : on(t0), t1 === 1 ? onEdge(b) : on(t1)];
 }
 
 /** Control points of a quarter circle as a cubic curve: 4/3 (sqrt 2 - 1). */

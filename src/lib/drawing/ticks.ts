@@ -28,7 +28,7 @@ export function logarithmicTicks(from: number, to: number): readonly number[] {
 	const steps = last - first > 4 ? [1] : [1, 2, 5];
 	return Array.from({ length: last - first + 1 }, (_, i) => first + i)
 		.flatMap((power) => steps.map((step) => step * 10 ** power))
-		.filter((at) => at >= from * 0.999 && at <= to * 1.001);
+		.filter((at) => at >= from * (1 - 1e-9) && at <= to * (1 + 1e-9));
 }
 
 /** A clock's steps, in seconds: 1, 5, 15 minutes and so on, for an axis of time. */

@@ -22,8 +22,9 @@ export type Lettered = {
 
 /** What lies over the curves: the limit, the edges of a window, the beginning of an event, and their names. */
 export function linesOf(mark: PlotMark, frame: Frame, lettered: Lettered): readonly Shape[] {
-	const scale = mark.axis === 'x' ? frame.x : frame.y;
-	const edges = [mark.at, ...(mark.to === undefined ? [] : [mark.to])].map(scale.at).filter((at) => at !== undefined);
+	const edges = [mark.at, ...(mark.to === undefined ? [] : [mark.to])].flatMap(
+		(value) => shownAt(frame, mark.axis, value) ?? [],
+	);
 	if (edges.length === 0) return [];
 	return mark.axis === 'y' ? level(mark, edges, frame, lettered) : moment(mark, edges, frame, lettered);
 }
@@ -42,11 +43,12 @@ function level(
 	const width = measure(name, 'strong', size);
 	const left = { x: box.x + size, y: y - size, width, height: size * 1.3 };
 	const right = { ...left, x: box.x + box.width - size - width };
+	const isDrawn = mark.kind === 'window' || mark.kind === 'event';
 	const { x } = crowd(right, curves, frame) < crowd(left, curves, frame) ? right : left;
 	return [
 		...(mark.kind === 'limit' ? [stroke(across(at), { pen: 'bold', tone: 'bad' })] : []),
-		...(mark.kind === 'window' ? [stroke(edges.flatMap(across), { pen: 'line', dash: 'dashed' })] : []),
-		lettering(name, { x, y }, { size, voice: 'strong', tone: LABEL_TONES[mark.kind] }),
+		...(isDrawn ? [stroke(edges.flatMap(across), { pen: 'line', dash: 'dashed' })] : []),
+		lettering(name, { x, y }, { size, voice: 'strong', tone: mark.kind === 'event' ? 'ink' : LABEL_TONES[mark.kind] }),
 	];
 }
 
@@ -85,10 +87,16 @@ function moment(
 /** A limit is named with its value. */
 const shown = (value: number): string => String(Number(value.toPrecision(4))).replace('-', '−');
 
+/** Where a mark lies; undefined for one that the axis does not reach. */
+function shownAt({ box, x, y }: Frame, axis: 'x' | 'y', value: number): number | undefined {
+	const at = (axis === 'x' ? x : y).at(value);
+	const [start, length] = axis === 'x' ? [box.x, box.width] : [box.y, box.height];
+	return at !== undefined && at >= start - 0.5 && at <= start + length + 0.5 ? at : undefined;
+}
+
 function boxOf({ axis, at, to }: PlotMark, frame: Frame): Box | undefined {
 	if (to === undefined) return undefined;
-	const scale = axis === 'x' ? frame.x : frame.y;
-	const [a, b] = [scale.at(at), scale.at(to)];
+	const [a, b] = [shownAt(frame, axis, at), shownAt(frame, axis, to)];
 	if (a === undefined || b === undefined) return undefined;
 	const { box } = frame;
 	return axis === 'x'
