@@ -1,7 +1,7 @@
 import { MARK_TONES, markShapes, type Mark } from '../marks';
 import { circle, segment } from '../path';
 import { area, group, lettering, stroke, type Box, type Measure, type Point, type Shape } from '../shape';
-import type { Item, Place } from './placing';
+import type { Item, Place } from './item';
 
 /** What is known of a measuring point: the value as it was typed, and how it stands. */
 export type SketchReading = {

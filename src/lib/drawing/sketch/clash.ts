@@ -1,7 +1,7 @@
 import { clipped } from '../path';
 import type { Box, Point } from '../shape';
 import { distance } from './ducts';
-import type { Item, Obstacles, Place } from './placing';
+import type { Item, Obstacles, Place } from './item';
 
 /** More than any leader or preference can cost. */
 const COVERED = 1e5;

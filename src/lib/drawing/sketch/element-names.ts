@@ -2,7 +2,7 @@ import { MARK_TONES, markShapes, type Mark } from '../marks';
 import { segment } from '../path';
 import { lettering, stroke, type Box, type Point, type Shape } from '../shape';
 import type { Type } from './bubble';
-import type { Item, Place } from './placing';
+import type { Item, Place } from './item';
 
 /** Where it was seen; `word` is said in place of the position, and may be nothing. */
 export type SketchElement = { readonly position: string; readonly mark?: Mark; readonly word?: string };

@@ -1,9 +1,8 @@
 import type { Plant } from '../../plant';
 import type { Box, Point } from '../shape';
-import type { Bubble } from './bubble';
+import type { Bubble, SketchReading } from './bubble';
 import { distance, nearest, piecesOf, type Run } from './ducts';
 import { contourOf, USUAL_SIZES, type Equipment } from './equipment';
-import type { SketchLook } from './process-sketch';
 
 /** The plant description on the sheet: everything in units of the drawing. */
 export type Layout = {
@@ -13,7 +12,12 @@ export type Layout = {
 	readonly bubbles: readonly Bubble[];
 };
 
-export function layoutOf(plant: Plant, grid: number, margin: number, readings: SketchLook['readings']): Layout {
+export function layoutOf(
+	plant: Plant,
+	grid: number,
+	margin: number,
+	readings: ReadonlyMap<string, SketchReading> | undefined,
+): Layout {
 	const at = ({ x, y }: Point): Point => ({ x: margin + x * grid, y: margin + y * grid });
 	const boxOf = (place: Place, [width, height]: readonly [number, number]): Box => ({
 		...at(place),

@@ -1,7 +1,7 @@
 import { lettering, type Box, type Point, type Shape } from '../shape';
 import type { Type } from './bubble';
 import type { Equipment } from './equipment';
-import type { Item, Place } from './placing';
+import type { Item, Place } from './item';
 
 type Size = Pick<Box, 'width' | 'height'>;
 

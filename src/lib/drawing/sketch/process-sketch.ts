@@ -9,7 +9,8 @@ import { alongDuct, elementShapes } from './elements';
 import { equipmentShapes, type Equipment } from './equipment';
 import { layoutOf, type Layout } from './layout';
 import { nameItem, nameShapes } from './names';
-import { placeItems, type Obstacles } from './placing';
+import type { Obstacles } from './item';
+import { placeItems } from './placing';
 import { sheetShapes } from './sheet';
 
 export type SketchLook = {
