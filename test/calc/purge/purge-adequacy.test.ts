@@ -76,6 +76,13 @@ describe('the floor', () => {
 		expect(value(result, 'AT-211.floor')).toBeCloseTo(0.105, 2);
 	});
 
+	test('of a curve below two exchanges refuses nothing: it may still be wrong', () => {
+		const result = run(purgeInputs({ leak: 900, minutes: 30, hopperExchange: 6000 }));
+		expect(value(result, 'AT-211.floor')).toBeGreaterThan(0.08);
+		expect(value(result, 'AT-211.exchanges')).toBeLessThan(2);
+		expect(word(result)).toBe('not yet');
+	});
+
 	test('between line and limit waits for ever, warns, and forecasts nothing', () => {
 		// 20.95 · 520/1408 = 7.74 %: above 7.7, below 8.
 		const result = run(purgeInputs({ leak: 520, minutes: 180, hopperExchange: 6000 }));

@@ -70,6 +70,22 @@ test('the order in which samples arrive changes nothing', () => {
 	);
 });
 
+test('what is read after the judgement changes nothing', () => {
+	fc.assert(
+		fc.property(anyPurge, fc.integer({ min: 10, max: 30 }), (inputs, minutes) => {
+			const judgedAt = minutes * 60;
+			const cut = structuredClone(inputs);
+			for (const series of Object.values(cut.series)) {
+				const known = series.t.flatMap((t, i) => (t <= judgedAt ? [i] : []));
+				series.values = known.map((i) => series.values[i]!);
+				series.t = known.map((i) => series.t[i]!);
+			}
+			expect(judged(run({ ...inputs, judgedAt }))).toEqual(judged(run({ ...cut, judgedAt })));
+		}),
+		options,
+	);
+});
+
 describe('a void sample changes nothing', () => {
 	const added = (inputs: Inputs, tag: string, t: number, value: number): Inputs => {
 		const changed = structuredClone(inputs);

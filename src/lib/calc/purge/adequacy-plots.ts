@@ -57,8 +57,8 @@ function curvesOf(
 	];
 }
 
-function inertPlot({ circuit, begins, judgedAt, hold }: PurgeJudgement): Plot {
-	const points = circuit.inert.points.filter(({ t }) => t <= judgedAt);
+function inertPlot({ circuit, begins, hold }: PurgeJudgement): Plot {
+	const { points } = circuit.inert;
 	return {
 		id: 'inert-flow',
 		title: 'Inert gas admitted',

@@ -1,4 +1,5 @@
 import { fail, ok, type Result } from '../../base';
+import type { QuantityName } from '../../quantity';
 import type { Refusal } from '../calculator';
 import type { AdequacyInputs } from './adequacy-inputs';
 import { admittedGas, flowOfTotaliser, type Admitted } from './admitted-gas';
@@ -22,14 +23,19 @@ export type Circuit = {
 	readonly meanInert: (window: Stretch) => number | null;
 };
 
-export function readCircuit(given: AdequacyInputs): Result<Circuit, readonly Refusal[]> {
+/** Read up to the judgement: what came later was not known to it. */
+export function readCircuit(given: AdequacyInputs, judgedAt: number): Result<Circuit, readonly Refusal[]> {
 	const longestGap = given.longestGap.value;
+	const readKnown = (tag: string, quantity: QuantityName): ReturnType<typeof readSeries> => {
+		const points = readSeries(given.series, tag, quantity);
+		return points.ok ? ok(points.value.filter(({ t }) => t <= judgedAt)) : points;
+	};
 	const meters = given.inertGas.meters.map((meter) => {
 		const quantity = meter.reads === 'flow' ? 'volume-flow-normal-wet' : 'volume-normal';
-		return { meter, points: readSeries(given.series, meter.tag, quantity) };
+		return { meter, points: readKnown(meter.tag, quantity) };
 	});
-	const fan = readSeries(given.series, given.fan.tag, 'volume-flow');
-	const outlet = given.outlet.tag === undefined ? ok([]) : readSeries(given.series, given.outlet.tag, 'number');
+	const fan = readKnown(given.fan.tag, 'volume-flow');
+	const outlet = given.outlet.tag === undefined ? ok([]) : readKnown(given.outlet.tag, 'number');
 	const refused = [...meters.map(({ points }) => points), fan, outlet].flatMap((read) => (read.ok ? [] : read.error));
 	const read = meters.map(({ meter, points }) => ({ ...meter, points: points.ok ? points.value : [] }));
 	refused.push(...read.flatMap((meter) => backwards(meter)));

@@ -19,7 +19,9 @@ export function readPlaces(given: AdequacyInputs): Result<readonly PlaceReadings
 		if (!points.ok) refusals.push(...points.error);
 		if (!(accept > 0))
 			refusals.push({ kind: 'guard-leaves-nothing', input: `places[${i}]`, limit: limit.oxygen, guard });
-		const { valid, excluded } = voidSamples(points.ok ? points.value : [], {
+		// What was read after the judgement was not known to it.
+		const known = (points.ok ? points.value : []).filter(({ t }) => t <= (given.judgedAt?.value ?? Infinity));
+		const { valid, excluded } = voidSamples(known, {
 			flagged: Object.hasOwn(given.series, place.tag) ? given.series[place.tag]?.flagged : undefined,
 			range: place.range,
 			identicalMost: given.identicalMost.value,

@@ -47,14 +47,13 @@ export const purgeAdequacy = defineCalculator({
 type Computed = Result<Omit<CalcResult, 'calc' | 'constants' | 'inputs'>, readonly Refusal[]>;
 
 function compute(given: AdequacyInputs): Computed {
-	const places = readPlaces(given);
-	const circuit = readCircuit(given);
-	if (!places.ok || !circuit.ok) return fail([places, circuit].flatMap((read) => (read.ok ? [] : read.error)));
 	const begins = given.begins.value;
-	const judgedAt = given.judgedAt?.value ?? lastValid(places.value, begins);
+	const places = readPlaces(given);
+	const judgedAt = given.judgedAt?.value ?? (places.ok ? lastValid(places.value, begins) : begins);
+	const circuit = readCircuit(given, judgedAt);
+	if (!places.ok || !circuit.ok) return fail([places, circuit].flatMap((read) => (read.ok ? [] : read.error)));
 	if (judgedAt < begins) return fail([{ kind: 'judged-before-it-began', input: 'judgedAt', begins, judgedAt }]);
-	const known = places.value.map((place) => upTo(place, judgedAt));
-	const judgement = judgePurge(given, { places: known, circuit: circuit.value, judgedAt });
+	const judgement = judgePurge(given, { places: places.value, circuit: circuit.value, judgedAt });
 	return ok({
 		values: adequacyValues(judgement),
 		verdict: { word: verdictWord(judgement.reasons), reasons: judgement.reasons },
@@ -73,10 +72,3 @@ export function verdictWord(reasons: readonly Pick<PurgeReason, 'criterion'>[]):
 /** Void samples do not move the judgement, and so not its time either. */
 const lastValid = (places: readonly PlaceReadings[], begins: number): number =>
 	Math.max(begins, ...places.map(({ valid }) => valid.at(-1)?.t ?? begins));
-
-/** What was read after the judgement was not known to it. */
-const upTo = (readings: PlaceReadings, judgedAt: number): PlaceReadings => ({
-	...readings,
-	valid: readings.valid.filter(({ t }) => t <= judgedAt),
-	asRead: readings.asRead.filter(({ t }) => t <= judgedAt),
-});
