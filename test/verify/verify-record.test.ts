@@ -43,8 +43,9 @@ describe('whatever comes, there is an answer', () => {
 			fc.jsonValue({ maxDepth: 2 }) as fc.Arbitrary<Json>,
 		);
 		await fc.assert(
-			fc.asyncProperty(fc.nat(record.lines.length - 1), fc.nat(), strange, async (line, place, value) => {
-				const lines = record.lines.with(line, bend(record.lines[line]!, place, value));
+			fc.asyncProperty(fc.nat(record.lines.length - 1), fc.array(fc.tuple(fc.nat(), strange)), async (line, bends) => {
+				const bent = bends.reduce((text, [place, value]) => bend(text, place, value), record.lines[line]!);
+				const lines = record.lines.with(line, bent);
 				if (lines[line] === record.lines[line]) return;
 				expect((await judge(record, lines)).class).toBe('TOTAL-FAILED');
 			}),

@@ -1,3 +1,4 @@
+import * as v from 'valibot';
 import type { CalcResult } from '../calc';
 import type { BoundReading, BoundSeries, Lookup } from '../procedure';
 import type { Standing } from './answer';
@@ -43,7 +44,7 @@ export function lookupIn(record: {
 				...(reading === undefined ? {} : { reading: readingOf(reading, entry) }),
 			}));
 		},
-		result: (step) => entryOf(step)?.body.calculation as unknown as CalcResult | undefined,
+		result: (step) => storedResult(entryOf(step)?.body.calculation),
 		observed: (step) => entryOf(step)?.observedAt,
 		person: (step) => entryOf(step)?.person,
 		standing: (step) => {
@@ -53,6 +54,15 @@ export function lookupIn(record: {
 		typed: (input) => record.typed[input],
 	};
 }
+
+/** A result as it was stored, which anybody can have written; what is none gives nothing. */
+function storedResult(stored: unknown): CalcResult | undefined {
+	return v.is(StoredResult, stored) ? (stored as unknown as CalcResult) : undefined;
+}
+
+const StoredResult = v.looseObject({
+	values: v.record(v.string(), v.looseObject({ value: v.nullable(v.number()), unit: v.string() })),
+});
 
 type Reading = NonNullable<EventOf<'entry'>['body']['values']>[number];
 

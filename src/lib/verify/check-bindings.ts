@@ -34,8 +34,10 @@ export function checkBindings(
 	const steps = new Map(procedure.steps.map((step) => [step.id, step]));
 	const calculated = allOf(startUp, 'entry').flatMap((event) => {
 		const step = steps.get(event.body.step);
-		const inputs = event.body.calculation?.inputs as Inputs | undefined;
-		return step?.kind === 'calculation' && inputs !== undefined ? [{ event, step, inputs }] : [];
+		const { calculation } = event.body;
+		if (step?.kind !== 'calculation' || calculation === undefined) return [];
+		// Inputs that are no table are named where they are calculated again.
+		return isTable(calculation.inputs) ? [{ event, step, inputs: calculation.inputs }] : [];
 	});
 	if (plant === undefined)
 		return calculated.length === 0 ? [] : [undecided(NAME, 'The record holds no plant description that can be read.')];
@@ -108,6 +110,9 @@ function differing(stored: Inputs, bound: { readonly [input: string]: unknown })
 		value === undefined ? '' : canonicalJson(JSON.parse(JSON.stringify(value)) as Json);
 	return [...names].filter((name) => text(stored[name]) !== text(bound[name]));
 }
+
+const isTable = (value: unknown): value is Inputs =>
+	typeof value === 'object' && value !== null && !Array.isArray(value);
 
 /** Every value inside the inputs by its path, "places[2].age". */
 function byPath(value: Json, path: string): { readonly [path: string]: Json } {

@@ -43,18 +43,22 @@ function differencesOf(stored: { readonly [name: string]: unknown }, again: Calc
 	const names = [...new Set([...needed, ...Object.keys(stored)])].filter(
 		(name) => name !== 'calc' && name !== 'inputs',
 	);
-	return names.flatMap((name) => compare(name, stored[name], (again as { readonly [name: string]: unknown })[name]));
+	return names.flatMap((name) => compare(name, own(stored, name), own(again, name)));
 }
 
 function compare(at: string, stored: unknown, again: unknown): readonly Difference[] {
 	if (typeof stored === 'number' && typeof again === 'number')
 		return agree(stored, again) ? [] : [difference(at, stored, again)];
-	if (isTable(stored) && isTable(again))
+	if (isTable(stored) && isTable(again) && Array.isArray(stored) === Array.isArray(again))
 		return [...new Set([...Object.keys(stored), ...Object.keys(again)])].flatMap((name) =>
-			compare(`${at}.${name}`, stored[name], again[name]),
+			compare(`${at}.${name}`, own(stored, name), own(again, name)),
 		);
 	return stored === again ? [] : [difference(at, stored, again)];
 }
+
+/** A stored table may name anything, also what every list can do. */
+const own = (table: object, name: string): unknown =>
+	Object.hasOwn(table, name) ? (table as { readonly [name: string]: unknown })[name] : undefined;
 
 const isTable = (value: unknown): value is { readonly [name: string]: unknown } =>
 	typeof value === 'object' && value !== null;
