@@ -9,15 +9,19 @@ import subsetFont from 'subset-font';
 
 const HOUSE = join(import.meta.dirname, '../..');
 const OUT = join(HOUSE, 'static/fonts');
-const SOURCES = join(HOUSE, 'node_modules/@expo-google-fonts');
+const SOURCES = join(HOUSE, 'node_modules');
 
 /** Written file: source file, relative to SOURCES. */
 export const FONTS = {
-	'sofia-sans-400.woff2': 'sofia-sans/400Regular/SofiaSans_400Regular.ttf',
-	'sofia-sans-600.woff2': 'sofia-sans/600SemiBold/SofiaSans_600SemiBold.ttf',
-	'sofia-sans-700.woff2': 'sofia-sans/700Bold/SofiaSans_700Bold.ttf',
-	'sofia-sans-800.woff2': 'sofia-sans/800ExtraBold/SofiaSans_800ExtraBold.ttf',
-	'literata-500.woff2': 'literata/500Medium/Literata_500Medium.ttf',
+	'sofia-sans-400.woff2': '@expo-google-fonts/sofia-sans/400Regular/SofiaSans_400Regular.ttf',
+	'sofia-sans-600.woff2': '@expo-google-fonts/sofia-sans/600SemiBold/SofiaSans_600SemiBold.ttf',
+	'sofia-sans-700.woff2': '@expo-google-fonts/sofia-sans/700Bold/SofiaSans_700Bold.ttf',
+	'sofia-sans-800.woff2': '@expo-google-fonts/sofia-sans/800ExtraBold/SofiaSans_800ExtraBold.ttf',
+	'sofia-sans-condensed-400.woff2':
+		'@fontsource/sofia-sans-condensed/files/sofia-sans-condensed-latin-400-normal.woff2',
+	'sofia-sans-condensed-700.woff2':
+		'@fontsource/sofia-sans-condensed/files/sofia-sans-condensed-latin-700-normal.woff2',
+	'literata-500.woff2': '@expo-google-fonts/literata/500Medium/Literata_500Medium.ttf',
 };
 
 const RANGES = [
@@ -40,6 +44,6 @@ if (process.argv[1] === fileURLToPath(import.meta.url)) {
 	mkdirSync(OUT, { recursive: true });
 	for (const name of /** @type {(keyof typeof FONTS)[]} */ (Object.keys(FONTS)))
 		writeFileSync(join(OUT, name), await makeFont(name));
-	copyFileSync(join(SOURCES, 'sofia-sans/LICENSE_FONT'), join(OUT, 'OFL-sofia-sans.txt'));
-	copyFileSync(join(SOURCES, 'literata/LICENSE_FONT'), join(OUT, 'OFL-literata.txt'));
+	copyFileSync(join(SOURCES, '@expo-google-fonts/sofia-sans/LICENSE_FONT'), join(OUT, 'OFL-sofia-sans.txt'));
+	copyFileSync(join(SOURCES, '@expo-google-fonts/literata/LICENSE_FONT'), join(OUT, 'OFL-literata.txt'));
 }

@@ -4,5 +4,43 @@
  * May import: ranks 0 to 5, verify (types to show).
  */
 export { isLook, LOOKS, type Look } from './look';
+export { giveWords, words } from './words';
+
+export { default as EmptyState } from './parts/EmptyState.svelte';
+export { default as ErrorNote } from './parts/ErrorNote.svelte';
+export { default as Glyph } from './parts/Glyph.svelte';
 export { default as LookSwitch } from './parts/LookSwitch.svelte';
+export { default as TopLine } from './parts/TopLine.svelte';
+export { default as UndoBar } from './parts/UndoBar.svelte';
 export { default as UprightContact } from './parts/UprightContact.svelte';
+export { default as UprightMark } from './parts/UprightMark.svelte';
+export { default as WarnLine } from './parts/WarnLine.svelte';
+
+export { default as DrawingView } from './drawn/DrawingView.svelte';
+export { default as PlotView } from './drawn/PlotView.svelte';
+
+export { default as LadderView } from './ladder/LadderView.svelte';
+export { default as LineView } from './ladder/LineView.svelte';
+export { default as OutlineView } from './ladder/OutlineView.svelte';
+export { rungInWork, shownRungs, stopsAt, type ShownRung } from './ladder/shown-rungs';
+export { leaderNotes, namesOf } from './ladder/leader-notes';
+
+export type { StepDraft } from './step/step-draft';
+export { default as StepSheet } from './step/StepSheet.svelte';
+export { default as CalculationBody } from './step/CalculationBody.svelte';
+export { default as ChoiceBody } from './step/ChoiceBody.svelte';
+export { default as ConfirmBody } from './step/ConfirmBody.svelte';
+export { default as CoverageBody } from './step/CoverageBody.svelte';
+export { default as LineUpBody } from './step/LineUpBody.svelte';
+export { default as PhotoBody } from './step/PhotoBody.svelte';
+export { default as QuickSheetBody } from './step/QuickSheetBody.svelte';
+export { default as ReadingBody } from './step/ReadingBody.svelte';
+export { default as ReviewBody } from './step/ReviewBody.svelte';
+export { default as SeriesBody } from './step/SeriesBody.svelte';
+export { default as TimedHoldBody } from './step/TimedHoldBody.svelte';
+export { default as WatchBody } from './step/WatchBody.svelte';
+export { default as WitnessBody } from './step/WitnessBody.svelte';
+
+export { default as PinField } from './acts/PinField.svelte';
+export { default as RefusalAnswer } from './acts/RefusalAnswer.svelte';
+export { default as SigningSheet } from './acts/SigningSheet.svelte';

@@ -1,3 +1,4 @@
+import { APP } from './en/app';
 import { CHAPTERS } from './en/chapters';
 import { CLOSING } from './en/closing';
 import { COVER } from './en/cover';
@@ -5,7 +6,23 @@ import { ERRORS } from './en/errors';
 import { FINDINGS } from './en/findings';
 import { GATES } from './en/gates';
 import { NOTES } from './en/notes';
+import { SCREEN_ACTS } from './en/screen-acts';
+import { SCREEN_LINE } from './en/screen-line';
+import { SCREEN_STEPS } from './en/screen-steps';
 import { STATES } from './en/states';
 
 /** English. Every message under a key that says where it stands; another language has the same keys. */
-export const EN = { ...STATES, ...COVER, ...GATES, ...CHAPTERS, ...CLOSING, ...ERRORS, ...FINDINGS, ...NOTES } as const;
+export const EN = {
+	...STATES,
+	...COVER,
+	...GATES,
+	...CHAPTERS,
+	...CLOSING,
+	...ERRORS,
+	...FINDINGS,
+	...NOTES,
+	...APP,
+	...SCREEN_LINE,
+	...SCREEN_STEPS,
+	...SCREEN_ACTS,
+} as const;

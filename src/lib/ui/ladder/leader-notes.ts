@@ -1,0 +1,82 @@
+import type { Procedure } from '../../procedure';
+import type { Cause, Standing } from '../../record';
+import { sayCause, type Moments, type Say } from '../../wording';
+import { statesOf, type ShownContact, type ShownRung, type Told } from './shown-rungs';
+
+/** A sentence led to its contact: "Lapsed suction, fan stop 09:14". */
+export type LeaderNote = {
+	readonly contact: string;
+	readonly word: string;
+	readonly text: string;
+	/** The step that the note names, when it names one. */
+	readonly step?: string;
+};
+
+/** What is said about a rung: what is next, what has lapsed, what blocks. */
+export function leaderNotes(
+	rung: ShownRung,
+	{ procedure, standing }: Told,
+	{ say, moments, deviations }: { say: Say; moments: Moments; deviations?: ReadonlyMap<string, string> | undefined },
+): readonly LeaderNote[] {
+	const around = { procedure, standing, say, moments };
+	return rung.contacts.flatMap((contact): readonly LeaderNote[] => {
+		const { id, label, state, of } = contact;
+		if (of === 'gate' && state !== 'stands')
+			return [{ contact: id, word: say('ui.lead.waits'), text: say('ui.lead.for gate', { gate: label }) }];
+		if (state === 'blocks')
+			return [{ contact: id, word: say('ui.lead.deviation', { id }), text: deviations?.get(id) ?? say('ui.blocks') }];
+		if (state === 'next') return stepNote(contact, rung, say('ui.lead.next'), around, () => true);
+		if (state === 'failed')
+			return stepNote(contact, rung, say('ui.lead.failed'), around, (found) => found === 'failed');
+		if (state === 'lapsed') return lapseNote(contact, rung, around);
+		if (of === 'permissive' && contact.powered && state !== 'stands')
+			return [{ contact: id, word: say('ui.lead.condition'), text: `${label}: ${contact.word}` }];
+		return [];
+	});
+}
+
+type Around = {
+	readonly procedure: Procedure;
+	readonly standing: Standing;
+	readonly say: Say;
+	readonly moments: Moments;
+};
+
+function stepNote(
+	contact: ShownContact,
+	{ gate }: ShownRung,
+	word: string,
+	{ procedure, standing }: Around,
+	isMeant: (state: string) => boolean,
+): readonly LeaderNote[] {
+	const found = ofGroup(contact, gate, procedure, standing).find(
+		({ state }) => state !== 'stands' && state !== 'not applicable' && isMeant(state),
+	);
+	const step = procedure.steps.find(({ id }) => id === found?.step);
+	return step === undefined ? [] : [{ contact: contact.id, word, text: `${step.id} ${step.title}`, step: step.id }];
+}
+
+function lapseNote(contact: ShownContact, { gate }: ShownRung, around: Around): readonly LeaderNote[] {
+	const { procedure, standing, say, moments } = around;
+	const lapsed = ofGroup(contact, gate, procedure, standing).find(({ state }) => state === 'lapsed');
+	const cause = lapsed === undefined ? undefined : firstFact(lapsed.why);
+	if (lapsed === undefined || cause === undefined) return [];
+	const said = sayCause(cause, say, moments, namesOf(procedure));
+	return [{ contact: contact.id, word: say('ui.lead.lapsed'), text: `${contact.label}: ${said}`, step: lapsed.step }];
+}
+
+const ofGroup = (contact: ShownContact, gate: number, procedure: Procedure, standing: Standing) =>
+	statesOf(
+		contact.id,
+		procedure.steps.filter((step) => step.gate === gate),
+		standing,
+	);
+
+/** A fact of the plant before what only follows from one. */
+const firstFact = (why: readonly Cause[]): Cause | undefined => why.find(({ kind }) => kind !== 'relies on') ?? why[0];
+
+/** Plant events and conditions by their titles in the procedure. */
+export const namesOf = (procedure: Procedure) => ({
+	plantEvent: (what: string): string => procedure.plantEvents.find(({ id }) => id === what)?.title ?? what,
+	permissive: (id: string): string => procedure.permissives?.find((each) => each.id === id)?.title ?? id,
+});
