@@ -44,6 +44,27 @@ export const NOTES = {
 		'{place}: fitted to {samples} samples from {from:clock} to {to:clock}, {exchanges} exchanges, dead time {deadTime:time} taken off.',
 	'note.basis-differs':
 		'{place} reads {basis:basis}, the limit is {limitBasis:basis}; water vapour credited {credited:%}, charged {charged:%}.',
+	'note.above-allowed-oxygen':
+		'The target {target:%} is above the {allowed:%} that a limiting oxygen of {limitingOxygen:%} allows.',
+	'note.limit-not-from-a-test-of-this-fuel': 'The limit does not come from a test of this fuel ({source}).',
+	'note.unburnt-gas-limit-applies': 'Unburnt gas {fraction:%}: the limit of the gas applies, not that of the dust.',
+	'note.mixing-assumed-good': 'A mixing factor of {mixing} is assumed, not measured.',
+	'note.carbon-dioxide-discharge':
+		'Carbon dioxide: no discharge from a snow horn into a dust cloud; it charges itself. Content is told by weight.',
+	'note.floor-close-to-line': 'The floor {floor:%} is close to the line {accept:%}.',
+	'note.unreachable': 'The target {target:%} cannot be reached: the gas settles at {floor:%}.',
+	'note.least-volume-changes-decide': 'The least volume changes decide ({least}); mixing alone would need {byMixing}.',
+	'note.leak-without-suction': 'The leak is stated without the suction at which it was found.',
+	'note.leak-scaled-with-suction': 'The leak is scaled with the root of the suction, as a lower bound: {leak:flow}.',
+	'note.leak-asks-for-sensor-check':
+		'{place}: a leak of {leak:flow} asks for a check of the analyser; it does not say that nothing leaks.',
+	'note.stock-too-small': 'The stock is smaller than this purge needs.',
+	'note.stock-without-repeat': 'The stock is enough for this purge, not for one repeat.',
+	'note.flow-broken-before-hold': 'A flow was broken before the hold began; the hold counts from after it.',
+	'note.inert-flow-varied': 'The inert gas flow varied from {least:flow} to {most:flow}.',
+	'note.meter-gap-not-counted': '{meter}: nothing is counted from {from:clock} to {to:clock}, where it has a gap.',
+	'note.samples-excluded': '{place}: {count} samples left out ({why}).',
+	'note.no-dead-leg-named': 'No dead leg is named among the volumes.',
 	'note.covered-without-analyser': 'Without analyser, {answer}: {volumes}.',
 	'note.in-leakage': 'In-leakage from the floor at {place}: about {leak:flow}, at the suction at which it was found.',
 	'note.mixing-above-one': '{place}: mixing factor {mixing} above one.',
