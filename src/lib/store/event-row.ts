@@ -46,9 +46,9 @@ export function rowOf(event: RecordEvent, received = event.received): EventRow {
 }
 
 export function eventOf(row: EventRow): Result<RecordEvent, DamagedRow> {
-	const { log, device, number, id, ...line } = row;
+	const { log, device, number, id, text, signature, received } = row;
 	const place = { log, device, number, id };
-	const event = parseEventLine(JSON.stringify(line));
+	const event = parseEventLine(JSON.stringify({ text, signature, received }));
 	if (!event.ok) return fail({ ...place, error: event.error });
 	const same = keyOf(event.value).every((part, i) => part === keyOf(row)[i]);
 	return same ? ok(event.value) : fail({ ...place, error: { kind: 'not-the-kept-event', found: event.value.id } });
