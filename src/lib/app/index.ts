@@ -1,0 +1,38 @@
+/**
+ * app: what a screen holds and can do: this tablet and its people, an open start-up, the demonstration, archive, calculators.
+ * The place where clock, chance and storage meet the pure rooms; knows no component and no address.
+ * May import: every room but ui and server.
+ */
+export { systemClock, type Clock } from './clock';
+export { Tablet, type TabletPerson } from './tablet.svelte';
+export type { Problem } from './problem';
+export { sayProblem } from './say-problem';
+export { OpenStartUp, type Held } from './open-start-up.svelte';
+export {
+	attachSeries,
+	calculate,
+	endPlantEvent,
+	enter,
+	note,
+	raiseDeviation,
+	recordPlantEvent,
+	withdrawEntry,
+	type TrendFile,
+} from './entries';
+export {
+	answerRefusal,
+	beginShift,
+	disposeDeviation,
+	handOver,
+	newestCopy,
+	noteCopy,
+	recordFinding,
+	refuse,
+	release,
+	seal,
+	sheetOf,
+	type CopySaid,
+	type ShownSheet,
+} from './gate-acts';
+export { DEMONSTRATION_PIN, playDemonstration, suppliedTrend, type ReadFile } from './demonstration';
+export { shiftTimes } from './shift-times';

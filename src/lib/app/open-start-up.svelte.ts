@@ -1,0 +1,289 @@
+import { fail, ok, type Result } from '../base';
+import { parsePlant, type Plant } from '../plant';
+import { parseProcedure, type Procedure, type Step } from '../procedure';
+import {
+	allOf,
+	parseEventLine,
+	parseTrend,
+	printEventLine,
+	printInstant,
+	standing,
+	type BodyOf,
+	type Draft,
+	type EventKind,
+	type EventOf,
+	type RecordEvent,
+	type Standing,
+	type Trend,
+} from '../record';
+import type { Draft as KeptDraft } from '../store';
+import { signOn, writeEvent, type Signer } from './logbook';
+import type { Problem } from './problem';
+import { SITE_LOG, type Tablet } from './tablet.svelte';
+
+/** Written durably and shown as saved, but for a few seconds still to be taken back. */
+export type Held = { readonly event: RecordEvent; readonly until: number };
+
+export type Seen = { readonly observed?: string };
+
+const TAKE_BACK = 10_000;
+const TICK = 10_000;
+
+/** One start-up as it is open on this tablet: its record, what stands by it now, and the writing of what comes next. */
+export class OpenStartUp {
+	readonly id: string;
+	readonly tablet: Tablet;
+	readonly procedure: Procedure;
+	readonly plant: Plant;
+	readonly opened: EventOf<'start-up opened'>;
+	#log = $state.raw<readonly RecordEvent[]>([]);
+	#site = $state.raw<readonly RecordEvent[]>([]);
+	#trends = $state.raw<ReadonlyMap<string, Trend>>(new Map());
+	#held = $state.raw<Held>();
+	#now = $state.raw(0);
+	#saved = $state.raw<string>();
+	#stops: (() => void)[] = [];
+	#letGo: (() => void) | undefined;
+
+	/** Everything that this tablet knows of the start-up, what may still be taken back included. */
+	readonly events: readonly RecordEvent[] = $derived(
+		this.#held === undefined ? this.#log : [...this.#log, this.#held.event],
+	);
+	readonly standing: Standing = $derived.by(() => this.standingAt(this.instant()));
+
+	private constructor(tablet: Tablet, opened: EventOf<'start-up opened'>, procedure: Procedure, plant: Plant) {
+		this.id = opened.log;
+		this.tablet = tablet;
+		this.opened = opened;
+		this.procedure = procedure;
+		this.plant = plant;
+		this.#now = tablet.clock.now();
+	}
+
+	static async open(tablet: Tablet, id: string): Promise<Result<OpenStartUp, Problem>> {
+		const read = await tablet.store.events.readLog(id);
+		if (!read.ok) return read;
+		const opened = allOf(read.value.events, 'start-up opened')[0];
+		if (opened === undefined) return fail({ kind: 'no-such-start-up', startUp: id });
+		const procedure = parseProcedure(opened.body.documents?.procedure);
+		const plant = parsePlant(opened.body.documents?.plant);
+		if (!procedure.ok) return fail({ kind: 'start-up-unreadable', startUp: id, what: 'procedure' });
+		if (!plant.ok) return fail({ kind: 'start-up-unreadable', startUp: id, what: 'plant description' });
+		const startUp = new OpenStartUp(tablet, opened, procedure.value, plant.value);
+		await startUp.#takeUpHeld();
+		const loaded = await startUp.reload();
+		if (!loaded.ok) return loaded;
+		startUp.#watch();
+		return ok(startUp);
+	}
+
+	close(): void {
+		this.#letGo?.();
+		for (const stop of this.#stops) stop();
+		this.#stops = [];
+	}
+
+	get log(): readonly RecordEvent[] {
+		return this.#log;
+	}
+
+	get siteLog(): readonly RecordEvent[] {
+		return this.#site;
+	}
+
+	get trends(): ReadonlyMap<string, Trend> {
+		return this.#trends;
+	}
+
+	/** What can still be taken back. */
+	get held(): Held | undefined {
+		return this.#held;
+	}
+
+	/** When something was last made durable, in this session. */
+	get saved(): string | undefined {
+		return this.#saved;
+	}
+
+	get isSealed(): boolean {
+		return this.standing.sealed !== undefined;
+	}
+
+	/** Now, or a moment of the clock, as plant local time. */
+	instant(at = this.#now): string {
+		return printInstant(Math.floor(at / 1000) * 1000, this.plant.utcOffsetMinutes);
+	}
+
+	standingAt(instant: string): Standing {
+		return standing(this.procedure, this.events, this.#site, instant);
+	}
+
+	stepOf(id: string): Result<Step, Problem> {
+		const step = this.procedure.steps.find((one) => one.id === id);
+		return step === undefined ? fail({ kind: 'no-such-step', step: id }) : ok(step);
+	}
+
+	/** The certificate and the shift of who holds the tablet: entries are signed with the shift's key. */
+	entrySigner(): Result<Signer, Problem> {
+		const { person } = this.tablet;
+		if (person === undefined) return fail({ kind: 'nobody-chosen' });
+		const shift = this.tablet.shiftOf(person.person, this.id);
+		return shift === undefined ? fail({ kind: 'no-shift', person: person.name }) : ok(shift);
+	}
+
+	draft<K extends EventKind>(kind: K, body: BodyOf<K>, seen: Seen = {}): Result<Draft<K>, Problem> {
+		const { person, device, clock } = this.tablet;
+		if (person === undefined) return fail({ kind: 'nobody-chosen' });
+		const entered = this.instant(clock.now());
+		const { observed } = seen;
+		return ok({
+			log: SITE_KINDS.has(kind) ? SITE_LOG : this.id,
+			kind,
+			body,
+			person: person.person,
+			device,
+			entered,
+			certificate: person.certificate.fingerprint,
+			...(observed === undefined || observed === entered ? {} : { observed }),
+		});
+	}
+
+	/** Signs and keeps an event now. What could still be taken back is kept first, so that the order stays as it happened. */
+	async write<K extends EventKind>(
+		kind: K,
+		body: BodyOf<K>,
+		signer: Signer,
+		seen?: Seen,
+	): Promise<Result<EventOf<K>, Problem>> {
+		const flushed = await this.keepHeld();
+		if (!flushed.ok) return flushed;
+		const draft = this.draft(kind, body, seen);
+		if (!draft.ok) return draft;
+		const written = await writeEvent(this.tablet.store, draft.value, signer);
+		if (written.ok) await this.#wasSaved();
+		return written;
+	}
+
+	/** Signs an event and keeps it so that it can be taken back for ten seconds; then it is part of the record. */
+	async hold<K extends EventKind>(kind: K, body: BodyOf<K>, seen?: Seen): Promise<Result<'saved', Problem>> {
+		const signer = this.entrySigner();
+		if (!signer.ok) return signer;
+		const flushed = await this.keepHeld();
+		if (!flushed.ok) return flushed;
+		const draft = this.draft(kind, body, seen);
+		if (!draft.ok) return draft;
+		const event = await signOn(this.#log, draft.value, signer.value);
+		const kept = await this.tablet.store.drafts.save(this.#heldDraft(event));
+		if (!kept.ok) return kept;
+		const { clock } = this.tablet;
+		this.#held = { event, until: clock.now() + TAKE_BACK };
+		this.#letGo = clock.after(TAKE_BACK, () => void this.keepHeld());
+		await this.#wasSaved();
+		return ok('saved');
+	}
+
+	/** Within ten seconds a slip of the finger is no entry. */
+	async takeBack(): Promise<Result<'taken back' | 'nothing', Problem>> {
+		if (this.#held === undefined) return ok('nothing');
+		this.#letGo?.();
+		const { event } = this.#held;
+		const dropped = await this.tablet.store.drafts.drop(this.#heldKey());
+		if (!dropped.ok) return dropped;
+		if (this.#held?.event.id === event.id) this.#held = undefined;
+		return ok('taken back');
+	}
+
+	/** What could still be taken back becomes part of the record. */
+	async keepHeld(): Promise<Result<'kept', Problem>> {
+		const held = this.#held;
+		if (held === undefined) return ok('kept');
+		this.#letGo?.();
+		const kept = await this.tablet.store.events.append(held.event, { draft: this.#heldKey() });
+		const again = !kept.ok && kept.error.kind === 'chain-moved-on' ? await this.#signAgain(held.event) : kept;
+		if (!again.ok) return again;
+		this.#held = undefined;
+		return this.reload();
+	}
+
+	async reload(): Promise<Result<'kept', Problem>> {
+		const { store } = this.tablet;
+		const [log, site] = await Promise.all([store.events.readLog(this.id), store.events.readLog(SITE_LOG)]);
+		if (!log.ok) return log;
+		if (!site.ok) return site;
+		await this.#readTrends(log.value.events);
+		this.#log = log.value.events;
+		this.#site = site.value.events;
+		this.#now = this.tablet.clock.now();
+		return ok('kept');
+	}
+
+	/** Another tab was faster: the same words are signed again on top of what it wrote. */
+	async #signAgain(event: RecordEvent): Promise<Result<unknown, Problem>> {
+		const signer = this.tablet.shiftOf(event.person, this.id);
+		if (signer === undefined) return fail({ kind: 'no-shift', person: event.person });
+		const { log, kind, body, person, device, entered, observed, certificate } = event;
+		const draft: Draft = {
+			log,
+			kind,
+			body,
+			person,
+			device,
+			entered,
+			...(observed === undefined ? {} : { observed }),
+			...(certificate === undefined ? {} : { certificate }),
+		};
+		return writeEvent(this.tablet.store, draft, signer, { draft: this.#heldKey() });
+	}
+
+	/** On reopening, what was saved and not taken back is kept: its signature was made before. */
+	async #takeUpHeld(): Promise<void> {
+		const { store } = this.tablet;
+		const draft = await store.drafts.read(this.#heldKey());
+		if (!draft.ok || draft.value === undefined) return;
+		const event = parseEventLine((draft.value.typed as { readonly line: string }).line);
+		if (!event.ok) return;
+		const kept = await store.events.append(event.value, { draft: this.#heldKey() });
+		if (!kept.ok) this.#held = { event: event.value, until: this.tablet.clock.now() };
+	}
+
+	#heldKey() {
+		return { startUp: this.id, step: 'held', person: this.tablet.device };
+	}
+
+	#heldDraft(event: RecordEvent): KeptDraft {
+		return { ...this.#heldKey(), typed: { line: printEventLine(event) }, saved: event.entered };
+	}
+
+	async #wasSaved(): Promise<void> {
+		const { clock } = this.tablet;
+		this.#saved = this.instant(clock.now());
+		await this.reload();
+	}
+
+	async #readTrends(events: readonly RecordEvent[]): Promise<void> {
+		const wanted = allOf(events, 'series attached').map(({ body }) => body.attachment.hash);
+		const missing = wanted.filter((hash) => !this.#trends.has(hash));
+		const found: [string, Trend][] = [];
+		for (const hash of missing) {
+			const kept = await this.tablet.store.attachments.read(hash);
+			if (!kept.ok || kept.value === undefined) continue;
+			const trend = parseTrend(await kept.value.blob.text(), this.plant.utcOffsetMinutes);
+			if (trend.ok) found.push([hash, trend.value]);
+		}
+		if (found.length > 0) this.#trends = new Map([...this.#trends, ...found]);
+	}
+
+	/** The clock goes on, and what another tab writes is read. */
+	#watch(): void {
+		const { clock, store } = this.tablet;
+		this.#stops.push(clock.every(TICK, () => (this.#now = clock.now())));
+		this.#stops.push(
+			store.events.watch(this.id, (events) => {
+				if (events !== this.#log.length) void this.reload();
+			}),
+		);
+	}
+}
+
+/** A finding is about the instrument, in every start-up. */
+const SITE_KINDS: ReadonlySet<EventKind> = new Set(['instrument finding']);

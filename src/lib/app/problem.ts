@@ -1,0 +1,26 @@
+import type { ComposeError, SeriesError, TrendError } from '../record';
+import type { CannotOpen, ChainMovedOn, StorageError } from '../store';
+
+/** Why something could not be done, for a person to read and act on. Nothing was kept unless it says so. */
+export type Problem =
+	| StorageError
+	| ChainMovedOn
+	| CannotOpen
+	| ComposeError
+	| SeriesError
+	| TrendError
+	/** The tablet holds no site and no people yet. */
+	| { readonly kind: 'no-site' }
+	| { readonly kind: 'nobody-chosen' }
+	| { readonly kind: 'not-enrolled-here'; readonly person: string }
+	/** Entries are signed with the key of the shift, and none was begun in this start-up. */
+	| { readonly kind: 'no-shift'; readonly person: string }
+	| { readonly kind: 'no-such-start-up'; readonly startUp: string }
+	| { readonly kind: 'start-up-unreadable'; readonly startUp: string; readonly what: string }
+	| { readonly kind: 'no-such-step'; readonly step: string }
+	| { readonly kind: 'sealed'; readonly startUp: string }
+	/** What the rules do not allow: kept as a refused act. */
+	| { readonly kind: 'refused-act'; readonly because: readonly string[] }
+	/** The record went on after the sheet was made: it is shown anew before anybody signs. */
+	| { readonly kind: 'sheet-changed' }
+	| { readonly kind: 'demonstration-stopped'; readonly because: string };

@@ -1,0 +1,70 @@
+import { unreachable } from '../base';
+import { duration, sayRefusal, sayTrendError, type Say } from '../wording';
+import type { Problem } from './problem';
+
+/** What happened, what is safe, what to do: one sentence or two for every problem. */
+export function sayProblem(problem: Problem, say: Say): string {
+	switch (problem.kind) {
+		case 'storage-full':
+		case 'storage-closed':
+		case 'storage-blocked':
+		case 'storage-newer':
+		case 'storage-missing':
+		case 'chain-moved-on':
+		case 'no-gate-key':
+		case 'destroyed':
+		case 'no-site':
+		case 'nobody-chosen':
+		case 'sheet-changed':
+		case 'weak-wrap':
+		case 'damaged-wrap':
+			return say(`problem.${problem.kind}`);
+		case 'storage-failed':
+			return say('problem.storage-failed', { name: problem.name, message: problem.message });
+		case 'wait':
+			return say('problem.wait', { time: duration(problem.milliseconds), left: problem.left });
+		case 'wrong-pin':
+			return say('problem.wrong-pin', { left: problem.left });
+		case 'no-such-field':
+			return say('problem.no-such-field', { step: problem.step, field: problem.field });
+		case 'no-rows-here':
+		case 'calculates-nothing':
+		case 'no-such-step':
+			return say('problem.wrong-step', { step: problem.step });
+		case 'inputs-missing': {
+			const missing = problem.missing.map(({ input, binding }) =>
+				'step' in binding ? `${input} (${say('problem.of step', { step: binding.step })})` : input,
+			);
+			return say('problem.inputs-missing', { missing: [...new Set(missing)].join(', ') });
+		}
+		case 'calculation-refused':
+			return say('problem.calculation-refused', {
+				because: problem.refusals.map((refusal) => sayRefusal(refusal, say)).join('; '),
+			});
+		case 'no-such-point':
+			return say('problem.no-such-point', { column: problem.column });
+		case 'other-basis':
+			return say('problem.other-basis', { column: problem.column, found: problem.found, point: problem.point });
+		case 'no-table':
+		case 'ragged-line':
+		case 'not-a-time':
+		case 'time-runs-back':
+		case 'not-a-number':
+		case 'column-twice':
+			return say('problem.trend', { because: sayTrendError(problem, say) });
+		case 'not-enrolled-here':
+		case 'no-shift':
+			return say(`problem.${problem.kind}`, { person: problem.person });
+		case 'no-such-start-up':
+		case 'sealed':
+			return say(`problem.${problem.kind}`, { startUp: problem.startUp });
+		case 'start-up-unreadable':
+			return say('problem.start-up-unreadable', { startUp: problem.startUp, what: problem.what });
+		case 'refused-act':
+			return say('problem.refused-act', { because: problem.because.join('; ') });
+		case 'demonstration-stopped':
+			return say('problem.demonstration-stopped', { because: problem.because });
+		default:
+			return unreachable(problem);
+	}
+}
