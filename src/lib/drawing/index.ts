@@ -29,6 +29,7 @@ export { rungsOf, type Contact, type ContactState, type Rung } from './ladder/ru
 export { coilShapes } from './ladder/coil';
 export { limitBar, type LimitBar } from './limit-bar';
 export { dashOf, drawPlot, type PlotLook } from './plot/draw-plot';
+export { shownPlot } from './plot/shown-plot';
 export { drawTimeline, type Span, type Timeline, type TimelineLook } from './timeline';
 export { processSketch, type SketchLook } from './sketch/process-sketch';
 export type { SketchElement } from './sketch/element-names';

@@ -1,4 +1,4 @@
-import { drawPlot } from '../../drawing';
+import { drawPlot, shownPlot } from '../../drawing';
 import type { CalcResult, Plot } from '../../calc';
 import { millis } from '../../record';
 import { capitalised, sayNote, type SeriesClock } from '../../wording';
@@ -8,7 +8,6 @@ import { STYLES, type Flow } from '../layout/flow';
 import { table } from '../layout/table';
 import { calculationsOf, zeroOf, type ToldCalculation } from '../story/calculations';
 import { coverageOf } from '../story/coverage';
-import { shownPlot } from '../story/shown-plot';
 import type { Story } from '../story/story';
 import type { Anchors } from './anchors';
 import { inputTable, resultTables, sources, wholeTable } from './calculation-tables';
