@@ -43,6 +43,8 @@ const PEOPLE = [
 /** Where a test bends the story: other values, other people, before anything is signed. */
 export type Bent = {
 	readonly oxygen?: string;
+	/** From when on the certificate of a person is good. */
+	readonly validFrom?: { readonly [person: string]: string };
 	readonly damper?: string;
 	readonly people?: BodyOf<'start-up opened'>['people'];
 	readonly opening?: (body: BodyOf<'start-up opened'>) => BodyOf<'start-up opened'>;
@@ -58,7 +60,10 @@ export type Bent = {
 export async function makeSignedRecord(bent: Bent = {}, onSite?: TestSite): Promise<SignedRecord> {
 	const site = onSite ?? (await makeTestSite());
 	const tablets = new SigningTablets(site, START_UP);
-	for (const person of PEOPLE) await tablets.enrol(person);
+	for (const person of PEOPLE) {
+		const notBefore = bent.validFrom?.[person.person];
+		await tablets.enrol({ ...person, ...(notBefore === undefined ? {} : { notBefore }) });
+	}
 	for (const device of ['T-1', 'T-2']) await tablets.enrolTablet(device);
 	const trustList = await signTrustList(testTrustList(site), site.root.key);
 	await writeSiteLog(tablets, trustList);

@@ -95,6 +95,22 @@ describe('documents and attachments', () => {
 		});
 	});
 
+	test('an attachment that is not as long as its event says', async () => {
+		const record = await makeSignedRecord(
+			{
+				more: async (tablets) => {
+					const body = { text: 'Seen.', attachments: [{ ...attachment, bytes: 5 }] };
+					await tablets.say('note', body, { person: 'TechA', device: 'T-1', entered: at('08:38') });
+				},
+			},
+			site,
+		);
+		const report = await judge(record, record.lines, { attachments: [{ name: 'photo-1.jpg', bytes: photo }] });
+		expect(bad(report).map(({ because }) => because)).toEqual([
+			'photo-1.jpg of T-1 number 6 (note) has 17 bytes; the event says 5.',
+		]);
+	});
+
 	test('a procedure inside that is not the one pinned', async () => {
 		const record = await makeSignedRecord(
 			{ opening: (body) => ({ ...body, procedure: { ...body.procedure, hash: sha256Hex(canonicalJson({})) } }) },

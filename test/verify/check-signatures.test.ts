@@ -101,7 +101,8 @@ async function resigned(
 	index: number,
 	by: string,
 	change: Partial<RecordEvent>,
-	certificateOf?: string,
+	certificateOf = by,
+	of = record,
 ): Promise<readonly string[]> {
 	const {
 		id: _i,
@@ -111,12 +112,12 @@ async function resigned(
 		observedAt: _o,
 		received: _r,
 		...envelope
-	} = record.events[index]!;
-	const certificate = record.tablets.signers.get(certificateOf ?? by)!.certificate.fingerprint;
+	} = of.events[index]!;
+	const certificate = of.tablets.signers.get(certificateOf)!.certificate.fingerprint;
 	const changed = { ...envelope, certificate, ...change } as unknown as Parameters<typeof textOf>[0];
 	const text = textOf(changed);
-	const signature = await sign(utf8(text), record.tablets.signers.get(by)!.key);
-	return record.lines.with(index, printEventLine(fromChecked(text, changed, { signature })));
+	const signature = await sign(utf8(text), of.tablets.signers.get(by)!.key);
+	return of.lines.with(index, printEventLine(fromChecked(text, changed, { signature })));
 }
 
 /** The same 64 bytes, spelled with other padding bits. */
@@ -169,6 +170,25 @@ describe('keys of a shift', () => {
 			record.site,
 		);
 		expect(bad(await judge(bent)).map(({ facts }) => facts.because)).toContain(because);
+	});
+
+	test('do not sign what came before them on their tablet', async () => {
+		const twice = await makeSignedRecord(
+			{
+				stopAfter: 'entries',
+				more: (tablets) => tablets.beginShift('TechB', 'T-2', at('08:30')).then(() => undefined),
+			},
+			record.site,
+		);
+		const { certificate } = twice.tablets.signers.get('TechB T-2')!;
+		const later = twice.tablets.held('T-2').at(-1)!;
+		const entry = twice.events.findIndex(
+			({ device, number, log }) => log === START_UP && device === 'T-2' && number === 2,
+		);
+		const lines = await resigned(entry, 'TechB T-2', { shiftKey: later.id }, 'TechB T-2', twice);
+		expect(certificate.fingerprint).toBe(later.certificate);
+		const all = [...lines, printEventLine(later)];
+		expect(bad(await judge(twice, all)).map(({ facts }) => facts.because)).toContain('shift-key-comes-later');
 	});
 
 	test('of another person or another tablet do not sign', async () => {
@@ -256,6 +276,14 @@ describe('trust', () => {
 		expect(report).toMatchObject({ class: 'TOTAL-FAILED', sub: 'REVOKED' });
 		const [revoked] = bad(report);
 		expect(revoked?.because).toContain('T-1 number 6 (gate released, gate 1)');
+	});
+
+	test('a certificate that was not yet good when its holder began: the early events are named, the later are not', async () => {
+		const early = await makeSignedRecord({ validFrom: { TechA: '2026-05-14T06:05:00Z' } }, record.site);
+		const report = await judge(early);
+		expect(report).toMatchObject({ class: 'TOTAL-FAILED', sub: 'NOT_YET_VALID' });
+		expect(bad(report)).toHaveLength(1);
+		expect(bad(report)[0]?.because).toContain('It is about T-1 number 2 (shift key).');
 	});
 
 	test('a trust list that the root did not sign is no trust list', async () => {
