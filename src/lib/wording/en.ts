@@ -8,6 +8,7 @@ import { GATES } from './en/gates';
 import { NOTES } from './en/notes';
 import { SCREEN_ACTS } from './en/screen-acts';
 import { SCREEN_LINE } from './en/screen-line';
+import { SCREEN_PAGES } from './en/screen-pages';
 import { SCREEN_STEPS } from './en/screen-steps';
 import { STATES } from './en/states';
 
@@ -25,4 +26,5 @@ export const EN = {
 	...SCREEN_LINE,
 	...SCREEN_STEPS,
 	...SCREEN_ACTS,
+	...SCREEN_PAGES,
 } as const;
