@@ -88,8 +88,6 @@ function KINDS(): { readonly [step: string]: Record<string, unknown> } {
 	};
 }
 
-const OXYGEN: { readonly [minutes: number]: readonly string[] } = { 714: ['7.0', '7.2', '7.6', '7.1'] };
-
 /** The night's events, each retold with values, statements and documents; ids and links follow. */
 function retold(): { readonly events: readonly RecordEvent[]; readonly site: readonly RecordEvent[] } {
 	const night = tellNight();
@@ -132,7 +130,7 @@ function bodyOf(event: RecordEvent, told: readonly RecordEvent[], _site: Readonl
 }
 
 function entryBody({ step, outcome }: BodyOf<'entry'>, minutes: number): Record<string, unknown> {
-	const oxygen = OXYGEN[minutes] ?? ['7.0', '7.1', minutes === 114 ? '7.6' : minutes < 330 ? '7.6' : '7.5', '6.9'];
+	const oxygen = ['7.0', '7.1', minutes < 340 ? '7.6' : '7.5', '6.9'];
 	switch (step) {
 		case 'CW':
 		case 'F1':
@@ -175,8 +173,7 @@ function purgeResult(outcome: string): unknown {
 	if (kept !== undefined) return kept;
 	const run = runCalculator('purge-adequacy@1', purgeInputs(outcome === 'try' ? { minutes: 40 } : {}, 60));
 	if (!run.ok) throw new Error(JSON.stringify(run.error));
-	const { plots: _, ...result } = run.value;
-	results.set(outcome, JSON.parse(JSON.stringify(result)));
+	results.set(outcome, JSON.parse(JSON.stringify(run.value)));
 	return results.get(outcome);
 }
 

@@ -85,7 +85,10 @@ function facts(flow: Flow, { events, say, moments, names }: Story): void {
 		told.map(({ body, person, device, entered }) => ({
 			cells: [
 				body.what,
-				[body.begin, body.end].flatMap((at) => (at === undefined ? [] : [moments.short(at)])).join(' – '),
+				[
+					...(body.begin === undefined ? [] : [moments.short(body.begin)]),
+					...(body.end === undefined ? [] : [moments.clock(body.end)]),
+				].join(' – '),
 				say('entries.by', { person: names.person(person), device, entered: moments.short(entered) }),
 			],
 		})),

@@ -53,10 +53,10 @@ function evidenceOf(act: Act, step: string, then: StepStanding | undefined, stor
 
 type SignedLine = NonNullable<Act['event']['body']['statement']>['list'][number];
 
-const asSigned = ({ value, limit, guard, instruments }: SignedLine): readonly string[] => [
-	[value, (instruments ?? []).join(', ')].filter((part) => part !== undefined && part !== '').join('; '),
-	[limit, guard].filter((part) => part !== undefined && part !== '').join(', '),
-];
+function asSigned({ value = '', limit, guard, instruments = [] }: SignedLine): readonly string[] {
+	const others = instruments.filter((id) => !value.includes(id));
+	return [value, others.join(', '), [limit, guard].filter((part) => part !== undefined && part !== '').join(', ')];
+}
 
 function foundIn({ body }: EventOf<'entry'>, story: Story): readonly string[] {
 	const step = story.names.step(body.step);

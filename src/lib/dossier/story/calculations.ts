@@ -1,6 +1,5 @@
 import * as v from 'valibot';
-import { canonicalJson } from '../../base';
-import { runCalculator, type CalcResult } from '../../calc';
+import type { CalcResult } from '../../calc';
 import { isInstant } from '../../identity';
 import { allOf, type EventOf } from '../../record';
 import type { Story } from './story';
@@ -13,7 +12,10 @@ export type ToldCalculation = {
 	readonly counts: boolean;
 };
 
-/** Stored results in the order of the procedure, the newest of each step first. What has not the shape of a result is left to verify. */
+/**
+ * Stored results in the order of the procedure, the newest of each step first; what has not the shape of a result is left to
+ * verify. Nothing is calculated again: another engine rounds the last bits of a logarithm otherwise, and would draw otherwise.
+ */
 export function calculationsOf(story: Story): readonly ToldCalculation[] {
 	const entries = allOf(story.events, 'entry').filter(({ body }) => body.calculation !== undefined);
 	return story.input.procedure.steps.flatMap(({ id }) =>
@@ -24,7 +26,7 @@ export function calculationsOf(story: Story): readonly ToldCalculation[] {
 				const result = calculationOf(entry);
 				if (result === undefined) return [];
 				const counts = story.end.steps.some((step) => step.entry === entry.id);
-				return [{ entry, counts, result: withPlots(result) }];
+				return [{ entry, counts, result }];
 			}),
 	);
 }
@@ -39,15 +41,6 @@ export function calculationOf({ body }: EventOf<'entry'>): CalcResult | undefine
 export function zeroOf({ inputs }: CalcResult): string | undefined {
 	const zero = typeof inputs === 'object' && inputs !== null && 'zero' in inputs ? inputs.zero : undefined;
 	return typeof zero === 'string' && isInstant(zero) ? zero : undefined;
-}
-
-/** A record need not keep pictures: the calculator draws them again, when it still says the same. */
-function withPlots(result: CalcResult): CalcResult {
-	if (result.plots !== undefined) return result;
-	const again = runCalculator(result.calc, result.inputs);
-	if (!again.ok || again.value.plots === undefined) return result;
-	const same = canonicalJson(again.value.values) === canonicalJson(result.values);
-	return same ? { ...result, plots: again.value.plots } : result;
 }
 
 /** Numbers of a plot may be absent where JSON could not carry them: such a point is not drawn. */

@@ -24,6 +24,6 @@ export function lapsedBy(
 			const own = entries.filter(({ body }) => body.step === id);
 			if (!own.some(({ observedAt }) => observedAt < over && observedAt <= millis(event.entered))) return [];
 			const again = own.filter(({ observedAt }) => observedAt >= over).sort((a, b) => a.observedAt - b.observedAt)[0];
-			return [{ step: id, again: again === undefined ? undefined : moments.short(again.observed ?? again.entered) }];
+			return [{ step: id, again: again === undefined ? undefined : moments.clock(again.observed ?? again.entered) }];
 		});
 }
