@@ -1,3 +1,4 @@
+import { spawn } from 'node:child_process';
 import { existsSync, mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
@@ -48,7 +49,7 @@ export async function withChromium(use, options = {}) {
 	const context = await chromium.launchPersistentContext(profile, {
 		executablePath: ensureChromium(),
 		headless: true,
-		args: [...QUIET, ...(process.getuid?.() === 0 ? ['--no-sandbox'] : [])],
+		args: FLAGS,
 		...options,
 	});
 	try {
@@ -58,6 +59,52 @@ export async function withChromium(use, options = {}) {
 		rmSync(profile, { recursive: true, force: true });
 	}
 }
+
+/**
+ * Starts a browser on a profile that outlives it, to be killed as a dying tablet kills it: the whole group at once, no
+ * farewell, nothing flushed.
+ *
+ * @param {string} profile
+ */
+export async function startChromium(profile) {
+	for (const left of ['SingletonLock', 'SingletonSocket', 'SingletonCookie', 'DevToolsActivePort'])
+		rmSync(join(profile, left), { force: true });
+	const where = [`--user-data-dir=${profile}`, '--remote-debugging-port=0', 'about:blank'];
+	const child = spawn(ensureChromium(), ['--headless', ...FLAGS, ...where], {
+		stdio: ['ignore', 'ignore', 'pipe'],
+		detached: true,
+	});
+	const ended = new Promise((resolve) => child.once('exit', resolve));
+	const kill = async () => {
+		if (child.pid !== undefined && child.exitCode === null && child.signalCode === null)
+			process.kill(-child.pid, 'SIGKILL');
+		await ended;
+	};
+	try {
+		const browser = await chromium.connectOverCDP(await debuggerOf(child));
+		const context = browser.contexts()[0];
+		if (context === undefined) throw new Error('the browser has no context');
+		return { context, kill };
+	} catch (error) {
+		await kill();
+		throw error;
+	}
+}
+
+/**
+ * @param {import('node:child_process').ChildProcess} child
+ * @returns {Promise<string>} the address that the browser prints when it is ready
+ */
+const debuggerOf = (child) =>
+	new Promise((resolve, reject) => {
+		let said = '';
+		child.stderr?.on('data', (data) => {
+			said += String(data);
+			const address = /DevTools listening on (ws:\S+)/.exec(said)?.[1];
+			if (address !== undefined) resolve(address);
+		});
+		child.once('exit', () => reject(new Error(`the browser ended before it was ready: ${said.slice(-400)}`)));
+	});
 
 /** A browser speaks to its maker by itself; these keep it silent, and the last keeps every other host out of reach. */
 const QUIET = [
@@ -71,3 +118,5 @@ const QUIET = [
 	'--no-pings',
 	'--host-resolver-rules=MAP * ~NOTFOUND, EXCLUDE localhost, EXCLUDE 127.0.0.1',
 ];
+
+const FLAGS = [...QUIET, ...(process.getuid?.() === 0 ? ['--no-sandbox'] : [])];
