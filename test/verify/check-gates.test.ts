@@ -47,6 +47,19 @@ describe('acts that the rules do not allow', () => {
 	});
 });
 
+test('an act by voice is kept, is not judged, and is not passed over', async () => {
+	const record = await bend({
+		more: async (tablets) => {
+			const body = { gate: 1, caller: 'SupA', code: 'M4XQ-0TDR', callBack: 'telephone 17' };
+			await tablets.say('gate released by voice', body, { person: 'TechA', device: 'T-1', entered: at('08:38') });
+		},
+	});
+	const report = await judge(record);
+	expect(report.class).toBe('INDETERMINATE');
+	expect(bad(report).map(({ name }) => name)).toEqual(['acts by voice and on paper']);
+	expect(report.process).toEqual({ result: 'met with concessions', because: ['gate 1 was released by voice'] });
+});
+
 describe('statements', () => {
 	test('that call a step standing when it was not, or name another proof, or leave one out', async () => {
 		const wrong = await bend({

@@ -1,7 +1,7 @@
 import type { Procedure } from '../procedure';
 import type { RecordEvent, Standing } from '../record';
 import { aboutEvent, nameOf, offences } from './about-event';
-import { failed, type Check } from './pdf/check';
+import { failed, undecided, type Check } from './pdf/check';
 
 /** The two logs that a start-up is judged by, and the procedure that it was run by. */
 export type Replayed = {
@@ -15,7 +15,7 @@ export type Replayed = {
 /** Plays the record again: what the rules of the procedure did not allow when it was done is named, act by act. */
 export function checkGates(replayed: Replayed): readonly Check[] {
 	const byId = new Map([...replayed.startUp, ...replayed.site].map((event) => [event.id, event]));
-	return checkActs(replayed.end, byId);
+	return [...checkActs(replayed.end, byId), ...checkSubstitutes(replayed.startUp)];
 }
 
 function checkActs({ withoutEffect }: Standing, byId: ReadonlyMap<string, RecordEvent>): readonly Check[] {
@@ -27,4 +27,15 @@ function checkActs({ withoutEffect }: Standing, byId: ReadonlyMap<string, Record
 		return failed(name, `${called} was not allowed: ${because}.`, { facts, sub: 'SIG_CONSTRAINTS_FAILURE' });
 	});
 	return offences(name, bad, 'By what the tablet of each act knew: role, another performer, proofs, gates below.');
+}
+
+/** Acts that stand for an absent signatory or a lost key: their rules are not judged here, so they are not passed over. */
+function checkSubstitutes(startUp: readonly RecordEvent[]): readonly Check[] {
+	return startUp
+		.filter(({ kind }) => kind === 'gate released by voice' || kind === 'gate released on paper')
+		.map((event) =>
+			undecided('acts by voice and on paper', `${nameOf(event)} is kept, and counts for nothing here.`, {
+				facts: aboutEvent(event),
+			}),
+		);
 }

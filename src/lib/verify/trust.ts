@@ -83,6 +83,10 @@ async function openLists(
 		(best, list) => (list.sequence > (best?.sequence ?? -1) ? list : best),
 		undefined,
 	);
+	if (good.length === 0) {
+		const because = `None of ${lists.length} is under this root (${bad.join(', ')}).`;
+		return { checks: [undecided(name, because, { sub: 'NO_CERTIFICATE_CHAIN_FOUND' })], newest };
+	}
 	if (bad.length > 0) return { checks: [failed(name, `${bad.length} are not: ${bad.join(', ')}.`)], newest };
 	const facts = { sequence: newest?.sequence ?? 0 };
 	return {
