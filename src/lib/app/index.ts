@@ -7,6 +7,7 @@ export { systemClock, type Clock } from './clock';
 export { Tablet, type TabletPerson } from './tablet.svelte';
 export type { Problem } from './problem';
 export { sayProblem } from './say-problem';
+export { ThisTablet } from './this-tablet.svelte';
 export { OpenStartUp, type Held } from './open-start-up.svelte';
 export {
 	attachSeries,
@@ -36,3 +37,7 @@ export {
 } from './gate-acts';
 export { DEMONSTRATION_PIN, playDemonstration, suppliedTrend, type ReadFile } from './demonstration';
 export { shiftTimes } from './shift-times';
+export { nextStep, StepDesk, type TypedSoFar } from './step-desk.svelte';
+export { previewCalculation, type CalculationPreview } from './calculation-preview';
+export { objectionsNow } from './objections';
+export { copyFile } from './copy-file';

@@ -4,7 +4,6 @@ import { parseProcedure, type Procedure, type Step } from '../procedure';
 import {
 	allOf,
 	parseEventLine,
-	parseTrend,
 	printEventLine,
 	printInstant,
 	standing,
@@ -14,12 +13,12 @@ import {
 	type EventOf,
 	type RecordEvent,
 	type Standing,
-	type Trend,
 } from '../record';
 import type { Draft as KeptDraft } from '../store';
 import { signOn, writeEvent, type Signer } from './logbook';
 import type { Problem } from './problem';
 import { SITE_LOG, type Tablet } from './tablet.svelte';
+import { NO_TRENDS, trendsOf, type Trends } from './trend-files';
 
 /** Written durably and shown as saved, but for a few seconds still to be taken back. */
 export type Held = { readonly event: RecordEvent; readonly until: number };
@@ -38,7 +37,7 @@ export class OpenStartUp {
 	readonly opened: EventOf<'start-up opened'>;
 	#log = $state.raw<readonly RecordEvent[]>([]);
 	#site = $state.raw<readonly RecordEvent[]>([]);
-	#trends = $state.raw<ReadonlyMap<string, Trend>>(new Map());
+	#trends = $state.raw(NO_TRENDS);
 	#held = $state.raw<Held>();
 	#now = $state.raw(0);
 	#saved = $state.raw<string>();
@@ -91,7 +90,7 @@ export class OpenStartUp {
 		return this.#site;
 	}
 
-	get trends(): ReadonlyMap<string, Trend> {
+	get trends(): Trends {
 		return this.#trends;
 	}
 
@@ -186,10 +185,9 @@ export class OpenStartUp {
 	async takeBack(): Promise<Result<'taken back' | 'nothing', Problem>> {
 		if (this.#held === undefined) return ok('nothing');
 		this.#letGo?.();
-		const { event } = this.#held;
 		const dropped = await this.tablet.store.drafts.drop(this.#heldKey());
 		if (!dropped.ok) return dropped;
-		if (this.#held?.event.id === event.id) this.#held = undefined;
+		this.#held = undefined;
 		return ok('taken back');
 	}
 
@@ -210,7 +208,8 @@ export class OpenStartUp {
 		const [log, site] = await Promise.all([store.events.readLog(this.id), store.events.readLog(SITE_LOG)]);
 		if (!log.ok) return log;
 		if (!site.ok) return site;
-		await this.#readTrends(log.value.events);
+		const { utcOffsetMinutes } = this.plant;
+		this.#trends = await trendsOf(log.value.events, this.#trends, { store, utcOffsetMinutes });
 		this.#log = log.value.events;
 		this.#site = site.value.events;
 		this.#now = this.tablet.clock.now();
@@ -258,19 +257,6 @@ export class OpenStartUp {
 		const { clock } = this.tablet;
 		this.#saved = this.instant(clock.now());
 		await this.reload();
-	}
-
-	async #readTrends(events: readonly RecordEvent[]): Promise<void> {
-		const wanted = allOf(events, 'series attached').map(({ body }) => body.attachment.hash);
-		const missing = wanted.filter((hash) => !this.#trends.has(hash));
-		const found: [string, Trend][] = [];
-		for (const hash of missing) {
-			const kept = await this.tablet.store.attachments.read(hash);
-			if (!kept.ok || kept.value === undefined) continue;
-			const trend = parseTrend(await kept.value.blob.text(), this.plant.utcOffsetMinutes);
-			if (trend.ok) found.push([hash, trend.value]);
-		}
-		if (found.length > 0) this.#trends = new Map([...this.#trends, ...found]);
 	}
 
 	/** The clock goes on, and what another tab writes is read. */

@@ -24,7 +24,7 @@ export class Tablet {
 	readonly #kept: KeptTablet;
 	#people = $state.raw<readonly TabletPerson[]>([]);
 	#person = $state.raw<string>();
-	#shifts = $state.raw<ReadonlyMap<string, Signer>>(new Map());
+	#shifts = $state.raw<{ readonly [personAndLog: string]: Signer }>({});
 	#lastTouch = $state.raw(0);
 	#now = $state.raw(0);
 	/** PIN of everybody on a demonstration, shown where people are. */
@@ -96,11 +96,11 @@ export class Tablet {
 	}
 
 	shiftOf(person: string, log: string): Signer | undefined {
-		return this.#shifts.get(JSON.stringify([person, log]));
+		return this.#shifts[JSON.stringify([person, log])];
 	}
 
 	keepShift(person: string, log: string, signer: Signer): void {
-		this.#shifts = new Map([...this.#shifts, [JSON.stringify([person, log]), signer]]);
+		this.#shifts = { ...this.#shifts, [JSON.stringify([person, log])]: signer };
 	}
 
 	/** The gate key of a person, opened for one act. The try is counted before it is made. */

@@ -13,7 +13,7 @@ type Reading = NonNullable<Entry['values']>[number];
 
 /** A value as a person gives it: the text, and what is not as the plant description says. */
 export type TypedValue = { readonly typed: string } & Partial<
-	Pick<Reading, 'instrument' | 'readBy' | 'where' | 'analyserMode' | 'observed' | 'raw'>
+	Pick<Reading, 'unit' | 'instrument' | 'readBy' | 'where' | 'analyserMode' | 'observed' | 'raw'>
 >;
 
 export type TypedRow = {

@@ -1,0 +1,148 @@
+import { ok, type Result } from '../base';
+import type { Step } from '../procedure';
+import { parseTrend, type Trend, type Typed, type TypedRow, type TypedValue } from '../record';
+import { attachSeries, calculate, enter, type TrendFile } from './entries';
+import type { OpenStartUp } from './open-start-up.svelte';
+import type { Problem } from './problem';
+import { fromUtf8, type Json } from '../base';
+
+/** What a person has typed or touched on a step so far. It is kept with every change: nothing half typed is lost. */
+export type TypedSoFar = {
+	readonly values?: { readonly [field: string]: TypedValue };
+	readonly rows?: { readonly [row: string]: TypedRow };
+	readonly confirmed?: readonly string[];
+	readonly choice?: string;
+	readonly flow?: 'unbroken' | 'broken' | 'not looked at';
+	readonly begun?: string;
+	readonly inputs?: { readonly [input: string]: string };
+	readonly party?: string;
+	readonly note?: string;
+	readonly mode?: NonNullable<TypedValue['analyserMode']>;
+};
+
+/** One step as it lies open before a person: what is typed so far, and its saving. */
+export class StepDesk {
+	readonly startUp: OpenStartUp;
+	readonly step: Step;
+	#draft = $state.raw<TypedSoFar>({});
+	#file = $state.raw<TrendFile>();
+	#problem = $state.raw<Problem>();
+	#busy = $state.raw(false);
+	#saving: Promise<unknown> = Promise.resolve();
+
+	private constructor(startUp: OpenStartUp, step: Step, draft: TypedSoFar) {
+		this.startUp = startUp;
+		this.step = step;
+		this.#draft = draft;
+	}
+
+	static async open(startUp: OpenStartUp, id: string): Promise<Result<StepDesk, Problem>> {
+		const step = startUp.stepOf(id);
+		if (!step.ok) return step;
+		const kept = await startUp.tablet.store.drafts.read(keyOf(startUp, id));
+		if (!kept.ok) return kept;
+		return ok(new StepDesk(startUp, step.value, (kept.value?.typed ?? {}) as TypedSoFar));
+	}
+
+	get draft(): TypedSoFar {
+		return this.#draft;
+	}
+
+	/** The trend that was chosen or pasted, before it is attached. */
+	get file(): TrendFile | undefined {
+		return this.#file;
+	}
+
+	readonly trend: Result<Trend, Problem> | undefined = $derived.by(() => {
+		if (this.#file === undefined) return undefined;
+		return parseTrend(fromUtf8(this.#file.bytes), this.startUp.plant.utcOffsetMinutes);
+	});
+
+	get problem(): Problem | undefined {
+		return this.#problem;
+	}
+
+	get busy(): boolean {
+		return this.#busy;
+	}
+
+	type(draft: TypedSoFar): void {
+		this.#draft = draft;
+		this.#problem = undefined;
+		const { store, clock } = this.startUp.tablet;
+		const saved = this.startUp.instant(clock.now());
+		const row = { ...keyOf(this.startUp, this.step.id), typed: draft as unknown as Json, saved };
+		this.#saving = this.#saving
+			.then(() => store.drafts.save(row))
+			.then((kept) => {
+				if (!kept.ok) this.#problem = kept.error;
+			});
+	}
+
+	choose(file: TrendFile | undefined): void {
+		this.#file = file;
+		this.#problem = undefined;
+	}
+
+	/** @returns whether it was saved; else `problem` says why, and what was typed stays */
+	async save(): Promise<boolean> {
+		return this.#keep(() => {
+			const { startUp, step } = this;
+			const { note, inputs } = this.#draft;
+			const said = note === undefined || note.trim() === '' ? {} : { note };
+			if (step.kind === 'calculation')
+				return calculate(startUp, step.id, { ...said, ...(inputs === undefined ? {} : { typed: inputs }) });
+			if (step.kind === 'series' && this.#file !== undefined) return attachSeries(startUp, step.id, this.#file, note);
+			return enter(startUp, step.id, { ...typedOf(this.#draft), ...said });
+		});
+	}
+
+	/** What no limit decides: it cannot be done now, or it does not apply here. */
+	async giveReason(outcome: 'cannot do' | 'not applicable', reason: string): Promise<boolean> {
+		return this.#keep(() => enter(this.startUp, this.step.id, { outcome, reason }));
+	}
+
+	async #keep(write: () => Promise<Result<'saved', Problem>>): Promise<boolean> {
+		if (this.#busy) return false;
+		this.#busy = true;
+		await this.#saving;
+		const written = await write();
+		if (written.ok) {
+			await this.startUp.tablet.store.drafts.drop(keyOf(this.startUp, this.step.id));
+			this.#draft = {};
+			this.#file = undefined;
+		}
+		this.#problem = written.ok ? undefined : written.error;
+		this.#busy = false;
+		return written.ok;
+	}
+}
+
+const keyOf = (startUp: OpenStartUp, step: string) => ({
+	startUp: startUp.id,
+	step,
+	person: startUp.tablet.person?.person ?? '',
+});
+
+function typedOf({ values, rows, confirmed, choice, flow, begun, mode }: TypedSoFar): Typed {
+	const read = (value: TypedValue): TypedValue => (mode === undefined ? value : { ...value, analyserMode: mode });
+	return {
+		...(values === undefined
+			? {}
+			: { values: Object.fromEntries(Object.entries(values).map(([field, value]) => [field, read(value)])) }),
+		...(rows === undefined ? {} : { rows }),
+		...(confirmed === undefined ? {} : { confirmed }),
+		...(choice === undefined ? {} : { choice }),
+		...(flow === undefined ? {} : { flow }),
+		...(begun === undefined ? {} : { from: begun }),
+	};
+}
+
+/** Where work goes on after a step: the next one of the rung in work that does not stand, its own gate first. */
+export function nextStep({ procedure, standing }: OpenStartUp, after: string): string | undefined {
+	const at = procedure.steps.findIndex(({ id }) => id === after);
+	const stateOf = (id: string) => standing.steps.find(({ step }) => step === id)?.state;
+	const isOpen = ({ id, gate }: Step): boolean =>
+		gate === procedure.steps[at]?.gate && id !== after && ['not yet', 'lapsed', 'failed'].includes(stateOf(id) ?? '');
+	return (procedure.steps.slice(at + 1).find(isOpen) ?? procedure.steps.find(isOpen))?.id;
+}
