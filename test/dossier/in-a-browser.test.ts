@@ -23,9 +23,9 @@ async function bundled(): Promise<string> {
 		logLevel: 'error',
 		build: { write: false, minify: false, lib: { entry, formats: ['iife'], name: 'room' } },
 	});
-	const output = Array.isArray(built) ? built[0]!.output : 'output' in built ? built.output : [];
-	const [chunk] = output;
-	if (chunk?.type !== 'chunk') throw new Error('nothing was built');
+	const [output] = Array.isArray(built) ? built : [built];
+	const chunk = output !== undefined && 'output' in output ? output.output[0] : undefined;
+	if (chunk === undefined) throw new Error('nothing was built');
 	return chunk.code;
 }
 

@@ -53,7 +53,8 @@ export function storyOf(input: DossierInput): Result<Story, DossierError> {
 	const end = standing(input.procedure, startUp.value, site.value, sealed.entered);
 	// Later events are left out of the answer by its instant, so they are looked for by the seal itself.
 	const inside = new Set(new Knowledge(startUp.value).past(sealed)).add(sealed.id);
-	const after = startUp.value.filter(({ id }) => !inside.has(id)).map(({ id }) => id);
+	// A tablet countersigns the head that the seal names, and so after it.
+	const after = startUp.value.filter(({ id, kind }) => !inside.has(id) && kind !== 'chain head').map(({ id }) => id);
 	if (after.length > 0) return fail({ kind: 'after-the-seal', events: after });
 	const say = speaker(input.language);
 	return ok({

@@ -1,0 +1,74 @@
+import { describe, expect, test } from 'vitest';
+import type { CalcNote } from '../../src/lib/calc';
+import { momentsAt, purgeSentence, sayNote, sayNumber, speaker } from '../../src/lib/wording';
+import { purgeInputs, run } from '../calc/purge/purge-scene';
+
+const say = speaker('en');
+const clock = { zero: '2026-03-14T20:40:00+01:00', moments: momentsAt(60, say) };
+
+describe('a note of a calculator', () => {
+	test('is a sentence with its facts in the units of the plant', () => {
+		const note: CalcNote = {
+			kind: 'above-line',
+			level: 'reason',
+			criterion: 'b',
+			place: 'AT-213',
+			count: 7,
+			accept: 0.077,
+			oxygen: 0.0948,
+			t: 2040,
+			last: 0.0831,
+		};
+		expect(sayNote(note, clock)).toBe(
+			'(b) AT-213: 7 readings of the hold above 7.7\u00a0%, the worst 9.48\u00a0% at 21:14, the last 8.31\u00a0%.',
+		);
+	});
+
+	test('tells a moment in seconds where the clock of the series is not known', () => {
+		const note: CalcNote = {
+			kind: 'gap-in-readings',
+			level: 'reason',
+			place: 'AT-213',
+			from: 600,
+			to: 900,
+			longest: 120,
+		};
+		expect(sayNote(note)).toBe('AT-213: no reading from 600\u00a0s to 900\u00a0s; at most 2\u00a0min is allowed.');
+	});
+
+	test('that the catalogue does not know is said by its name and facts: nothing is lost', () => {
+		const note: CalcNote = { kind: 'throat-changed-twice', level: 'warning', byHowMuch: 0.002, parts: ['a', 'b'] };
+		expect(sayNote(note, clock)).toBe('Throat changed twice: by how much 0.002, parts a, b.');
+	});
+
+	test('that lacks a fact of its sentence is said plainly', () => {
+		expect(sayNote({ kind: 'slowest-place', level: 'remark' }, clock)).toBe('Slowest place.');
+	});
+});
+
+describe('the sentence of an adequate purge', () => {
+	const result = run({ ...purgeInputs({}, 60), zero: clock.zero });
+
+	test('says since when, at how many measured places, against which line, for how long, and that it is no permission', () => {
+		const sentence = purgeSentence(result, say, clock)!;
+		expect(sentence).toMatch(
+			/^Readings adequate since \d\d:\d\d: at all 4 measured places at or below 7\.7\u00a0% moist \(limit 8\u00a0%, guard 0\.3\) for /,
+		);
+		expect(sentence).toContain('volumes without analyser: bypass, chute.');
+		expect(sentence).toMatch(/Slowest: Filter hopper\. Not a permission\.$/);
+	});
+
+	test('is not said of a purge that is not adequate', () => {
+		expect(purgeSentence(run(purgeInputs({ minutes: 40 }, 60)), say, clock)).toBeUndefined();
+	});
+});
+
+test.each([
+	[16050.4, '16\u00a0050'],
+	[-3.14159, '−3.142'],
+	[0.00012345, '1.234e−4'],
+	[1234.5, '1235'],
+	[0, '0'],
+])('%d is shown as %s', (value, shown) => {
+	expect(sayNumber(value)).toBe(shown);
+});
