@@ -3,6 +3,7 @@ import { calc } from './calc';
 import { checkProcedureCommand } from './check-procedure';
 import { demo } from './demo';
 import { standingCommand } from './standing';
+import { trend } from './trend';
 import { verify } from './verify';
 
 /** Every command under its name; one file each in this folder. */
@@ -12,4 +13,5 @@ export const COMMANDS: { readonly [name: string]: Command } = {
 	calc,
 	'check-procedure': checkProcedureCommand,
 	standing: standingCommand,
+	trend,
 };
