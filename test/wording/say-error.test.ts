@@ -83,7 +83,7 @@ describe('calculators', () => {
 
 	test('that say something of their own lose nothing of it', () => {
 		const own: Refusal = { kind: 'three-corners', input: 'duct', corners: 3, tags: ['FT-1', 'FT-2'] };
-		expect(sayRefusal(own, say)).toBe('duct: Three corners: corners 3, tags FT-1 / FT-2.');
+		expect(sayRefusal(own, say)).toBe('duct: Three corners: corners 3, tags FT-1, FT-2.');
 		expect(sayRefusal({ kind: 'out-of-range', input: 'x' }, say)).toBe('x: Out of range.');
 	});
 
