@@ -24,9 +24,8 @@ async function bundled(): Promise<string> {
 		build: { write: false, minify: false, lib: { entry, formats: ['iife'], name: 'room' } },
 	});
 	const [output] = Array.isArray(built) ? built : [built];
-	const chunk = output !== undefined && 'output' in output ? output.output[0] : undefined;
-	if (chunk === undefined) throw new Error('nothing was built');
-	return chunk.code;
+	if (output === undefined || !('output' in output)) throw new Error('nothing was built');
+	return output.output[0].code;
 }
 
 /** Bytes travel as text, in both directions. */
