@@ -7,6 +7,8 @@ import { statesOf, type ShownContact, type ShownRung, type Told } from './shown-
 export type LeaderNote = {
 	readonly contact: string;
 	readonly word: string;
+	/** What it speaks of, when that is not the text itself: "Fan flow". */
+	readonly subject?: string;
 	readonly text: string;
 	/** The step that the note names, when it names one. */
 	readonly step?: string;
@@ -30,10 +32,27 @@ export function leaderNotes(
 			return stepNote(contact, rung, say('ui.lead.failed'), around, (found) => found === 'failed');
 		if (state === 'lapsed') return lapseNote(contact, rung, around);
 		if (of === 'permissive' && contact.powered && state !== 'stands')
-			return [{ contact: id, word: say('ui.lead.condition'), text: `${label}: ${contact.word}` }];
+			return [{ contact: id, word: say('ui.lead.condition'), subject: label, text: contact.word }];
 		return [];
 	});
 }
+
+/** On a drawing one fact is said once, for everything that it took. */
+export function mergedNotes(notes: readonly LeaderNote[]): readonly LeaderNote[] {
+	const merged = new Map<string, LeaderNote>();
+	for (const note of notes) {
+		const { word, text, subject } = note;
+		const before = merged.get(`${word} ${text}`);
+		if (before === undefined) merged.set(`${word} ${text}`, note);
+		else if (before.subject !== undefined && subject !== undefined)
+			merged.set(`${word} ${text}`, { ...before, subject: `${before.subject}, ${subject}` });
+	}
+	return [...merged.values()];
+}
+
+/** "fan flow, purge: process-gas fan stopped 02:11 to 02:16" */
+export const noteText = ({ subject, text }: LeaderNote): string =>
+	subject === undefined ? text : `${subject}: ${text}`;
 
 type Around = {
 	readonly procedure: Procedure;
@@ -62,7 +81,7 @@ function lapseNote(contact: ShownContact, { gate }: ShownRung, around: Around): 
 	const cause = lapsed === undefined ? undefined : firstFact(lapsed.why);
 	if (lapsed === undefined || cause === undefined) return [];
 	const said = sayCause(cause, say, moments, namesOf(procedure));
-	return [{ contact: contact.id, word: say('ui.lead.lapsed'), text: `${contact.label}: ${said}`, step: lapsed.step }];
+	return [{ contact: contact.id, word: say('ui.lead.lapsed'), subject: contact.label, text: said, step: lapsed.step }];
 }
 
 const ofGroup = (contact: ShownContact, gate: number, procedure: Procedure, standing: Standing) =>

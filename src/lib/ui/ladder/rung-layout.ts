@@ -1,5 +1,6 @@
 import { roughly } from '../../drawing';
 import type { LeaderNote } from './leader-notes';
+import { placeNotes, type PlacedNote } from './place-notes';
 import type { ShownContact, ShownRung } from './shown-rungs';
 
 /** A piece of a long rung on its own line, joined to the next by a lettered connector. */
@@ -11,24 +12,14 @@ export type Row = {
 	readonly isLast: boolean;
 	/** The power line runs to its end. */
 	readonly leads: boolean;
-	readonly reached: boolean;
 };
 
-type Placed = {
+export type Placed = {
 	readonly contact: ShownContact;
 	readonly x: number;
 	readonly lines: readonly string[];
+	/** How much higher its name stands, where names have to make room for each other. */
 	readonly lift: number;
-};
-
-export type PlacedNote = {
-	readonly note: LeaderNote;
-	readonly y: number;
-	readonly x: number;
-	readonly foot: number;
-	readonly textX: number;
-	readonly anchor: 'start' | 'end';
-	readonly edge: number;
 };
 
 export type OpenedRung = {
@@ -41,66 +32,49 @@ export type OpenedRung = {
 /** The rung in work, opened: names over its contacts, words under them, and the notes led to them. */
 export function openRung(rung: ShownRung, notes: readonly LeaderNote[], width: number): OpenedRung {
 	const [left, right] = [RAIL + FIRST, width - RAIL - COIL];
-	const fits = Math.max(4, Math.floor((right - 60 - left) / PITCH) + 1);
+	const fits = Math.max(4, Math.floor((right - 58 - left) / PITCH) + 1);
 	const count = Math.max(1, Math.ceil(rung.contacts.length / fits));
 	const length = Math.ceil(rung.contacts.length / count);
-	const pitch = Math.min(84, (right - 62 - left) / Math.max(1, length - 1));
+	const pitch = Math.min(86, (right - 58 - left) / Math.max(1, length - 1));
+	let y = HEAD;
 	const rows = Array.from({ length: count }, (_, k): Row => {
 		const own = rung.contacts.slice(k * length, (k + 1) * length);
-		const crowded = own.some(({ label }) => wrapped(label, pitch - 5).length > 2);
-		const contacts = own.map((contact, i): Placed => {
-			const lines = wrapped(contact.label, crowded ? 2 * pitch - 8 : pitch - 5).slice(0, 2);
-			return { contact, x: Math.round(left + i * pitch), lines, lift: crowded && i % 2 === 1 ? 40 : 0 };
-		});
+		const { named, above } = withNames(own, left, pitch);
+		y += above + (k === 0 ? 0 : BETWEEN);
 		return {
-			letter: String.fromCharCode(97 + k),
-			contacts,
-			y: HEAD + k * ROW,
+			letter: String.fromCharCode('a'.charCodeAt(0) + k),
+			contacts: named,
+			y,
 			isFirst: k === 0,
 			isLast: k === count - 1,
-			leads: own.every(({ state }) => state === 'stands' || state === 'not applicable') && own.every((c) => c.powered),
-			reached: own[0]?.powered ?? rung.reached,
+			leads: own.every(({ powered, state }) => powered && (state === 'stands' || state === 'not applicable')),
 		};
 	});
-	const end = HEAD + (count - 1) * ROW;
-	const placed = placeNotes(rows, notes, width);
-	return {
-		rows,
-		notes: placed,
-		coil: { x: right, y: end },
-		height: end + 62 + placed.length * NOTE + 6,
-	};
+	const placed = placeNotes(rows, notes, { top: y + 62, left: RAIL + 16, right: width - RAIL });
+	return { rows, notes: placed, coil: { x: right, y }, height: y + 62 + placed.length * NOTE + 6 };
 }
 
-/** Leftmost first while every text has room on the left of its leader, so that none crosses; else rightmost first. */
-function placeNotes(rows: readonly Row[], notes: readonly LeaderNote[], width: number): readonly PlacedNote[] {
-	const lastRow = rows.at(-1);
-	if (lastRow === undefined) return [];
-	const found = notes.slice(0, MOST_NOTES).flatMap((note) => {
-		const row = rows.find(({ contacts }) => contacts.some(({ contact }) => contact.id === note.contact));
-		const at = row?.contacts.find(({ contact }) => contact.id === note.contact);
-		const length = roughly(`${note.word} ${note.text}`, 'strong', 18) + 8;
-		return row === undefined || at === undefined ? [] : [{ note, row, x: at.x, length }];
-	});
-	const allLeft = found.every(({ x, length }) => TEXT + length + 18 <= x);
-	const ordered = allLeft ? found : [...found].sort((a, b) => b.x - a.x);
-	return ordered.map(({ note, row, x, length }, k): PlacedNote => {
-		const y = lastRow.y + 62 + k * NOTE + 24;
-		const foot = row.y + 52;
-		if (allLeft) return { note, y, x, foot, textX: TEXT, anchor: 'start', edge: TEXT + length };
-		const fits = x + 22 + length <= width - RAIL;
-		return fits
-			? { note, y, x, foot, textX: x + 20, anchor: 'start', edge: x + 14 }
-			: {
-					note,
-					y,
-					x,
-					foot,
-					textX: Math.max(x - 20, TEXT + length),
-					anchor: 'end',
-					edge: Math.max(x - 14, TEXT + length),
-				};
-	});
+/** Names on one level where each fits over its contact; else on two, so that each has the width of two contacts. */
+function withNames(
+	contacts: readonly ShownContact[],
+	left: number,
+	pitch: number,
+): { readonly named: readonly Placed[]; readonly above: number } {
+	const single = contacts.map(({ label }) => wrapped(label, pitch - 5));
+	const isCrowded = single.some((lines) => lines.length > 2 || lines.some((line) => line.endsWith('…')));
+	const lines = isCrowded ? contacts.map(({ label }) => wrapped(label, 2 * pitch - 10).slice(0, 2)) : single;
+	const tall = (level: 0 | 1): number =>
+		Math.max(0, ...lines.flatMap((each, i) => (i % 2 === level ? each.length : []))) * LINE;
+	const lift = isCrowded ? tall(0) + 6 : 0;
+	return {
+		above: 34 + (isCrowded ? lift + tall(1) : Math.max(tall(0), tall(1))),
+		named: contacts.map((contact, i) => ({
+			contact,
+			x: Math.round(left + i * pitch),
+			lines: lines[i] ?? [],
+			lift: i % 2 === 1 ? lift : 0,
+		})),
+	};
 }
 
 /** In lines of at most this width; the letters are the narrow ones. */
@@ -112,14 +86,15 @@ function wrapped(label: string, width: number): readonly string[] {
 		if (last !== undefined && narrow(joined) <= width) lines[lines.length - 1] = joined;
 		else lines.push(word);
 	}
-	return lines.map((line) => shortened(line, width));
+	const shown = lines.length > 2 ? [...lines.slice(0, 1), lines.slice(1).join(' ')] : lines;
+	return (lines.length > 2 && narrow(shown[1] ?? '') <= width ? lines : shown).map((line) => shortened(line, width));
 }
 
 function shortened(line: string, width: number): string {
 	if (narrow(line) <= width) return line;
 	let text = line;
 	while (text.length > 3 && narrow(`${text}…`) > width) text = text.slice(0, -1);
-	return `${text}…`;
+	return `${text.trimEnd()}…`;
 }
 
 const narrow = (text: string): number => roughly(text, 'text', 17) * NARROW;
@@ -129,9 +104,9 @@ const NARROW = 0.76;
 export const RAIL = 10;
 const FIRST = 46;
 const COIL = 44;
-const PITCH = 56;
-const HEAD = 118;
-const ROW = 140;
+/** Closer than this a finger would meet two contacts. */
+const PITCH = 48;
+const LINE = 19;
+const HEAD = 42;
+const BETWEEN = 66;
 const NOTE = 48;
-const TEXT = 26;
-const MOST_NOTES = 4;
