@@ -28,3 +28,20 @@ test(`a browser killed ${CYCLES} times while entries are written loses none that
 		}),
 	);
 }, 180_000);
+
+test('a browser killed while it tries a wrong PIN has used that try up', async () => {
+	await servedTablet(async ({ address, saved }) =>
+		withProfile(async (start) => {
+			for (const left of [10, 9, 8]) {
+				const browser = await start();
+				const tab = await openTab(browser.context, address);
+				if (left === 10) await tab.ask('enrol');
+				expect(await tab.ask('triesLeft')).toBe(left);
+				saved.clear();
+				tab.ask('guess').catch(() => undefined);
+				await expect.poll(() => saved.size, { timeout: 20_000, interval: 1 }).toBe(1);
+				await browser.kill();
+			}
+		}),
+	);
+}, 120_000);

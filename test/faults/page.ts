@@ -1,9 +1,11 @@
+import { makeGateKey, webRandom } from '../../src/lib/identity';
 import { checkChains, nextEnvelope, unsignedEvent, type RecordEvent } from '../../src/lib/record';
 import { openStore, type Store } from '../../src/lib/store';
 
 /** A page with the real store and nothing else, for the tests beside it to be cruel to. */
 
 const LOG = 'SU-0001';
+const OWNER = { person: 'P-01', device: 'T-1' };
 const NOW = '2026-05-04T12:00:00+02:00';
 
 const durabilities = new Set<string>();
@@ -77,6 +79,28 @@ const page = {
 	photos: async () => {
 		const list = await (await store()).attachments.list();
 		return list.ok ? list.value.length : list.error;
+	},
+
+	enrol: async () => {
+		const gateKey = await makeGateKey({ ...OWNER, pin: '83920174', random: webRandom });
+		if (!gateKey.ok) throw new Error(gateKey.error.kind);
+		const row = { ...OWNER, gateKey: gateKey.value, certificate: new Uint8Array() };
+		return (await store()).gateKeys.save(row);
+	},
+
+	/** Tells the server of the try as soon as it is counted, while the PIN is still being stretched. */
+	guess: async () => {
+		const { gateKeys } = await store();
+		const before = await page.triesLeft();
+		const answer = gateKeys.open({ ...OWNER, pin: '00000000', now: Date.parse(NOW) });
+		while ((await page.triesLeft()) === before) await new Promise((resolve) => setTimeout(resolve, 1));
+		await fetch('/saved?a try');
+		return answer;
+	},
+
+	triesLeft: async () => {
+		const may = await (await store()).gateKeys.mayTry(OWNER, Date.parse(NOW));
+		return may.ok && may.value.kind === 'may-try' ? may.value.left : undefined;
 	},
 
 	health: async () => (await store()).health.look(),

@@ -1,13 +1,12 @@
 import 'fake-indexeddb/auto';
-import { expect, test, vi } from 'vitest';
+import { describe, expect, test, vi } from 'vitest';
 import { makeEntryKey } from '../../src/lib/identity';
-import { openStore, type Memory } from '../../src/lib/store';
+import { openStore, type Memory, type Store } from '../../src/lib/store';
 import { LOG, NOON, notes } from '../support/kept-events';
 import { answer, freshName, tab } from '../support/open-stores';
 import { value } from '../support/test-site';
 
-function memory(): Memory {
-	let kept: string | null = null;
+function memory(kept: string | null = null): Memory {
 	return { read: () => kept, write: (text) => (kept = text) };
 }
 
@@ -47,6 +46,39 @@ test('a tablet that still has its database but forgot it is not called erased', 
 	const name = freshName();
 	(await tab(name, { memory: memory() })).close();
 	expect((await tab(name, { memory: memory() })).erased).toBeUndefined();
+});
+
+test('a memory that nobody can read starts anew and stops no tablet', async () => {
+	const [name, remembered] = [freshName(), memory('{"id":')];
+	const before = await tab(name, { memory: remembered });
+	expect(before.erased).toBeUndefined();
+	before.close();
+	await answer(indexedDB.deleteDatabase(name));
+	expect((await tab(name, { memory: remembered })).erased?.made).toBe(NOON);
+});
+
+describe('a connection that the browser loses', () => {
+	const lost = async (name: string, meanwhile: () => Promise<unknown>): Promise<Store> => {
+		const spy = vi.spyOn(IDBDatabase.prototype, 'transaction');
+		const store = await tab(name);
+		await store.events.append(notes(1)[0]!);
+		for (const connection of new Set(spy.mock.contexts as readonly IDBDatabase[])) connection.close();
+		spy.mockRestore();
+		await meanwhile();
+		return store;
+	};
+
+	test('is made again, and the tablet goes on', async () => {
+		const store = await lost(freshName(), () => Promise.resolve());
+		expect(value(await store.events.readLog(LOG)).events).toEqual(notes(1));
+	});
+
+	test('is not made again to an empty database, as if nothing had been there', async () => {
+		const name = freshName();
+		const store = await lost(name, () => answer(indexedDB.deleteDatabase(name)));
+		for (let twice = 0; twice < 2; twice++)
+			expect(await store.events.append(notes(1)[0]!)).toEqual({ ok: false, error: { kind: 'storage-closed' } });
+	});
 });
 
 test('an app that is older than the database leaves it alone and says so', async () => {

@@ -1,3 +1,4 @@
+import * as v from 'valibot';
 import type { Birth } from './rows';
 
 /**
@@ -16,8 +17,10 @@ export function pageMemory(name: string): Memory | undefined {
 
 /** @returns the database that is gone, when this is not the one remembered */
 export function erasedBefore(memory: Memory, birth: Birth): Birth | undefined {
-	const text = memory.read();
-	const remembered = text === null ? undefined : (JSON.parse(text) as Birth);
-	if (remembered === undefined) memory.write(JSON.stringify(birth));
-	return remembered === undefined || remembered.id === birth.id ? undefined : remembered;
+	const remembered = v.safeParse(BirthSchema, memory.read());
+	// Nothing that can be read says nothing about what was lost: from now on it is remembered.
+	if (!remembered.success) memory.write(JSON.stringify(birth));
+	return remembered.success && remembered.output.id !== birth.id ? remembered.output : undefined;
 }
+
+const BirthSchema = v.pipe(v.string(), v.parseJson(), v.object({ id: v.string(), made: v.string() }));
