@@ -38,7 +38,7 @@ describe('a note of a calculator', () => {
 
 	test('that the catalogue does not know is said by its name and facts: nothing is lost', () => {
 		const note: CalcNote = { kind: 'throat-changed-twice', level: 'warning', byHowMuch: 0.002, parts: ['a', 'b'] };
-		expect(sayNote(note, clock)).toBe('Throat changed twice: by how much 0.002, parts a / b.');
+		expect(sayNote(note, clock)).toBe('Throat changed twice: by how much 0.002, parts a, b.');
 	});
 
 	test('that lacks a fact of its sentence is said plainly', () => {

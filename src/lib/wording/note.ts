@@ -37,7 +37,7 @@ const PLACEHOLDER = /\{(\w+)(?::([\w%]+))?\}/g;
 
 function shownFact(fact: Json, form: string | undefined, clock: SeriesClock | undefined): string {
 	if (form === 'basis' && (fact === 'wet' || fact === 'dry')) return STATES[`basis.${fact}`];
-	if (typeof fact !== 'number' || form === undefined) return sayFact(fact, ', ');
+	if (typeof fact !== 'number' || form === undefined) return sayFact(fact);
 	if (form === 'time') return duration(fact * 1000);
 	if (form === 'clock')
 		return clock?.zero === undefined
@@ -59,20 +59,19 @@ const FORMS: { readonly [form: string]: { readonly quantity: QuantityName; reado
 
 function plainly(kind: string, facts: { readonly [name: string]: Json }): string {
 	const said = Object.entries(facts).flatMap(([name, value]) =>
-		value === null ? [] : [`${spaced(name)} ${sayFact(value, ' / ')}`],
+		value === null ? [] : [`${spaced(name)} ${sayFact(value)}`],
 	);
 	const title = capitalised(spaced(kind));
 	return said.length === 0 ? `${title}.` : `${title}: ${said.join(', ')}.`;
 }
 
-/** @param between what stands between the items of a list */
-function sayFact(value: Json, between: string): string {
+function sayFact(value: Json): string {
 	if (typeof value === 'number') return sayNumber(value);
 	if (typeof value === 'string') return value;
 	if (typeof value === 'boolean' || value === null) return String(value);
-	if (Array.isArray(value)) return value.map((item: Json) => sayFact(item, between)).join(between);
+	if (Array.isArray(value)) return value.map(sayFact).join(', ');
 	return Object.entries(value)
-		.map(([name, part]) => `${spaced(name)} ${sayFact(part, between)}`)
+		.map(([name, part]) => `${spaced(name)} ${sayFact(part)}`)
 		.join(' ');
 }
 
