@@ -5,7 +5,7 @@ import { parsePlant } from '../lib/plant';
 import { parseProcedure } from '../lib/procedure';
 import { allOf, parseEventLine } from '../lib/record';
 import type { Rebuild } from '../lib/verify';
-import { BUILD } from './version';
+import { BUILD } from '../lib/demo';
 
 type Bytes = Uint8Array<ArrayBuffer>;
 type Files = Parameters<Rebuild['build']>[0];

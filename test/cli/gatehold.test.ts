@@ -3,7 +3,7 @@ import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { expect, test } from 'vitest';
 import { COMMANDS } from '../../src/cli/commands';
-import { BUILD } from '../../src/cli/version';
+import { BUILD } from '../../src/lib/demo';
 import { CATALOGUE } from '../../src/lib/calc';
 import { PURGE_INPUTS } from '../support/small-procedure';
 

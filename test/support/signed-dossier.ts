@@ -1,4 +1,4 @@
-import { BUILD } from '../../src/cli/version';
+import { BUILD } from '../../src/lib/demo';
 import { buildDossier, INKS, signIncrement, type DossierInput } from '../../src/lib/dossier';
 import { sign } from '../../src/lib/identity';
 import { PlantSchema } from '../../src/lib/plant';
