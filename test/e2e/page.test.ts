@@ -25,7 +25,7 @@ test('the page asks no other machine, is free of faults that a program can see, 
 
 			for (const size of SIZES) {
 				await page.setViewportSize(size);
-				await page.goto(address);
+				await page.goto(`${address}/about`);
 				for (const look of ['Day', 'Night', 'Glare']) {
 					await page.getByRole('button', { name: look }).click();
 					expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBe(size.width);
@@ -48,7 +48,7 @@ test('the look that was chosen is still there after a reload', async () => {
 	await served((address) =>
 		withChromium(async (browser) => {
 			const page = await browser.newPage();
-			await page.goto(address);
+			await page.goto(`${address}/about`);
 			await page.getByRole('button', { name: 'Night' }).click();
 			await page.reload();
 			await page.getByRole('button', { name: 'Night', pressed: true }).waitFor();
@@ -61,7 +61,7 @@ test('the page tells the commands that there are, and no others', async () => {
 	await served((address) =>
 		withChromium(async (browser) => {
 			const page = await browser.newPage();
-			await page.goto(address);
+			await page.goto(`${address}/about`);
 			const told = await page.locator('dt').allTextContents();
 			expect(told.map((usage) => usage.split(' ')[0]).sort()).toEqual(Object.keys(COMMANDS).sort());
 		}),

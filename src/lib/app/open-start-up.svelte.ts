@@ -104,6 +104,11 @@ export class OpenStartUp {
 		return this.#saved;
 	}
 
+	/** The moment that is shown, in milliseconds. */
+	get now(): number {
+		return this.#now;
+	}
+
 	get isSealed(): boolean {
 		return this.standing.sealed !== undefined;
 	}

@@ -1,0 +1,11 @@
+import { error } from '@sveltejs/kit';
+import { sayProblem, StepDesk } from '$lib/app';
+import { speaker } from '$lib/wording';
+import type { PageLoad } from './$types';
+
+export const load: PageLoad = async ({ params, parent }): Promise<{ readonly desk: StepDesk }> => {
+	const { startUp } = await parent();
+	const desk = await StepDesk.open(startUp, params.step);
+	if (!desk.ok) error(404, sayProblem(desk.error, speaker('en')));
+	return { desk: desk.value };
+};
