@@ -3,6 +3,7 @@
 import { writeFileSync } from 'node:fs';
 import { withChromium } from './chromium.mjs';
 
+/** @type {(drawing: string) => string} */
 const frame = (
 	drawing,
 ) => `<body style="margin:0;background:#d9d6cc"><svg width="640" height="480" viewBox="0 0 640 480"

@@ -3,6 +3,11 @@ declare module 'subset-font' {
 	export default function subsetFont(
 		font: Uint8Array,
 		text: string,
-		options?: { readonly targetFormat?: 'woff2' | 'truetype' },
+		options?: {
+			readonly targetFormat?: 'woff2' | 'truetype';
+			/** OpenType features that stay: `kern`. */
+			readonly keepFeatures?: readonly string[];
+			readonly noHinting?: boolean;
+		},
 	): Promise<Uint8Array>;
 }
