@@ -38,19 +38,22 @@ export function leaderNotes(
 }
 
 /** On a drawing one fact is said once, for everything that it took. */
-export function mergedNotes(notes: readonly LeaderNote[]): readonly LeaderNote[] {
-	const merged = new Map<string, LeaderNote>();
+export function mergedNotes(notes: readonly LeaderNote[], say: Say): readonly LeaderNote[] {
+	const merged = new Map<string, readonly LeaderNote[]>();
 	for (const note of notes) {
-		const { word, text, subject } = note;
-		const before = merged.get(`${word} ${text}`);
-		if (before === undefined) merged.set(`${word} ${text}`, note);
-		else if (before.subject !== undefined && subject !== undefined)
-			merged.set(`${word} ${text}`, { ...before, subject: `${before.subject}, ${subject}` });
+		const fact = `${note.word} ${note.text}`;
+		merged.set(fact, [...(merged.get(fact) ?? []), note]);
 	}
-	return [...merged.values()];
+	return [...merged.values()].flatMap(([first, ...others]) => {
+		if (first === undefined) return [];
+		const { subject } = first;
+		return others.length === 0 || subject === undefined
+			? [first]
+			: [{ ...first, subject: say('ui.lead.and others', { first: subject, n: others.length }) }];
+	});
 }
 
-/** "fan flow, purge: process-gas fan stopped 02:11 to 02:16" */
+/** "Fan flow and 3 more: process-gas fan stopped 02:11 to 02:16" */
 export const noteText = ({ subject, text }: LeaderNote): string =>
 	subject === undefined ? text : `${subject}: ${text}`;
 

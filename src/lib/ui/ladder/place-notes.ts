@@ -4,6 +4,8 @@ import type { Row } from './rung-layout';
 
 export type PlacedNote = {
 	readonly note: LeaderNote;
+	/** What is said after its word, cut where there is no more room. */
+	readonly text: string;
 	/** Baseline of its text. */
 	readonly y: number;
 	/** Of the contact that it leads to, and where the leader begins under it. */
@@ -37,7 +39,7 @@ export function placeNotes(rows: readonly Row[], notes: readonly LeaderNote[], r
 		undefined,
 	);
 	return (best ?? []).map(({ note, x, foot, from, to, side }, k) => ({
-		...{ note, x, foot, y: room.top + k * PITCH + 24 },
+		...{ note, x, foot, y: room.top + k * PITCH + 24, text: cut(note, to - from) },
 		textX: side === 'left' ? to : from,
 		anchor: side === 'left' ? 'end' : 'start',
 		edge: side === 'right' ? from - 6 : to + 6,
@@ -53,7 +55,24 @@ function sidesOf(each: Found, { left, right }: Room): readonly Line[] {
 		{ ...each, side: 'right', from: x + 20, to: x + 20 + length },
 	];
 	const fitting = sides.filter(({ side, from, to }) => from >= left && to <= (side === 'right' ? right : x - 16));
-	return fitting.length > 0 ? fitting : [{ ...each, side: 'right', from: x + 20, to: right }];
+	return fitting.length > 0
+		? fitting
+		: [
+				{
+					...each,
+					...(x - left > right - x
+						? { side: 'margin', from: left, to: x - 18 }
+						: { side: 'right', from: x + 20, to: right - 6 }),
+				},
+			];
+}
+
+function cut(note: LeaderNote, width: number): string {
+	let text = noteText(note);
+	const isTooLong = (): boolean => roughly(`${note.word} ${text}`, 'strong', 18) > width;
+	if (!isTooLong()) return text;
+	while (text.length > 8 && isTooLong()) text = text.slice(0, -1);
+	return `${text.slice(0, -1).trimEnd()}…`;
 }
 
 /** Texts across leaders count most; then those beside their leader instead of at the margin. */

@@ -43,6 +43,7 @@ export const SCREEN_LINE = {
 	'ui.lead.next': 'Next',
 	'ui.lead.lapsed': 'Lapsed',
 	'ui.lead.failed': 'Failed',
+	'ui.lead.and others': '{first} and {n} more',
 	'ui.lead.waits': 'Waits',
 	'ui.lead.for gate': 'for {gate}',
 	'ui.lead.deviation': 'Deviation {id}',
