@@ -8,6 +8,7 @@ declare module 'subset-font' {
 			/** OpenType features that stay: `kern`. */
 			readonly keepFeatures?: readonly string[];
 			readonly noHinting?: boolean;
+			readonly dropTables?: readonly string[];
 		},
 	): Promise<Uint8Array>;
 }
