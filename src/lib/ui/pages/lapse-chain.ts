@@ -35,7 +35,7 @@ function facts(told: Told): readonly ChainItem[] {
 		const text = sayCause(cause, say, moments, namesOf(procedure));
 		const id = `${cause.kind} ${text}`;
 		const fact = cause.kind === 'plant event' ? 'red' : 'yellow';
-		if (!seen.has(id)) seen.set(id, { id, title: say('ui.fact'), text, mark: { fact } });
+		if (!seen.has(id)) seen.set(id, { id, title: say('ui.fact', { text }), text: '', mark: { fact } });
 	}
 	return [...seen.values()].slice(0, MOST_FACTS);
 }

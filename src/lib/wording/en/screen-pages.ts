@@ -1,6 +1,6 @@
 /** Now, what lapsed, something happened, the purge, and the places of the app. */
 export const SCREEN_PAGES = {
-	'ui.fact': 'Fact',
+	'ui.fact': 'Fact: {text}',
 	'ui.since': 'since {at}',
 	'ui.lapsed.gate': 'Gate {gate} has lapsed',
 	'ui.lapsed.proofs': 'Proofs that do not stand any more: {n}',
