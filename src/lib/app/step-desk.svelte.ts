@@ -1,10 +1,11 @@
-import { ok, type Result } from '../base';
+import { fromUtf8, ok, type Json, type Result } from '../base';
+import type { Attachment } from '../store';
 import type { Step } from '../procedure';
 import { parseTrend, type Trend, type Typed, type TypedRow, type TypedValue } from '../record';
 import { attachSeries, calculate, enter, type TrendFile } from './entries';
 import type { OpenStartUp } from './open-start-up.svelte';
+import { redrawnPhoto } from './photo';
 import type { Problem } from './problem';
-import { fromUtf8, type Json } from '../base';
 
 /** What a person has typed or touched on a step so far. It is kept with every change: nothing half typed is lost. */
 export type TypedSoFar = {
@@ -17,6 +18,8 @@ export type TypedSoFar = {
 	readonly inputs?: { readonly [input: string]: string };
 	readonly party?: string;
 	readonly note?: string;
+	/** Photos already kept, by their hash. */
+	readonly photos?: readonly Attachment[];
 	readonly mode?: NonNullable<TypedValue['analyserMode']>;
 };
 
@@ -84,12 +87,23 @@ export class StepDesk {
 		this.#problem = undefined;
 	}
 
+	/** A photo is kept before the entry that names it. */
+	async addPhoto(photo: Blob, name: string): Promise<void> {
+		const { bytes, name: drawn } = await redrawnPhoto(photo, name);
+		const kept = await this.startUp.tablet.store.attachments.save(bytes, { name: drawn, mediaType: 'image/jpeg' });
+		if (!kept.ok) this.#problem = kept.error;
+		else this.type({ ...this.#draft, photos: [...(this.#draft.photos ?? []), kept.value] });
+	}
+
 	/** @returns whether it was saved; else `problem` says why, and what was typed stays */
 	async save(): Promise<boolean> {
 		return this.#keep(() => {
 			const { startUp, step } = this;
-			const { note, inputs } = this.#draft;
-			const said = note === undefined || note.trim() === '' ? {} : { note };
+			const { note, inputs, photos } = this.#draft;
+			const said = {
+				...(note === undefined || note.trim() === '' ? {} : { note }),
+				...(photos === undefined ? {} : { attachments: photos }),
+			};
 			if (step.kind === 'calculation')
 				return calculate(startUp, step.id, { ...said, ...(inputs === undefined ? {} : { typed: inputs }) });
 			if (step.kind === 'series' && this.#file !== undefined) return attachSeries(startUp, step.id, this.#file, note);

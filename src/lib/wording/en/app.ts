@@ -89,6 +89,8 @@ export const APP = {
 	'app.deviation title': 'What is not as required?',
 	'app.deviation does': 'Raise deviation',
 	'app.deviation blocks': 'It blocks',
+	'app.offline': 'Kept on this tablet whole: it works without network.',
+	'app.gate': 'Gate {gate}',
 	'app.nothing': 'nothing',
 	'app.hand-over': 'the hand-over',
 	'app.storage closed': 'The storage was closed under this tab. What was saved is safe; load the page again.',
