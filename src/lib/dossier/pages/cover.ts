@@ -20,7 +20,7 @@ export function cover(flow: Flow, story: Story): void {
 	flow.write(lead(story), STYLES.lead);
 	flow.space(7);
 	const captions = new Map(releasesOf(story).map(({ gate, caption }) => [gate, caption]));
-	const drawn = ladder(input.procedure, end, { width: 700, rungHeight: 54, captions, measure });
+	const drawn = ladder(input.procedure, end, { width: 700, rungHeight: 60, captions, measure });
 	flow.figure(drawn, AREA.width - 6);
 	flow.space(9);
 	const { result, because } = processResult(story);

@@ -25,9 +25,9 @@ export function signatures(flow: Flow, story: Story, manifest: Manifest): void {
 			{ head: say('hold.gate'), width: 34, voice: 'strong' },
 			{ head: say('sign.meaning'), width: 60 },
 			{ head: say('sign.person') },
-			{ head: say('sign.role'), width: 108 },
+			{ head: say('sign.role'), width: 104 },
 			{ head: say('hold.when'), width: 64 },
-			{ head: say('sign.code'), width: 118, voice: 'code' },
+			{ head: say('sign.code'), width: 128, voice: 'code' },
 		],
 		story.acts.map(({ event, judged }) => ({
 			...(judged?.counted === false ? { superseded: true as const } : {}),

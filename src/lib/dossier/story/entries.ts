@@ -1,6 +1,9 @@
 import type { Step } from '../../procedure';
 import { allOf, type BodyOf, type EventOf, type StepStanding } from '../../record';
+import { capitalised } from '../../wording';
+import { calculationOf } from './calculations';
 import { boundsOf, printBounds, printReading } from './print';
+import { outputOf, shownIn } from './shown-value';
 import type { Story } from './story';
 
 type Entry = EventOf<'entry'>;
@@ -50,7 +53,7 @@ export function entriesUnder(gate: number, story: Story): readonly ToldStep[] {
 							: counts
 								? 'counts'
 								: 'earlier';
-					return { event, place, found: foundIn(event.body, step, story), lateMinutes: late.get(event.id) };
+					return { event, place, found: foundIn(event, step, story), lateMinutes: late.get(event.id) };
 				});
 			const first = (entry: ToldEntry): number => (entry.place === 'counts' ? 1 : 0);
 			return {
@@ -63,8 +66,10 @@ export function entriesUnder(gate: number, story: Story): readonly ToldStep[] {
 
 type Body = BodyOf<'entry'>;
 
-function foundIn(body: Body, step: Step, story: Story): readonly Found[] {
+function foundIn(event: Entry, step: Step, story: Story): readonly Found[] {
+	const { body } = event;
 	return [
+		...calculated(event, step, story),
 		...(body.values ?? []).map((reading) => valueFound(reading, step, story)),
 		...(body.rows ?? []).map((row) => rowFound(row, step, story)),
 		...chosen(body, step),
@@ -112,6 +117,23 @@ function rowFound(row: NonNullable<Body['rows']>[number], step: Step, story: Sto
 		};
 	}
 	return { ...found, what: row.row, limit: '' };
+}
+
+/** What a calculation said: its verdict, or the one output that is held against a limit. */
+function calculated(event: Entry, step: Step, story: Story): readonly Found[] {
+	const result = calculationOf(event);
+	if (result === undefined || step.kind !== 'calculation') return [];
+	const line = (what: string, value: string, limit: string): Found => ({ what, value, limit, instrument: '' });
+	if (step.proves === 'verdict') {
+		return result.verdict === undefined ? [] : [line(result.calc, story.say(`verdict.${result.verdict.word}`), '')];
+	}
+	const { output, quantity, unit, limit } = step.proves;
+	const value = result.values[output];
+	const bounds = boundsOf(limit, story.input);
+	const means = capitalised(outputOf(result.calc, output)?.means ?? output);
+	return value === undefined
+		? []
+		: [line(means, shownIn(value, quantity, unit), bounds === undefined ? '' : printBounds(bounds, story))];
 }
 
 function chosen({ choice, confirmed }: Body, step: Step): readonly Found[] {

@@ -1,5 +1,5 @@
 import { CATALOGUE, type CalcValue, type OutputSpec } from '../../calc';
-import { fromSi, isQuantityName, shownUnit, type QuantityName } from '../../quantity';
+import { fromSi, isQuantityName, print, shownUnit, type QuantityName } from '../../quantity';
 import { sayNumber } from '../../wording';
 
 /** What an output of a calculator is: "AT-211.floor" is the floor of one place. */
@@ -19,12 +19,18 @@ export function inOrderOf(calc: string, names: readonly string[]): readonly stri
 	return [...names].sort((a, b) => place(a) - place(b));
 }
 
+/** A number of a result in the unit that a step asks for. */
+export function shownIn(value: CalcValue, quantity: string, unit: string): string {
+	const shown = value.value === null || !isQuantityName(quantity) ? undefined : fromSi(value.value, quantity, unit);
+	return shown?.ok === true ? printed(shown.value, undefined, unit) : shownValue(value, quantity);
+}
+
 /** A number of a result as people read it, with its expanded uncertainty. */
 export function shownValue({ value, unit, U: given, because }: CalcValue, quantity: string): string {
 	if (value === null) return because ?? '–';
 	// What is left of an uncertainty that is none after rounding in the last bit.
 	const U = given === undefined || given < Math.abs(value) * 1e-9 ? undefined : given;
-	const plain = () => printed(sayNumber(value), U === undefined ? undefined : sayNumber(U), unit);
+	const plain = () => printed(value, U, unit);
 	const better = isQuantityName(quantity) ? BETTER[quantity] : undefined;
 	if (better === undefined || !isQuantityName(quantity)) return plain();
 	const shown = fromSi(value, quantity, better);
@@ -32,11 +38,21 @@ export function shownValue({ value, unit, U: given, because }: CalcValue, quanti
 	const spread =
 		U === undefined ? undefined : fromSi(U, quantity === 'temperature' ? 'temperature-difference' : quantity, better);
 	if (!shown.ok) return plain();
-	return printed(sayNumber(shown.value), spread?.ok === true ? sayNumber(spread.value) : undefined, better);
+	return printed(shown.value, spread?.ok === true ? spread.value : undefined, better);
 }
 
-const printed = (value: string, U: string | undefined, unit: string): string =>
-	[U === undefined ? value : `${value}\u00a0±\u00a0${U}`, shownUnit(unit)].filter((part) => part !== '').join('\u00a0');
+/** An uncertainty has two digits that mean something, and its value none beyond them (JCGM 100, 7.2.6; from memory, verify). */
+function printed(value: number, U: number | undefined, unit: string): string {
+	const said = U === undefined || !(U > 0) ? sayNumber(value) : withSpread(value, U);
+	return [said, shownUnit(unit)].filter((part) => part !== '').join('\u00a0');
+}
+
+function withSpread(value: number, U: number): string {
+	const decimals = Math.min(12, Math.max(0, 1 - Math.floor(Math.log10(U))));
+	if (Math.abs(value) < 1e-3 || U < 1e-6)
+		return `${sayNumber(value)}\u00a0±\u00a0${sayNumber(Number(U.toPrecision(2)))}`;
+	return `${print(value, '1', decimals)}\u00a0±\u00a0${print(U, '1', decimals)}`;
+}
 
 const BETTER: { readonly [quantity in QuantityName]?: string } = {
 	temperature: 'degC',

@@ -32,17 +32,26 @@ export function elementNameItem(name: ElementName, reach: number, type: Type): I
 		});
 		return [...beside, ...over];
 	});
-	return { anchor: at, places: spots.map(([x, y, cost]) => ({ box: { x, y, width, height }, cost })) };
+	return {
+		anchor: at,
+		places: spots.map(([x, y, cost]) => {
+			const box = { x, y, width, height };
+			const end = leaderEnd(at, box, reach + type.size * NEAR);
+			return { box, cost, ...(end === undefined ? {} : { leaderTo: end }) };
+		}),
+	};
 }
 
 export const elementNameShapes =
-	({ tag, at, seen }: ElementName, reach: number, { size }: Type) =>
-	({ box }: Place): readonly Shape[] => {
+	({ tag, at, seen }: ElementName, { size }: Type) =>
+	({ box, leaderTo }: Place): readonly Shape[] => {
 		const small = size * SMALL;
 		const tone = seen?.mark === undefined ? 'soft' : MARK_TONES[seen.mark];
 		const below = box.y + small * 2.2;
 		return [
-			...leader(at, box, reach + size * 0.6),
+			...(leaderTo === undefined
+				? []
+				: [stroke(segment(at.x, at.y, leaderTo.x, leaderTo.y), { pen: 'hair', tone: 'soft' })]),
 			lettering(tag, { x: box.x, y: box.y + small * 0.95 }, { size: small, voice: 'strong' }),
 			...(seen?.mark === undefined
 				? []
@@ -53,11 +62,10 @@ export const elementNameShapes =
 		];
 	};
 
-/** A name that had to give way is led back to its element. */
-function leader(at: Point, { x, y, width, height }: Box, near: number): readonly Shape[] {
+/** A name that had to give way is led back to its element: where its leader ends, if it needs one. */
+function leaderEnd(at: Point, { x, y, width, height }: Box, near: number): Point | undefined {
 	const end = { x: Math.min(x + width, Math.max(x, at.x)), y: Math.min(y + height, Math.max(y, at.y)) };
-	const away = Math.hypot(end.x - at.x, end.y - at.y);
-	return away < near ? [] : [stroke(segment(at.x, at.y, end.x, end.y), { pen: 'hair', tone: 'soft' })];
+	return Math.hypot(end.x - at.x, end.y - at.y) < near ? undefined : end;
 }
 
 function sizeOf({ tag, seen }: ElementName, { size, measure }: Type) {
@@ -75,3 +83,5 @@ const hasWord = (seen: SketchElement | undefined): boolean =>
 const indentOf = ({ mark }: SketchElement, small: number): number => (mark === undefined ? 0 : small * 1.1);
 
 const SMALL = 0.86;
+/** So close to its element, in sizes of the lettering, a name needs no leader. */
+const NEAR = 0.6;

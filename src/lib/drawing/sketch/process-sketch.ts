@@ -40,7 +40,7 @@ export function processSketch(plant: Plant, look: SketchLook): Drawing {
 	const tags = layout.elements.map(({ element: { tag }, at }) => {
 		const seen = positions?.get(tag);
 		const name: ElementName = { tag, at, ...(seen === undefined ? {} : { seen }) };
-		return { item: elementNameItem(name, duct, type), draw: elementNameShapes(name, duct, type) };
+		return { item: elementNameItem(name, duct, type), draw: elementNameShapes(name, type) };
 	});
 	const bubbles = layout.bubbles.map((bubble) => ({
 		item: bubbleItem(bubble, type),
