@@ -65,12 +65,14 @@ export async function withChromium(use, options = {}) {
  * farewell, nothing flushed.
  *
  * @param {string} profile
+ * @param {readonly string[]} [under] a program, with its arguments, that starts the browser and watches it
  */
-export async function startChromium(profile) {
+export async function startChromium(profile, under = []) {
 	for (const left of ['SingletonLock', 'SingletonSocket', 'SingletonCookie', 'DevToolsActivePort'])
 		rmSync(join(profile, left), { force: true });
 	const where = [`--user-data-dir=${profile}`, '--remote-debugging-port=0', 'about:blank'];
-	const child = spawn(ensureChromium(), ['--headless', ...FLAGS, ...where], {
+	const [program = '', ...args] = [...under, ensureChromium(), '--headless', ...FLAGS, ...where];
+	const child = spawn(program, args, {
 		stdio: ['ignore', 'ignore', 'pipe'],
 		detached: true,
 	});

@@ -55,15 +55,17 @@ export async function openTab(context: BrowserContext, address: string): Promise
 }
 
 /** A browser that may be killed and started again on the same profile; none is left behind. */
-export async function withProfile<T>(use: (start: () => ReturnType<typeof startChromium>) => Promise<T>): Promise<T> {
+export async function withProfile<T>(
+	use: (start: (under?: readonly string[]) => ReturnType<typeof startChromium>, profile: string) => Promise<T>,
+): Promise<T> {
 	const profile = mkdtempSync(join(tmpdir(), 'gatehold-profile-'));
 	const started: Awaited<ReturnType<typeof startChromium>>[] = [];
 	try {
-		return await use(async () => {
-			const browser = await startChromium(profile);
+		return await use(async (under) => {
+			const browser = await startChromium(profile, under);
 			started.push(browser);
 			return browser;
-		});
+		}, profile);
 	} finally {
 		for (const browser of started) await browser.kill();
 		rmSync(profile, { recursive: true, force: true, maxRetries: 5 });
