@@ -11,8 +11,8 @@ export const CHAPTERS = {
 	'events.interval': '{begin} to {end} ({length})',
 	'events.goes on': '{begin}, no end recorded',
 	'events.received': 'received {at}',
-	'events.again': '{step} {at}',
-	'events.not again': '{step} not again',
+	'events.again': '{step}\u00a0{at}',
+	'events.not again': '{step}\u00a0not\u00a0again',
 	'events.withdrawn': '{what} (withdrawn)',
 	'events.note':
 		'An event counts from the earliest it can have begun. It took away every proof that names it and was seen before it was over, however late it was recorded; proofs that rely on those fell with them.',
