@@ -86,13 +86,8 @@ async function headOf(
 	db: Database,
 	{ log, device }: { readonly log: string; readonly device: string },
 ): Promise<ChainMovedOn['head']> {
-	const chain = startingWith([log, device]);
-	const [last] = await db.events
-		.where(KEY)
-		.between(...chain)
-		.reverse()
-		.limit(1)
-		.primaryKeys();
+	const chain = db.events.where(KEY).between(...startingWith([log, device]));
+	const [last] = await chain.reverse().limit(1).primaryKeys();
 	if (last === undefined) return null;
 	const [, , number, id] = last;
 	return { number, id };
@@ -121,12 +116,10 @@ const importEvents = (
 
 const readLog = (db: Database, log: string): Promise<Result<ReadLog, StorageError>> =>
 	attempt(async () => {
+		const rows = db.events.where(KEY).between(...startingWith([log]));
 		const events: RecordEvent[] = [];
 		const damaged: DamagedRow[] = [];
-		for (const row of await db.events
-			.where(KEY)
-			.between(...startingWith([log]))
-			.toArray()) {
+		for (const row of await rows.toArray()) {
 			const event = eventOf(row);
 			if (event.ok) events.push(event.value);
 			else damaged.push(event.error);

@@ -55,13 +55,13 @@ export const gateKeys = (db: Database): GateKeys => ({
 		if (!counted.ok) return counted;
 		const opened = await openGateKey(counted.value.gateKey, pin);
 		if (opened.ok) {
-			const reset = await attempt(() => replaceTries(db, owner, succeeded));
+			const reset = await attempt(() => change(db, owner, (row) => ({ ...row, tries: succeeded(row.tries) })));
 			return reset.ok ? opened : reset;
 		}
 		if (opened.error.kind !== 'wrong-pin') return fail(opened.error);
 		const next = mayTry(counted.value.tries, now);
 		if (next.kind !== 'destroyed') return fail({ kind: 'wrong-pin', left: next.left });
-		const destroyed = await attempt(() => destroy(db, owner));
+		const destroyed = await attempt(() => change(db, owner, withoutKey));
 		return destroyed.ok ? fail({ kind: 'destroyed' }) : destroyed;
 	},
 });
@@ -86,22 +86,11 @@ const countTry = (
 		return ok({ gateKey: row.gateKey, tries });
 	});
 
-const replaceTries = (
-	db: Database,
-	owner: Owner,
-	change: (tries: Tries) => Tries,
-): PromiseLike<Result<'saved', never>> =>
+const change = (db: Database, owner: Owner, to: (row: GateKeyRow) => GateKeyRow): PromiseLike<Result<'saved', never>> =>
 	db.transaction('rw', db.gateKeys, async () => {
 		const row = await db.gateKeys.get(keyOf(owner));
-		if (row !== undefined) await db.gateKeys.put({ ...row, tries: change(row.tries) });
+		if (row !== undefined) await db.gateKeys.put(to(row));
 		return ok('saved');
-	});
-
-const destroy = (db: Database, owner: Owner): PromiseLike<Result<'destroyed', never>> =>
-	db.transaction('rw', db.gateKeys, async () => {
-		const row = await db.gateKeys.get(keyOf(owner));
-		if (row !== undefined) await db.gateKeys.put(withoutKey(row));
-		return ok('destroyed');
 	});
 
 function withoutKey({ gateKey: _destroyed, ...row }: GateKeyRow): GateKeyRow {
