@@ -41,3 +41,5 @@ export { nextStep, StepDesk, type TypedSoFar } from './step-desk.svelte';
 export { previewCalculation, type CalculationPreview } from './calculation-preview';
 export { objectionsNow } from './objections';
 export { copyFile } from './copy-file';
+export { Archive } from './archive.svelte';
+export { checkFile, type CheckedFile } from './check-file';

@@ -10,3 +10,4 @@ export type { Ink, Inks, NoGlyph } from './sign/ink';
 export type { Point } from './sign/appearance';
 export { addSignatureFields, type SignatureField } from './sign/signature-fields';
 export { signIncrement, type ClosingSignature, type Labels, type SignError } from './sign/sign-increment';
+export { rebuildDossier } from './rebuild';

@@ -91,6 +91,7 @@ export const APP = {
 	'app.deviation blocks': 'It blocks',
 	'app.offline': 'Kept on this tablet whole: it works without network.',
 	'app.gate': 'Gate {gate}',
+	'app.unread': '{name} was not judged: the reader stopped. The file was not changed.',
 	'app.nothing': 'nothing',
 	'app.hand-over': 'the hand-over',
 	'app.storage closed': 'The storage was closed under this tab. What was saved is safe; load the page again.',
