@@ -1,6 +1,6 @@
 import { roughly } from '../../drawing';
 import { noteText, type LeaderNote } from './leader-notes';
-import type { Row } from './rung-layout';
+import type { Row } from './row';
 
 export type PlacedNote = {
 	readonly note: LeaderNote;
