@@ -2,6 +2,7 @@ import type { Store } from '../store';
 import type { Clock } from './clock';
 import { printInstant } from '../record';
 import type { CheckedFile, FileToCheck } from './check-file';
+import { startCheckWorker } from './start-check-worker';
 
 type Progress = { readonly done: number; readonly all: number; readonly name: string };
 export type Checked = { readonly name: string; readonly report: CheckedFile };
@@ -40,7 +41,7 @@ export class Archive {
 		this.cancel();
 		this.#checked = [];
 		this.#unread = [];
-		const worker = new Worker(new URL('./check-worker.ts', import.meta.url), { type: 'module' });
+		const worker = startCheckWorker();
 		this.#worker = worker;
 		const root = await this.#store.site.read('root certificate');
 		for (const [done, file] of files.entries()) {

@@ -1,5 +1,5 @@
 import { fail, ok, type Result } from '../base';
-import { signedEvent, type BodyOf, type Draft, type EventKind, type EventOf, type RecordEvent } from '../record';
+import { signedEvent, type Draft, type EventKind, type EventOf, type RecordEvent } from '../record';
 import type { SigningKey } from '../identity';
 import type { DraftKey, Store } from '../store';
 import type { Problem } from './problem';
@@ -37,5 +37,3 @@ export const signOn = <K extends EventKind>(
 	draft: Draft<K>,
 	{ key, shiftKey }: Signer,
 ): Promise<RecordEvent> => signedEvent({ ...draft, ...(shiftKey === undefined ? {} : { shiftKey }) }, known, key);
-
-export type Body<K extends EventKind> = BodyOf<K>;
