@@ -62,6 +62,7 @@ test('the page tells the commands that there are, and no others', async () => {
 		withChromium(async (browser) => {
 			const page = await browser.newPage();
 			await page.goto(`${address}/about`);
+			await page.locator('dt').first().waitFor();
 			const told = await page.locator('dt').allTextContents();
 			expect(told.map((usage) => usage.split(' ')[0]).sort()).toEqual(Object.keys(COMMANDS).sort());
 		}),
