@@ -85,7 +85,7 @@ function valueOf(value: NonNullable<Enter['values']>[string], { instant }: Aroun
 }
 
 function rowOf(row: NonNullable<Enter['rows']>[string], { instant }: Around): string | TypedRow {
-	if (typeof row === 'string' || row.reading === undefined) return row as string | TypedRow;
+	if (typeof row === 'string' || row.reading === undefined) return row;
 	const { observed, ...reading } = row.reading;
 	return { ...row, reading: { ...reading, ...(observed === undefined ? {} : { observed: instant(observed) }) } };
 }
