@@ -1,4 +1,4 @@
-import type { GateStanding, StepStanding } from '../../record';
+import type { GateStanding } from '../../record';
 
 /** How a contact is drawn. The line passes what stands and what is not applicable, and nothing else. */
 export type ContactState =
@@ -7,6 +7,3 @@ export type ContactState =
 export type CoilState = GateStanding['state'];
 
 export const passes = (state: ContactState): boolean => state === 'stands' || state === 'not applicable';
-
-/** A proof that waits is kept and lets nothing pass: its contact is open. */
-export const contactOf = (state: StepStanding['state']): ContactState => (state === 'waits' ? 'not yet' : state);
