@@ -15,8 +15,9 @@ async function demonstration(page: Page, address: string): Promise<void> {
 async function takeTablet(page: Page, name: string): Promise<void> {
 	await page.locator('header').getByRole('link', { name: 'People' }).click();
 	const take = page.getByRole('button', { name: `Take the tablet: ${name}` });
-	if ((await take.count()) > 0) await take.click();
-	await page.getByText('holds the tablet').waitFor();
+	await take.click();
+	// The offer is gone once that person holds it; "holds the tablet" alone could be said of the one before.
+	await take.waitFor({ state: 'detached' });
 }
 
 async function beginShift(page: Page, pin = DEMONSTRATION_PIN): Promise<void> {
