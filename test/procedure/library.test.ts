@@ -170,3 +170,9 @@ function closure(events: readonly string[]): readonly string[] {
 	}
 	return [...lapsed];
 }
+
+test('every step from the opening of the way out to the end of the purge says that the gas asphyxiates', () => {
+	const steps = LIBRARY['inert-start-up']?.steps.filter(({ id }) => /^2\.(1[3-9]|2\d)$/.test(id)) ?? [];
+	expect(steps).toHaveLength(15);
+	expect(steps.filter(({ cautions }) => cautions?.includes('asphyxiation') !== true).map(({ id }) => id)).toEqual([]);
+});

@@ -47,11 +47,12 @@ export const GATE_2_PURGE: readonly Draft[] = [
 		lapsedBy: ['fan-stop', 'power-dip'],
 		waits: ['0.11', '0.12'],
 		instruments: ['PDT-201', 'PT-201', 'TT-201'],
-		cautions: ['moving parts', 'dust explosion'],
+		cautions: ['asphyxiation', 'moving parts', 'dust explosion'],
 		withFeedOn: 'Stop the feed, inert gas on.',
 	},
 	{
 		id: '2.15',
+		cautions: ['asphyxiation'],
 		kind: 'calculation',
 		group: 'Fan flow',
 		title: 'Flow by the Venturi',
@@ -67,6 +68,7 @@ export const GATE_2_PURGE: readonly Draft[] = [
 	},
 	{
 		id: '2.16',
+		cautions: ['asphyxiation'],
 		kind: 'calculation',
 		group: 'Fan flow',
 		title: 'Velocity in the duct',
@@ -82,6 +84,7 @@ export const GATE_2_PURGE: readonly Draft[] = [
 	},
 	{
 		id: '2.17',
+		cautions: ['asphyxiation'],
 		kind: 'confirm',
 		group: 'Purge',
 		title: 'Filter cleaning runs',
@@ -123,6 +126,7 @@ export const GATE_2_PURGE: readonly Draft[] = [
 	},
 	{
 		id: '2.19',
+		cautions: ['asphyxiation'],
 		kind: 'confirm',
 		group: 'Purge',
 		title: 'Each damper of the next gates stroked once',
@@ -141,6 +145,7 @@ export const GATE_2_PURGE: readonly Draft[] = [
 	},
 	{
 		id: '2.20',
+		cautions: ['asphyxiation'],
 		kind: 'reading',
 		group: 'Suction',
 		title: 'Mill inlet suction under control',
@@ -172,6 +177,7 @@ export const GATE_2_PURGE: readonly Draft[] = [
 	},
 	{
 		id: '2.22',
+		cautions: ['asphyxiation'],
 		kind: 'quick sheet',
 		group: 'Purge',
 		title: 'All places once, with the mode of each analyser',
@@ -188,6 +194,7 @@ export const GATE_2_PURGE: readonly Draft[] = [
 	},
 	{
 		id: '2.23',
+		cautions: ['asphyxiation'],
 		kind: 'confirm',
 		group: 'Purge',
 		title: 'Way out still open',
@@ -238,6 +245,7 @@ export const GATE_2_PURGE: readonly Draft[] = [
 	},
 	{
 		id: '2.25',
+		cautions: ['asphyxiation'],
 		kind: 'calculation',
 		group: 'Purge',
 		title: 'Judgement on the purge',
@@ -254,6 +262,7 @@ export const GATE_2_PURGE: readonly Draft[] = [
 	},
 	{
 		id: '2.26',
+		cautions: ['asphyxiation'],
 		kind: 'watch',
 		group: 'Oxygen watch',
 		title: 'Oxygen watch at all places',
@@ -269,6 +278,7 @@ export const GATE_2_PURGE: readonly Draft[] = [
 	},
 	{
 		id: '2.27',
+		cautions: ['asphyxiation'],
 		kind: 'calculation',
 		group: 'In-leakage',
 		title: 'In-leakage at the suction of the purge',
