@@ -1,7 +1,8 @@
+import { DE } from './de';
 import { EN } from './en';
 
 /** Languages whose catalogue is complete. */
-export type Language = 'en';
+export type Language = 'en' | 'de';
 export type Key = keyof typeof EN;
 
 export type Facts = { readonly [name: string]: string | number };
@@ -9,7 +10,7 @@ export type Facts = { readonly [name: string]: string | number };
 /** Says a message of the catalogue with its facts filled in. */
 export type Say = (key: Key, facts?: Facts) => string;
 
-export const LANGUAGES = { en: EN } as const satisfies {
+export const LANGUAGES = { en: EN, de: DE } as const satisfies {
 	readonly [language in Language]: { readonly [key in Key]: string };
 };
 

@@ -62,7 +62,6 @@ export const APP = {
 	'app.shift text': 'Entries are signed with a key of this shift. One PIN now, none for entries until it ends.',
 	'app.shift does': 'Begin shift',
 	'app.pin of demonstration': 'Demonstration: everybody here has the PIN {pin}.',
-	'app.person roles': '{roles}',
 	'app.holds tablet': 'holds the tablet',
 	'app.take tablet': 'Take the tablet',
 	'app.no key': 'key destroyed after ten wrong PINs; to be enrolled again',

@@ -1,0 +1,44 @@
+import { APP } from './de/app';
+import { CHAPTERS } from './de/chapters';
+import { CLOSING } from './de/closing';
+import { COVER } from './de/cover';
+import { ERRORS } from './de/errors';
+import { FINDINGS } from './de/findings';
+import { GATES } from './de/gates';
+import { NOTES } from './de/notes';
+import { SCREEN_ACTS } from './de/screen-acts';
+import { SCREEN_LINE } from './de/screen-line';
+import { SCREEN_PAGES } from './de/screen-pages';
+import { SCREEN_STEPS } from './de/screen-steps';
+import { STATES } from './de/states';
+import type { EN } from './en';
+
+/**
+ * German, as plants write it. One word for one thing:
+ *
+ * start-up Anfahrvorgang (place in the app: Anfahren), procedure Anfahrvorschrift, gate Stufe, step Schritt, hold point
+ * Haltepunkt, release freigeben, refuse verweigern, refused act abgewiesene Handlung, entry Eintrag, proof Nachweis, it
+ * stands er gilt, it lapses er verfällt, failed durchgefallen, try Versuch, blocks sperrt, deviation Abweichung, disposition
+ * Entscheidung, not applicable entfällt, plant event Anlagenereignis, watch Überwachung, round Messrunde, reading Messwert
+ * (the act: Ablesung), series Messreihe, measuring point Messstelle, instrument Messgerät, tag Kennzeichen, limit Grenzwert,
+ * guard band Schutzband, basis Bezug (feucht, trocken), purge Spülen, swept durchspült, enclosed volume Raum, dead leg
+ * Totraum, coverage Abdeckung, in-leakage Falschluft, floor Endwert, hold Haltezeit, adequate ausreichend, cannot be shown
+ * nicht nachweisbar, line-up Stellungskontrolle, hand-over Übergabe, seal Siegel, record Aufzeichnung, log Protokoll, head code
+ * Standcode, site Werk, unit Anlage, site root Wurzel des Werks, enrol aufnehmen, sign unterschreiben, ladder Kontaktplan
+ * (IEC 61131-3), limiting oxygen concentration Sauerstoffgrenzkonzentration, concession Einschränkung, witness Zeuge.
+ */
+export const DE: { readonly [key in keyof typeof EN]: string } = {
+	...STATES,
+	...COVER,
+	...GATES,
+	...CHAPTERS,
+	...CLOSING,
+	...ERRORS,
+	...FINDINGS,
+	...NOTES,
+	...APP,
+	...SCREEN_LINE,
+	...SCREEN_STEPS,
+	...SCREEN_ACTS,
+	...SCREEN_PAGES,
+};
