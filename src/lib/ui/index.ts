@@ -10,6 +10,7 @@ export { default as EmptyState } from './parts/EmptyState.svelte';
 export { default as ErrorNote } from './parts/ErrorNote.svelte';
 export { default as Glyph } from './parts/Glyph.svelte';
 export { default as LookSwitch } from './parts/LookSwitch.svelte';
+export { default as StartUpPlaces } from './parts/StartUpPlaces.svelte';
 export { default as TopLine } from './parts/TopLine.svelte';
 export { default as UndoBar } from './parts/UndoBar.svelte';
 export { default as UprightContact } from './parts/UprightContact.svelte';

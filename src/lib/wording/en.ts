@@ -7,6 +7,7 @@ import { FINDINGS } from './en/findings';
 import { GATES } from './en/gates';
 import { NOTES } from './en/notes';
 import { SCREEN_ACTS } from './en/screen-acts';
+import { SCREEN_FRAME } from './en/screen-frame';
 import { SCREEN_LINE } from './en/screen-line';
 import { SCREEN_PAGES } from './en/screen-pages';
 import { SCREEN_STEPS } from './en/screen-steps';
@@ -23,6 +24,7 @@ export const EN = {
 	...FINDINGS,
 	...NOTES,
 	...APP,
+	...SCREEN_FRAME,
 	...SCREEN_LINE,
 	...SCREEN_STEPS,
 	...SCREEN_ACTS,

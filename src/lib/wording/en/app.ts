@@ -49,7 +49,6 @@ export const APP = {
 	'app.start-ups': 'Start-ups',
 	'app.people': 'People',
 	'app.archive': 'Archive',
-	'app.about': 'About',
 	'app.saved': 'Saved on this tablet {at}',
 	'app.no site': 'This tablet holds no start-up yet',
 	'app.no site text':
@@ -66,9 +65,6 @@ export const APP = {
 	'app.take tablet': 'Take the tablet',
 	'app.no key': 'key destroyed after ten wrong PINs; to be enrolled again',
 	'app.facts': '{id}. Procedure {procedure}, revision {revision}. {at}.',
-	'app.happened': 'Something happened',
-	'app.lapsed': 'What lapsed',
-	'app.back to line': 'Back to the line',
 	'app.opened': 'Opened {at}, {n} events',
 	'app.sealed': 'sealed',
 	'app.taken back': '{what} saved.',
