@@ -7,6 +7,7 @@ import { FINDINGS } from './de/findings';
 import { GATES } from './de/gates';
 import { NOTES } from './de/notes';
 import { SCREEN_ACTS } from './de/screen-acts';
+import { SCREEN_FRAME } from './de/screen-frame';
 import { SCREEN_LINE } from './de/screen-line';
 import { SCREEN_PAGES } from './de/screen-pages';
 import { SCREEN_STEPS } from './de/screen-steps';
@@ -37,6 +38,7 @@ export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...FINDINGS,
 	...NOTES,
 	...APP,
+	...SCREEN_FRAME,
 	...SCREEN_LINE,
 	...SCREEN_STEPS,
 	...SCREEN_ACTS,

@@ -58,7 +58,6 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'app.start-ups': 'Anfahren',
 	'app.people': 'Personen',
 	'app.archive': 'Archiv',
-	'app.about': 'Über die App',
 	'app.saved': 'Auf diesem Tablet gespeichert {at}',
 	'app.no site': 'Auf diesem Tablet ist noch kein Anfahrvorgang',
 	'app.no site text':
@@ -76,9 +75,6 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'app.take tablet': 'Tablet übernehmen',
 	'app.no key': 'Schlüssel nach zehn falschen PINs vernichtet; neu aufzunehmen',
 	'app.facts': '{id}. Anfahrvorschrift {procedure}, Revision {revision}. {at}.',
-	'app.happened': 'Etwas ist geschehen',
-	'app.lapsed': 'Was verfallen ist',
-	'app.back to line': 'Zurück zum Kontaktplan',
 	'app.opened': 'Eröffnet {at}, {n} Ereignisse',
 	'app.sealed': 'versiegelt',
 	'app.taken back': '{what} gespeichert.',
