@@ -3,11 +3,14 @@
  * The place where clock, chance and storage meet the pure rooms; knows no component and no address.
  * May import: every room but ui and server.
  */
+export { BUILD } from '../demo';
 export { systemClock, type Clock } from './clock';
 export { Tablet, type TabletPerson } from './tablet.svelte';
 export type { Problem } from './problem';
 export { sayProblem } from './say-problem';
 export { ThisTablet } from './this-tablet.svelte';
+export { Preferences } from './preferences.svelte';
+export { lookAtStorage, sayBytes, type StorageFacts } from './storage-facts';
 export { OpenStartUp, type Held } from './open-start-up.svelte';
 export {
 	attachSeries,

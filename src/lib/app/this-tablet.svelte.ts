@@ -24,10 +24,14 @@ export class ThisTablet {
 
 	static async open(clock: Clock): Promise<Result<ThisTablet, StorageError>> {
 		const store = await openStore('gatehold', { now: printInstant(clock.now(), 0) });
-		if (!store.ok) return store;
-		const here = new ThisTablet(store.value, clock);
+		return store.ok ? ok(await ThisTablet.on(store.value, clock)) : store;
+	}
+
+	/** On a storage that is open. */
+	static async on(store: Store, clock: Clock): Promise<ThisTablet> {
+		const here = new ThisTablet(store, clock);
 		await here.lookAgain();
-		return ok(here);
+		return here;
 	}
 
 	/** Absent on a tablet that belongs to no site yet. */

@@ -62,4 +62,5 @@ export { default as PeopleList } from './pages/PeopleList.svelte';
 export type { ShownPerson } from './pages/shown-person';
 export { default as PurgeSheet } from './pages/PurgeSheet.svelte';
 export { default as StorageHealth } from './pages/StorageHealth.svelte';
+export type { StorageLine } from './pages/storage-line';
 export { default as VerifyReport } from './pages/VerifyReport.svelte';

@@ -11,6 +11,7 @@ import { SCREEN_FRAME } from './de/screen-frame';
 import { SCREEN_LINE } from './de/screen-line';
 import { SCREEN_PAGES } from './de/screen-pages';
 import { SCREEN_STEPS } from './de/screen-steps';
+import { SETTINGS } from './de/settings';
 import { STATES } from './de/states';
 import type { EN } from './en';
 
@@ -43,4 +44,5 @@ export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...SCREEN_STEPS,
 	...SCREEN_ACTS,
 	...SCREEN_PAGES,
+	...SETTINGS,
 };

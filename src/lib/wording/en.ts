@@ -11,6 +11,7 @@ import { SCREEN_FRAME } from './en/screen-frame';
 import { SCREEN_LINE } from './en/screen-line';
 import { SCREEN_PAGES } from './en/screen-pages';
 import { SCREEN_STEPS } from './en/screen-steps';
+import { SETTINGS } from './en/settings';
 import { STATES } from './en/states';
 
 /** English. Every message under a key that says where it stands; another language has the same keys. */
@@ -29,4 +30,5 @@ export const EN = {
 	...SCREEN_STEPS,
 	...SCREEN_ACTS,
 	...SCREEN_PAGES,
+	...SETTINGS,
 } as const;

@@ -3,7 +3,17 @@
  * Pure: the same data, the same sentence.
  * May import: base, quantity, identity, calc, plant, procedure, record.
  */
-export { capitalised, counted, LANGUAGES, speaker, type Facts, type Key, type Language, type Say } from './say';
+export {
+	capitalised,
+	counted,
+	LANGUAGE_NAMES,
+	LANGUAGES,
+	speaker,
+	type Facts,
+	type Key,
+	type Language,
+	type Say,
+} from './say';
 export { duration, momentsAt, type Moments } from './moment';
 export { sayCause, type Names } from './cause';
 export { sayNote, sayNumber, type SeriesClock } from './note';

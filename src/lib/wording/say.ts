@@ -10,6 +10,9 @@ export type Facts = { readonly [name: string]: string | number };
 /** Says a message of the catalogue with its facts filled in. */
 export type Say = (key: Key, facts?: Facts) => string;
 
+/** Each language by its own name. */
+export const LANGUAGE_NAMES: { readonly [language in Language]: string } = { en: 'English', de: 'Deutsch' };
+
 export const LANGUAGES = { en: EN, de: DE } as const satisfies {
 	readonly [language in Language]: { readonly [key in Key]: string };
 };

@@ -8,9 +8,9 @@ import type { LayoutLoad } from './$types';
 export const prerender = false;
 
 export const load: LayoutLoad = async ({ params, parent }): Promise<{ readonly startUp: OpenStartUp }> => {
-	const { here } = await parent();
+	const { here, preferences } = await parent();
 	if (here.tablet === undefined) redirect(307, resolve('/'));
 	const startUp = await here.startUp(params.id);
-	if (!startUp.ok) error(404, sayProblem(startUp.error, speaker('en')));
+	if (!startUp.ok) error(404, sayProblem(startUp.error, speaker(preferences.language)));
 	return { startUp: startUp.value };
 };

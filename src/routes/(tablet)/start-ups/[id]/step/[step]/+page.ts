@@ -4,8 +4,8 @@ import { speaker } from '$lib/wording';
 import type { PageLoad } from './$types';
 
 export const load: PageLoad = async ({ params, parent }): Promise<{ readonly desk: StepDesk }> => {
-	const { startUp } = await parent();
+	const { startUp, preferences } = await parent();
 	const desk = await StepDesk.open(startUp, params.step);
-	if (!desk.ok) error(404, sayProblem(desk.error, speaker('en')));
+	if (!desk.ok) error(404, sayProblem(desk.error, speaker(preferences.language)));
 	return { desk: desk.value };
 };

@@ -1,0 +1,57 @@
+/** Einstellungen: wie die Seiten aussehen, klingen und sprechen, und wie sicher die Aufzeichnung auf diesem Tablet liegt. */
+export const SETTINGS = {
+	'settings.title': 'Einstellungen',
+	'settings.lead': 'Nur für dieses Tablet. Nichts hier ändert eine Aufzeichnung.',
+	'settings.look': 'Darstellung',
+	'settings.look.day': 'Tag',
+	'settings.look.day for': 'bei Tageslicht und im Büro',
+	'settings.look.night': 'Nacht',
+	'settings.look.night for': 'in der dunklen Warte: wenig Licht, keines davon blau',
+	'settings.look.glare': 'Sonne',
+	'settings.look.glare for': 'in der Sonne: keine Grautöne, kräftigere Linien',
+	'settings.language': 'Sprache',
+	'settings.language of signed': 'Was unterschrieben ist, behält die Sprache, in der es gelesen wurde.',
+	'settings.sound': 'Ton der Uhr für die nächste Ablesung',
+	'settings.sound.on': 'Ein',
+	'settings.sound.off': 'Aus',
+	'settings.sound for': 'Ein kurzer Ton, wenn die nächste Ablesung fällig ist. Die Zeit wird in jedem Fall angezeigt.',
+	'settings.storage': 'Was dieses Tablet aufbewahrt',
+	'settings.storage.room': 'Platz',
+	'settings.storage.enough': '{used} belegt',
+	'settings.storage.scarce': 'fast voll, {used} belegt',
+	'settings.storage.of':
+		'von etwa {quota}, die der Browser zulässt. Eine Schätzung: ein großes Foto passt vielleicht trotzdem nicht.',
+	'settings.storage.unknown': 'nicht bekannt',
+	'settings.storage.does not say': 'Dieser Browser sagt nicht, wie viel Platz da ist.',
+	'settings.storage.kept': 'Vom Browser behalten',
+	'settings.storage.persisted': 'ja',
+	'settings.storage.persisted means':
+		'Der Browser löscht es nicht von selbst. Ein verlorenes oder zerstörtes Tablet nimmt es trotzdem mit.',
+	'settings.storage.not persisted': 'nicht zugesagt',
+	'settings.storage.not persisted means':
+		'Wird der Platz knapp, darf der Browser alles auf einmal löschen. Bitten Sie ihn, die Aufzeichnung zu behalten, legen Sie die App auf den Startbildschirm und machen Sie Kopien.',
+	'settings.storage.refused':
+		'Der Browser hat es nicht zugesagt. Viele tun es, sobald die App auf dem Startbildschirm liegt. Bis dahin nach jeder Schicht eine Kopie machen.',
+	'settings.storage.granted': 'Der Browser hat zugesagt, es zu behalten.',
+	'settings.copy.none': 'keine Kopie an einem zweiten Ort',
+	'settings.copy.made': 'Kopie {at} nach {to}',
+	'settings.copy.only here': 'Ereignisse, die nur dieses Tablet hat: {n}.',
+	'settings.copy.all': 'Jedes Ereignis war in dieser Kopie.',
+	'settings.copy.demonstration': 'Eine Vorführung: nichts darin würde fehlen.',
+	'settings.copy.elsewhere': 'Seine Ereignisse kamen von einem anderen Ort.',
+	'settings.erased happened': 'Der Browser hat gelöscht, was dieses Tablet aufbewahrte',
+	'settings.erased safe':
+		'alles, was vorher an einen zweiten Ort kopiert wurde. Was seit {made} hier stand, ist auf diesem Tablet weg.',
+	'settings.erased do':
+		'die neueste Kopie zurückholen oder mit einem anderen Tablet weiterarbeiten, dieses neu aufnehmen und aufschreiben, was fehlt.',
+	'settings.erased does': 'Ich habe das gelesen',
+	'settings.full happened': 'Dieses Tablet ist fast voll',
+	'settings.full safe': 'alles, was als gespeichert gemeldet wurde.',
+	'settings.full do':
+		'eine Kopie machen, dann anderes von diesem Tablet entfernen. Ablesungen sind klein und passen noch eine Weile; Fotos vielleicht nicht.',
+	'settings.loose happened': 'Der Browser darf die Aufzeichnung dieses Tablets löschen, wenn der Platz knapp wird.',
+	'settings.loose does': 'Behalten lassen',
+	'settings.version': 'Programmstand',
+	'settings.version is': '{writer}, Fassung {build}',
+	'settings.version about': 'Was Gatehold ist und was nicht',
+} as const;
