@@ -55,6 +55,8 @@ function whyNot({ why }: GateStanding): string {
 				return `refused: ${cause.reason}`;
 			case 'permissive':
 				return `${cause.permissive} ${cause.value}`;
+			case 'values to replace':
+				return `values of ${cause.from} still to be replaced: ${cause.items.join(', ')}`;
 			case 'needs release again':
 				return 'needs release again';
 		}

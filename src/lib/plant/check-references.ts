@@ -1,3 +1,4 @@
+import { itemsWithValues } from './copied';
 import type { PlantFinding } from './finding';
 import type { Plant } from './schema';
 
@@ -35,7 +36,15 @@ export function checkReferences(plant: Plant): readonly PlantFinding[] {
 			appliesTo.flatMap((tag, k) => point(`limits[${i}].appliesTo[${k}]`, tag)),
 		),
 		...point('fuel.outletPoint', plant.fuel.outletPoint),
+		...copiedItems(plant),
 	];
+}
+
+function copiedItems(plant: Plant): readonly PlantFinding[] {
+	const items = new Set(itemsWithValues(plant));
+	return (plant.copied?.toReplace ?? []).flatMap((id, i) =>
+		items.has(id) ? [] : [{ kind: 'unknown-place', path: `copied.toReplace[${i}]`, id }],
+	);
 }
 
 function ductOf(plant: Plant, path: string, id: string | undefined): readonly PlantFinding[] {

@@ -18,3 +18,4 @@ export { checkPlant, parsePlant } from './check-plant';
 export type { PlantFinding } from './finding';
 export { calibrationEnds, isInCalibration } from './calibration';
 export { differenceOf } from './difference';
+export { changedPoints, copyOf, itemsWithValues, replacedBy, type ValueList } from './copied';

@@ -199,6 +199,18 @@ const Instrument = v.strictObject({
 	due: v.pipe(v.string(), v.isoDate()),
 });
 
+/**
+ * Of a description that was begun as a copy of another unit's. An item is named by its path, `volumes/HG-21`, or by the
+ * name of what there is one of: `fuel`, `purge`, `altitude`.
+ */
+const Copied = v.strictObject({
+	from: Text,
+	/** Items whose values are still those of the unit copied: no gate is released on them. */
+	toReplace: v.array(Text),
+	/** Items whose values somebody has replaced, or has found to be this unit's own. */
+	replaced: v.array(v.strictObject({ item: Text, by: Id, at: Text })),
+});
+
 /** One plant unit: equipment, volumes, ducts, measuring points, limits and fuel data. Pinned by hash in a start-up. */
 export const PlantSchema = v.strictObject({
 	format: v.literal('gatehold-plant/1'),
@@ -232,6 +244,7 @@ export const PlantSchema = v.strictObject({
 	instruments: v.array(Instrument),
 	fuel: Fuel,
 	limits: v.array(Limit),
+	copied: v.exactOptional(Copied),
 });
 
 export type Measure = DeepReadonly<v.InferOutput<typeof MeasureSchema>>;

@@ -94,6 +94,8 @@ export const GateStandingSchema = v.strictObject({
 				unchanged: v.array(Id),
 			}),
 			v.strictObject({ kind: v.literal('permissive'), permissive: Id, value: v.string() }),
+			/** Items of the plant description whose values are still those of the unit that it was copied from. */
+			v.strictObject({ kind: v.literal('values to replace'), from: v.string(), items: v.array(Id) }),
 			v.strictObject({ kind: v.literal('needs release again'), since: InstantSchema }),
 		]),
 	),

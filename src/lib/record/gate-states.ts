@@ -65,6 +65,7 @@ function gateStanding(
 	const belowReleased = below === undefined || below.state === 'released';
 	const why: GateStanding['why'] = [
 		...refusalOf(track),
+		...(below === undefined ? valuesToReplace(played) : []),
 		...(belowReleased ? [] : [{ kind: 'lower gate' as const, gate: below.gate, state: below.state }]),
 		...stepsThatMiss(track, played, notEnough),
 		...track.openDeviations.map(({ deviation, event }) => ({ kind: 'deviation' as const, deviation, event })),
@@ -106,6 +107,12 @@ function stateOf(
 	}
 	if (nothingMissing) return 'ready';
 	return track.lastRelease === undefined ? 'not ready' : 'lapsed';
+}
+
+/** The lowest gate waits for a plant description of this unit: every later limit and volume comes from it (ST15). */
+function valuesToReplace({ facts: { plant } }: Played): GateStanding['why'] {
+	const { from = '', toReplace = [] } = plant?.copied ?? {};
+	return toReplace.length === 0 ? [] : [{ kind: 'values to replace', from, items: toReplace }];
 }
 
 function refusalOf(track: GateTrack): GateStanding['why'] {

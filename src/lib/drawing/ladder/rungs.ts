@@ -7,8 +7,8 @@ export type ContactState = 'stands' | 'not yet' | 'lapsed' | 'blocks' | 'not app
 export type Contact = {
 	readonly id: string;
 	readonly label: string;
-	/** What it stands for: the gate before, a group of steps, a blocking deviation, or a permissive. */
-	readonly of: 'gate' | 'group' | 'deviation' | 'permissive';
+	/** What it stands for: the gate before, a group of steps, a blocking deviation, a permissive, or the plant description. */
+	readonly of: 'gate' | 'group' | 'deviation' | 'permissive' | 'plant';
 	readonly state: ContactState;
 	/** "3 of 4", or the word of the state. */
 	readonly word: string;
@@ -43,6 +43,7 @@ export function rungsOf(procedure: Procedure, standing: Standing): readonly Rung
 		const released = coil === 'released';
 		const open = [
 			...(before === undefined ? [] : [gateContact(before, coilOf(standing, before.number))]),
+			...plantContacts(standing, gate.number),
 			...deviationContacts(standing, gate.number),
 			...groupContacts(procedure, standing, gate.number),
 			...permissiveContacts(procedure, standing, gate),
@@ -68,6 +69,12 @@ const gateContact = ({ number }: Gate, state: CoilState): Unpowered => ({
 	state: state === 'released' ? 'stands' : state === 'lapsed' ? 'lapsed' : 'not yet',
 	word: state,
 });
+
+/** Values of a copied plant description that are still another unit's. */
+const plantContacts = (standing: Standing, gate: number): readonly Unpowered[] =>
+	(standing.gates.find((each) => each.gate === gate)?.why ?? [])
+		.filter(({ kind }) => kind === 'values to replace')
+		.map(() => ({ id: 'plant', label: 'Plant values', of: 'plant', state: 'blocks', word: 'blocks' }));
 
 const deviationContacts = (standing: Standing, gate: number): readonly Unpowered[] =>
 	standing.deviations

@@ -36,7 +36,8 @@ export const shownRungs = ({ procedure, standing }: Told, say: Say, moments: Mom
 		const steps = procedure.steps.filter((step) => step.gate === rung.gate);
 		const contacts = rung.contacts.map((contact, i): ShownContact => {
 			const state = stateOf(contact, rung.reached && i === rung.passes && rung.coil !== 'released');
-			return { ...contact, state, word: wordOf(contact, state, { steps, standing, say, moments }) };
+			const label = contact.of === 'plant' ? say('ui.plant values') : contact.label;
+			return { ...contact, label, state, word: wordOf(contact, state, { steps, standing, say, moments }) };
 		});
 		return {
 			gate: rung.gate,
@@ -52,7 +53,7 @@ export const shownRungs = ({ procedure, standing }: Told, say: Say, moments: Mom
 
 function stateOf({ of, state, word }: Contact, isFirstOpen: boolean): ContactState {
 	if (of === 'permissive' && word === 'unknown') return 'unknown';
-	if (state === 'blocks') return of === 'deviation' ? 'blocks' : 'failed';
+	if (state === 'blocks') return of === 'deviation' || of === 'plant' ? 'blocks' : 'failed';
 	return state === 'not yet' && isFirstOpen && of === 'group' ? 'next' : state;
 }
 

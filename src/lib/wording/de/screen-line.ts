@@ -61,4 +61,5 @@ export const SCREEN_LINE: { readonly [key in keyof typeof EN]: string } = {
 	'ui.error.do': 'Zu tun:',
 	'ui.warn.inert':
 		'Stickstoff und Kohlendioxid ersticken ohne Warnung; Kohlenmonoxid vergiftet. Kein Einstieg ohne Freigabe und Gasmessung.',
+	'ui.plant values': 'Anlagenwerte',
 };

@@ -59,4 +59,5 @@ export const SCREEN_LINE = {
 	'ui.error.do': 'What to do:',
 	'ui.warn.inert':
 		'Nitrogen and carbon dioxide suffocate without warning; carbon monoxide poisons. No entry without permit and gas test.',
+	'ui.plant values': 'Plant values',
 } as const;
