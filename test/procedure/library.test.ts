@@ -1,7 +1,15 @@
 import { describe, expect, test } from 'vitest';
 import { ROLES } from '../../src/lib/identity';
-import { checkPlant } from '../../src/lib/plant';
-import { checkProcedure, fieldsOf, LIBRARY, parseProcedure, type Procedure, type Step } from '../../src/lib/procedure';
+import { checkPlant, copyOf, type Plant } from '../../src/lib/plant';
+import {
+	checkProcedure,
+	fieldsOf,
+	LIBRARY,
+	libraryFor,
+	parseProcedure,
+	type Procedure,
+	type Step,
+} from '../../src/lib/procedure';
 import { demoPlant } from '../support/demo-files';
 
 const procedure = LIBRARY['inert-start-up']!;
@@ -175,4 +183,36 @@ test('every step from the opening of the way out to the end of the purge says th
 	const steps = LIBRARY['inert-start-up']?.steps.filter(({ id }) => /^2\.(1[3-9]|2\d)$/.test(id)) ?? [];
 	expect(steps).toHaveLength(15);
 	expect(steps.filter(({ cautions }) => cautions?.includes('asphyxiation') !== true).map(({ id }) => id)).toEqual([]);
+});
+
+describe('a site that begins with the built-in procedure', () => {
+	const plant = demoPlant();
+	const own = copyOf(plant, { unit: 'OWN-1', site: 'our works', title: 'our mill', utcOffsetMinutes: 60 });
+	const withTarget = (atMost: string, guard?: string): Plant => ({
+		...own,
+		limits: own.limits.map((limit) => {
+			if (limit.id !== 'purge-oxygen') return limit;
+			const { guard: _guard, ...rest } = limit;
+			const kept = guard === undefined ? {} : { guard: { value: guard, unit: '%' } };
+			return { ...rest, ...kept, atMost: { value: atMost, unit: '%' } };
+		}),
+	});
+
+	test.each([
+		['8.0', '0.3', '7.7'],
+		['6,5', '0.2', '6.3'],
+		['7.25', undefined, '7.25'],
+	])('reads every place against its own purge target: %s less guard %s is %s', (atMost, guard, limit) => {
+		const [procedure] = libraryFor(withTarget(atMost, guard));
+		expect(procedure?.permissives?.map(({ condition }) => /o2 <= ([\d.]+)/.exec(condition)?.[1])).toEqual([
+			limit,
+			limit,
+		]);
+		expect(checkProcedure(procedure!, { plant: own, roles: ROLES }).map(({ kind }) => kind)).toEqual([]);
+	});
+
+	test('is no demonstration any more, and the demonstration keeps its own', () => {
+		expect(libraryFor(own)[0]?.demonstration).toBeUndefined();
+		expect(libraryFor(plant)).toEqual([procedure]);
+	});
 });

@@ -48,7 +48,7 @@ function about(plant: Plant, tag: string): Json {
 	const point = plant.points.find((each) => each.tag === tag);
 	const instruments = plant.instruments.filter((each) => each.point === tag || each.id === point?.instrument);
 	const limits = plant.limits.filter(({ appliesTo = [] }) => appliesTo.includes(tag));
-	return { point: point ?? null, instruments, limits } as unknown as Json;
+	return { point: point ?? null, instruments, limits };
 }
 
 const nameOf = (item: { readonly id: string } | { readonly tag: string }): string =>

@@ -37,4 +37,4 @@ export { fieldsOf, type Field } from './fields';
 export { bindInputs, type Around, type MissingInput } from './bind-inputs';
 export type { BoundReading, BoundRow, BoundSeries, Lookup } from './lookup';
 export { atPlantPath } from './plant-path';
-export { LIBRARY } from './library';
+export { LIBRARY, libraryFor } from './library';

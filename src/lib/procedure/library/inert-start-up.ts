@@ -1,3 +1,5 @@
+import type { Plant } from '../../plant';
+import { toSi } from '../../quantity';
 import type { Gate, Permissive, Procedure } from '../schema';
 import { GATE_0 } from './inert-start-up/gate-0';
 import { GATE_1 } from './inert-start-up/gate-1';
@@ -61,19 +63,19 @@ const places = (notOlderThanMinutes: number): Permissive['readings'] =>
 		]),
 	);
 
-const permissives: readonly Permissive[] = [
+/** @param atMost per cent moist: the purge target of the unit less its guard */
+const permissives = (atMost: string): readonly Permissive[] => [
 	{
 		id: 'oxygen-read',
-		title: 'Every place was read within 30 min, at most 7.7 % moist, and the fan has not stopped',
-		condition: '[o2_mill, o2_filter, o2_hopper, o2_silo].all(o2, o2 <= 7.7) && fan_runs',
+		title: `Every place was read within 30 min, at most ${atMost} % moist, and the fan has not stopped`,
+		condition: `[o2_mill, o2_filter, o2_hopper, o2_silo].all(o2, o2 <= ${atMost}) && fan_runs`,
 		readings: places(30),
 		facts: { fan_runs: { notGoingOn: 'fan-stop' } },
 	},
 	{
 		id: 'oxygen-fresh',
-		title: 'Every place was read within 10 min, at most 7.7 % moist, fan, inert gas and oxygen trip as proved',
-		condition:
-			'[o2_mill, o2_filter, o2_hopper, o2_silo].all(o2, o2 <= 7.7) && fan_runs && inert_gas_there && trip_proved',
+		title: `Every place was read within 10 min, at most ${atMost} % moist, fan, inert gas and oxygen trip as proved`,
+		condition: `[o2_mill, o2_filter, o2_hopper, o2_silo].all(o2, o2 <= ${atMost}) && fan_runs && inert_gas_there && trip_proved`,
 		readings: places(10),
 		facts: {
 			fan_runs: { notGoingOn: 'fan-stop' },
@@ -106,7 +108,23 @@ export const INERT_START_UP: Procedure = {
 	lateMinutes: 10,
 	gates,
 	steps,
-	permissives,
+	permissives: permissives('7.7'),
 	plantEvents: PLANT_EVENTS,
 	startTypes: startTypes(steps),
 };
+
+/**
+ * The same for a unit of the same build, by its own description: the conditions take the purge target of that unit, and
+ * what is pinned is no demonstration. A person of the site approves it before it is used.
+ */
+export function inertStartUpFor(plant: Plant): Procedure {
+	const { demonstration: _invented, ...procedure } = INERT_START_UP;
+	const target = plant.limits.find(({ id }) => id === 'purge-oxygen');
+	const [most, guard] = [target?.atMost, target?.guard ?? { value: '0', unit: '%' }].map((measure) =>
+		measure === undefined ? undefined : toSi(measure, 'oxygen-wet'),
+	);
+	if (most?.ok !== true || guard?.ok !== true) return procedure;
+	// Per cent, with the digits that a limit is written with; the difference of two decimals has more.
+	const atMost = String(Number(((most.value.value - guard.value.value) * 100).toFixed(3)));
+	return { ...procedure, permissives: permissives(atMost) };
+}
