@@ -97,7 +97,6 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'app.offline': 'Ganz auf diesem Tablet gespeichert: arbeitet ohne Netz.',
 	'app.gate': 'Stufe {gate}',
 	'app.unread': '{name} wurde nicht beurteilt: das Lesen brach ab. Die Datei wurde nicht geändert.',
-	'app.deviations': 'Abweichungen',
 	'app.disposition': 'Entscheidung',
 	'app.disposition.repaired': 'instand gesetzt',
 	'app.disposition.use as is': 'so belassen',

@@ -87,7 +87,6 @@ export const APP = {
 	'app.offline': 'Kept on this tablet whole: it works without network.',
 	'app.gate': 'Gate {gate}',
 	'app.unread': '{name} was not judged: the reader stopped. The file was not changed.',
-	'app.deviations': 'Deviations',
 	'app.disposition': 'Disposition',
 	'app.disposition.repaired': 'repaired',
 	'app.disposition.use as is': 'use as is',
