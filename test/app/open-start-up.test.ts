@@ -9,12 +9,14 @@ import {
 	enter,
 	OpenStartUp,
 	playDemonstration,
+	recordPlantEvent,
 	DEMONSTRATION_PIN,
 	release,
 	sheetOf,
 	suppliedTrend,
 	Tablet,
 } from '../../src/lib/app';
+import { printInstant } from '../../src/lib/record';
 import { openStore, type Store } from '../../src/lib/store';
 import { freshName, tab } from '../support/open-stores';
 import { TestClock } from '../support/tablet-clock';
@@ -134,6 +136,17 @@ describe('the demonstration, taken up in the middle of its purge', () => {
 		expect(await release(startUp, { gate: 2, pin: DEMONSTRATION_PIN, shown: stale })).toMatchObject({
 			error: { kind: 'sheet-changed' },
 		});
+	});
+
+	test('a fan stop told as just now lapses at once what rests on the fan, in whatever part of a second it is told', async () => {
+		const startUp = await inShift('TechA');
+		clock.goOn(650);
+		await startUp.reload();
+		const begin = printInstant(startUp.now, startUp.plant.utcOffsetMinutes);
+		value(await recordPlantEvent(startUp, { what: 'fan-stop', begin }));
+		expect(stateOf(startUp, '2.25')).toBe('lapsed');
+		expect(gateOf(startUp, 2)).toBe('lapsed');
+		startUp.close();
 	});
 });
 

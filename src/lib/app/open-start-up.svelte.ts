@@ -104,9 +104,12 @@ export class OpenStartUp {
 		return this.#saved;
 	}
 
-	/** The moment that is shown, in milliseconds. */
+	/**
+	 * The moment that is shown, in milliseconds: whole seconds, as everything is judged and printed by. What happened "just now"
+	 * would else have happened after the moment that is judged.
+	 */
 	get now(): number {
-		return this.#now;
+		return wholeSecond(this.#now);
 	}
 
 	get isSealed(): boolean {
@@ -115,7 +118,7 @@ export class OpenStartUp {
 
 	/** Now, or a moment of the clock, as plant local time. */
 	instant(at = this.#now): string {
-		return printInstant(Math.floor(at / 1000) * 1000, this.plant.utcOffsetMinutes);
+		return printInstant(wholeSecond(at), this.plant.utcOffsetMinutes);
 	}
 
 	standingAt(instant: string): Standing {
@@ -275,6 +278,8 @@ export class OpenStartUp {
 		);
 	}
 }
+
+const wholeSecond = (at: number): number => Math.floor(at / 1000) * 1000;
 
 /** A finding is about the instrument, in every start-up. */
 const SITE_KINDS: ReadonlySet<EventKind> = new Set(['instrument finding']);

@@ -1,0 +1,111 @@
+import type { Page } from 'playwright-core';
+import { DEMONSTRATION_PIN } from '../../src/lib/app';
+
+/** What people do on the app's screens, for every test that plays it in a browser. */
+
+const LOOKS_LONG = 120_000;
+
+/** First open, one tap: the demonstration is played on this tablet and its line is shown. */
+export async function demonstration(page: Page, address: string): Promise<void> {
+	if (!page.url().startsWith(address)) await page.goto(address);
+	await page.getByRole('button', { name: 'Show the demonstration' }).click();
+	await page.getByRole('heading', { name: /stops at/ }).waitFor({ timeout: LOOKS_LONG });
+}
+
+/** To another address of the app without loading it anew: shifts and what can be taken back live on, as for a person. */
+export async function go(page: Page, path: string): Promise<void> {
+	await page.evaluate((href) => {
+		const link = document.createElement('a');
+		link.href = href;
+		document.body.append(link);
+		link.click();
+		link.remove();
+	}, path);
+	await page.waitForURL((url) => url.pathname === path);
+}
+
+/** The address of the start-up that the page shows. */
+export function startUpOf(page: Page): string {
+	const [path] = /\/start-ups\/[^/]+/.exec(new URL(page.url()).pathname) ?? [];
+	if (path === undefined) throw new Error(`no start-up is shown at ${page.url()}`);
+	return path;
+}
+
+export async function toStep(page: Page, step: string): Promise<void> {
+	await go(page, `${startUpOf(page)}/step/${step}`);
+	await page.getByText(`Step ${step}`, { exact: true }).first().waitFor();
+}
+
+export const toLine = (page: Page): Promise<void> => go(page, startUpOf(page));
+
+/** Two taps: the tablet changes hands; the page that was shown comes back. */
+export async function takeTablet(page: Page, name: string): Promise<void> {
+	const { pathname } = new URL(page.url());
+	await go(page, '/people');
+	const take = page.getByRole('button', { name: `Take the tablet: ${name}` });
+	await page.getByRole('heading', { level: 1 }).waitFor();
+	if ((await take.count()) > 0) {
+		await take.click();
+		// The offer is gone once that person holds it; "holds the tablet" alone could be said of the one before.
+		await take.waitFor({ state: 'detached' });
+	}
+	await go(page, pathname);
+}
+
+export async function beginShift(page: Page, pin: string = DEMONSTRATION_PIN): Promise<void> {
+	await page.getByLabel('PIN').first().fill(pin);
+	await page.getByRole('button', { name: 'Begin shift' }).click();
+}
+
+/** Begins the shift of whoever holds the tablet, where the page asks for it. */
+export async function shiftIfAsked(page: Page): Promise<void> {
+	const begin = page.getByRole('button', { name: 'Begin shift' });
+	if (!(await begin.isVisible())) return;
+	await beginShift(page);
+	await begin.waitFor({ state: 'detached' });
+}
+
+/** Readings one after the other, each ended with Enter. */
+export async function typeAll(page: Page, readings: readonly string[]): Promise<void> {
+	for (const reading of readings) {
+		await page.getByRole('article').getByRole('textbox').first().fill(reading);
+		await page.keyboard.press('Enter');
+	}
+}
+
+/** What was saved moves the screen on from its step. */
+export async function saved(page: Page, step: string): Promise<void> {
+	await page.waitForURL((url) => !url.pathname.endsWith(`/step/${step}`));
+	await page.getByText(/^Saved on this tablet/).waitFor();
+}
+
+/** One step, entered: its page, a shift if there is none, what `types` does, and saved. */
+export async function onStep(page: Page, step: string, types: () => Promise<unknown>): Promise<void> {
+	await toStep(page, step);
+	await shiftIfAsked(page);
+	await types();
+	await saved(page, step);
+}
+
+export const confirmAll = async (page: Page): Promise<void> => {
+	const open = page.getByRole('checkbox', { checked: false });
+	for (let left = await open.count(); left > 0; left--) await open.first().click();
+	await pressSave(page);
+};
+
+/** The one filled act of a step's sheet; what can still be taken back has a "Save now" of its own. */
+export const pressSave = (page: Page): Promise<void> =>
+	page.getByRole('article').getByRole('button', { name: /^Save/ }).click();
+
+/** The hold point's sheet, ready for a signature: without a copy, for a reason, and declared. */
+export async function declareWithoutCopy(page: Page, reason: string): Promise<void> {
+	await page.getByRole('button', { name: 'Release without' }).click();
+	await page.getByLabel('Why without a copy?').fill(reason);
+	await page.getByRole('button', { name: 'Go on without a copy' }).click();
+	await page.getByRole('checkbox').check();
+}
+
+export async function release(page: Page, gate: number, pin: string = DEMONSTRATION_PIN): Promise<void> {
+	await page.getByLabel('PIN').last().fill(pin);
+	await page.getByRole('button', { name: `Release Gate ${gate}` }).click();
+}

@@ -1,0 +1,141 @@
+import type { Page } from 'playwright-core';
+import { LIBRARY } from '../../src/lib/procedure';
+import {
+	confirmAll,
+	declareWithoutCopy,
+	demonstration,
+	go,
+	onStep,
+	pressSave,
+	release,
+	shiftIfAsked,
+	startUpOf,
+	takeTablet,
+	toLine,
+	toStep,
+	typeAll,
+} from './app-hands';
+import { routePatterns } from './routes';
+
+/** Called on every stop of the tour, with its name: "line", "step 2.26 watch". */
+export type Visit = (stop: string) => Promise<void>;
+
+/**
+ * Every page of the app as people meet it, once: empty, with the demonstration, with a gate ready, released, and after a fan
+ * stop. Pages without parameters are found by themselves, so that a new one is on the tour as soon as it exists.
+ */
+export async function tour(page: Page, address: string, visit: Visit): Promise<void> {
+	await page.goto(address);
+	for (const path of topPlaces()) {
+		await go(page, path);
+		await settled(page);
+		await visit(`empty ${nameOf(path)}`);
+	}
+	await go(page, '/');
+	await demonstration(page, address);
+	await settled(page);
+	await visit('line');
+	await page.getByRole('button', { name: 'Outline' }).click();
+	await visit('outline');
+	const startUp = startUpOf(page);
+	for (const path of topPlaces()) {
+		if (path === '/') continue;
+		await go(page, path);
+		await settled(page);
+		await visit(nameOf(path));
+	}
+	await go(page, startUp);
+	await toStep(page, '2.26');
+	await visit('step without a shift');
+	await shiftIfAsked(page);
+	for (const [kind, step] of stepOfEveryKind()) {
+		await toStep(page, step);
+		await visit(`step ${step} ${kind}`);
+	}
+	await go(page, `${startUp}/gate/2`);
+	await visit('gate not ready');
+	await finishGate2(page);
+	await visit('line gate ready');
+	await takeTablet(page, 'Imre Castellvor');
+	for (const path of startUpPlaces(startUp)) {
+		await go(page, path);
+		await settled(page);
+		await visit(nameOf(path.slice(startUp.length)));
+	}
+	await go(page, `${startUp}/gate/2`);
+	await visit('gate ready');
+	await page.getByRole('button', { name: 'Refuse, say why' }).click();
+	await visit('gate refusing');
+	await page.getByRole('button', { name: 'Back', exact: true }).click();
+	await declareWithoutCopy(page, 'no second place in reach');
+	await release(page, 2);
+	await page
+		.getByRole('heading', { name: /Gate 3/ })
+		.first()
+		.waitFor();
+	await fanStop(page, visit);
+	for (const name of ['foreign-record.ndjson', 'damaged-record.ndjson']) {
+		await go(page, '/archive');
+		await page.locator('input[type=file]').first().setInputFiles(`static/demo/${name}`);
+		await page.getByText(name).first().waitFor();
+		await visit(`archive ${name.replace(/-.*/, '')}`);
+	}
+}
+
+/** Pages of the app that need no start-up: without parameters. */
+const topPlaces = (): readonly string[] => routePatterns().filter((pattern) => !pattern.includes('['));
+
+/** Pages of a start-up that need nothing else. */
+const startUpPlaces = (startUp: string): readonly string[] =>
+	routePatterns()
+		.filter((pattern) => pattern.startsWith('/start-ups/[id]/') && pattern.split('[').length === 2)
+		.map((pattern) => pattern.replace('/start-ups/[id]', startUp));
+
+const nameOf = (path: string): string => (path === '/' ? 'today' : path.slice(1).replaceAll('/', ' '));
+
+/** One step of every kind, at or before the purge where there is one. */
+function stepOfEveryKind(): ReadonlyMap<string, string> {
+	const kinds = new Map<string, string>();
+	const steps = LIBRARY['inert-start-up']?.steps ?? [];
+	for (const { kind, id } of [...steps.filter(({ gate }) => gate <= 2).reverse(), ...steps]) {
+		if (!kinds.has(kind)) kinds.set(kind, id);
+	}
+	return kinds;
+}
+
+/** What is left of the purge of the demonstration, as TechA does it. */
+export async function finishGate2(page: Page): Promise<void> {
+	await onStep(page, '2.22', async () => {
+		await page.getByRole('button', { name: 'measuring' }).click();
+		await typeAll(page, ['3,1', '3,3', '6,4', '3.8']);
+	});
+	await onStep(page, '2.23', () => confirmAll(page));
+	await onStep(page, '2.21', async () => {
+		await page.getByRole('button', { name: 'Use the trend supplied with the demonstration' }).click();
+		await page.getByRole('button', { name: 'Keep this series' }).click();
+	});
+	for (const calculation of ['2.25', '2.27']) await onStep(page, calculation, () => pressSave(page));
+	await onStep(page, '2.26', async () => {
+		await page.getByRole('button', { name: 'Unbroken' }).click();
+		await typeAll(page, ['3,1', '3,3', '6,3', '3,8']);
+	});
+	await toLine(page);
+}
+
+async function fanStop(page: Page, visit: Visit): Promise<void> {
+	await takeTablet(page, 'Edda Varnholt');
+	await go(page, `${startUpOf(page)}/happened`);
+	await page.getByRole('button', { name: 'Process-gas fan stopped', exact: true }).click();
+	await visit('happened fan-stop');
+	await page.getByRole('button', { name: /^Record/ }).click();
+	await page.waitForURL(/\/lapsed$/);
+	await visit('lapsed fan-stop');
+	await toLine(page);
+	await visit('line fan-stop');
+}
+
+/** Until nothing that a page fetches by itself is still on its way. */
+async function settled(page: Page): Promise<void> {
+	await page.locator('main').first().waitFor();
+	await page.waitForLoadState('networkidle');
+}
