@@ -56,7 +56,7 @@ const faultsOfShape = (page: Page): Promise<readonly string[]> =>
 			const { width, height } = element.getBoundingClientRect();
 			return width > 1 && height > 1 && element.closest('.unseen') === null && element.checkVisibility();
 		};
-		const headings = [...document.querySelectorAll('h1')].filter(isSeen);
+		const headings = [...document.querySelectorAll('h1')].filter((heading) => heading.checkVisibility());
 		if (headings.length !== 1) found.push(`it has ${headings.length} headings of the first level`);
 		for (const element of document.querySelectorAll(
 			'button, a[href], [role=button], select, summary, label.word, label.do, input:not([type=checkbox], [type=radio])',

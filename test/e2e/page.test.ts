@@ -36,7 +36,7 @@ test('the page asks no other machine, is free of faults that a program can see, 
 					});
 				}
 			}
-			expect(await page.title()).toBe('Gatehold');
+			expect(await page.title()).toBe('Gatehold: about');
 			expect(await page.evaluate(() => document.fonts.check('700 18px "Sofia Sans"'))).toBe(true);
 			expect(new Set(asked)).toEqual(new Set([address]));
 			expect(complaints).toEqual([]);

@@ -32,15 +32,15 @@ export async function takeScreens({ folder, sizes, looks, only = '' }: Wanted): 
 		withChromium(
 			async (browser) => {
 				const page = await browser.newPage();
-				page.on('pageerror', (error) => console.error(String(error)));
 				await tour(page, address, async (stop) => {
 					if (!stop.includes(only)) return;
 					taken.push(stop);
 					for (const size of sizes) {
 						await page.setViewportSize(SIZES[size]);
+						await page.setViewportSize({ ...SIZES[size], height: await wholeHeight(page) });
 						for (const look of looks) {
 							await wear(page, look);
-							await page.screenshot({ path: join(folder, fileOf(stop, size, look)), fullPage: true });
+							await page.screenshot({ path: join(folder, fileOf(stop, size, look)) });
 						}
 					}
 					await page.setViewportSize(SIZES.tablet);
@@ -62,6 +62,10 @@ export async function wear(page: Page, look: Look): Promise<void> {
 		await new Promise((resolve) => requestAnimationFrame(() => requestAnimationFrame(resolve)));
 	}, look);
 }
+
+/** A screen as long as the page: a picture of a part would show bars that stick to its edge in the middle. */
+const wholeHeight = (page: Page): Promise<number> =>
+	page.evaluate(() => Math.max(innerHeight, document.documentElement.scrollHeight));
 
 const fileOf = (stop: string, size: Size, look: Look): string => `${stop.replaceAll(/[ .]/g, '-')}.${size}.${look}.png`;
 

@@ -77,6 +77,7 @@ export async function tour(page: Page, address: string, visit: Visit): Promise<v
 	for (const name of ['foreign-record.ndjson', 'damaged-record.ndjson']) {
 		await go(page, '/archive');
 		await page.locator('input[type=file]').first().setInputFiles(`static/demo/${name}`);
+		await page.getByRole('progressbar').waitFor({ state: 'detached' });
 		await page.getByText(name).first().waitFor();
 		await visit(`archive ${name.replace(/-.*/, '')}`);
 	}
