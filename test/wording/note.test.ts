@@ -19,7 +19,7 @@ describe('a note of a calculator', () => {
 			t: 2040,
 			last: 0.0831,
 		};
-		expect(sayNote(note, clock)).toBe(
+		expect(sayNote(note, say, clock)).toBe(
 			'(b) AT-213: 7 readings of the hold above 7.7\u00a0%, the worst 9.48\u00a0% at 21:14, the last 8.31\u00a0%.',
 		);
 	});
@@ -33,16 +33,16 @@ describe('a note of a calculator', () => {
 			to: 900,
 			longest: 120,
 		};
-		expect(sayNote(note)).toBe('AT-213: no reading from 600\u00a0s to 900\u00a0s; at most 2\u00a0min is allowed.');
+		expect(sayNote(note, say)).toBe('AT-213: no reading from 600\u00a0s to 900\u00a0s; at most 2\u00a0min is allowed.');
 	});
 
 	test('that the catalogue does not know is said by its name and facts: nothing is lost', () => {
 		const note: CalcNote = { kind: 'throat-changed-twice', level: 'warning', byHowMuch: 0.002, parts: ['a', 'b'] };
-		expect(sayNote(note, clock)).toBe('Throat changed twice: by how much 0.002, parts a, b.');
+		expect(sayNote(note, say, clock)).toBe('Throat changed twice: by how much 0.002, parts a, b.');
 	});
 
 	test('that lacks a fact of its sentence is said plainly', () => {
-		expect(sayNote({ kind: 'slowest-place', level: 'remark' }, clock)).toBe('Slowest place.');
+		expect(sayNote({ kind: 'slowest-place', level: 'remark' }, say, clock)).toBe('Slowest place.');
 	});
 });
 
@@ -70,5 +70,39 @@ test.each([
 	[1234.5, '1235'],
 	[0, '0'],
 ])('%d is shown as %s', (value, shown) => {
-	expect(sayNumber(value)).toBe(shown);
+	expect(sayNumber(value, say)).toBe(shown);
+});
+
+test.each([
+	[16050.4, '16\u00a0050'],
+	[-3.14159, '−3,142'],
+	[0.00012345, '1,234e−4'],
+	[7.7, '7,7'],
+])('in German %d is shown as %s', (value, shown) => {
+	expect(sayNumber(value, speaker('de'))).toBe(shown);
+});
+
+test('a note in German has its words, its decimal commas and its moments', () => {
+	const note: CalcNote = {
+		kind: 'above-line',
+		level: 'reason',
+		place: 'AT-213',
+		count: 7,
+		accept: 0.077,
+		oxygen: 0.0948,
+		t: 2040,
+		last: 0.0831,
+	};
+	const german = speaker('de');
+	expect(sayNote(note, german, { zero: clock.zero, moments: momentsAt(60, german) })).toBe(
+		'AT-213: 7 Messwerte der Haltezeit über 7,7\u00a0%, der schlechteste 9,48\u00a0% um 21:14, der letzte 8,31\u00a0%.',
+	);
+});
+
+test('the sentence of an adequate purge in German has decimal commas throughout', () => {
+	const german = speaker('de');
+	const result = run({ ...purgeInputs({}, 60), zero: clock.zero });
+	expect(purgeSentence(result, german, { zero: clock.zero, moments: momentsAt(60, german) })).toMatch(
+		/an allen 4 gemessenen Stellen bei oder unter 7,7\u00a0% feucht \(Grenzwert 8\u00a0%, Schutzband 0,3\) über .+ Keine Erlaubnis\.$/,
+	);
 });

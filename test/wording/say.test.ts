@@ -1,5 +1,15 @@
 import { describe, expect, test } from 'vitest';
-import { capitalised, counted, duration, LANGUAGES, momentsAt, speaker, type Key } from '../../src/lib/wording';
+import {
+	capitalised,
+	counted,
+	duration,
+	LANGUAGES,
+	momentsAt,
+	speaker,
+	speakerOf,
+	type Key,
+	type Language,
+} from '../../src/lib/wording';
 
 const say = speaker('en');
 
@@ -18,6 +28,14 @@ describe('a message', () => {
 		expect(say('entries.reason', { reason: 'press {start} twice, pay $1' })).toBe(
 			'reason: press {start} twice, pay $1',
 		);
+	});
+
+	test('is said in the language that is chosen when it is said', () => {
+		let chosen: Language = 'en';
+		const spoken = speakerOf(() => chosen);
+		const both = [spoken('ui.gate', { gate: 2 }), spoken.language];
+		chosen = 'de';
+		expect([...both, spoken('ui.gate', { gate: 2 }), spoken.language]).toEqual(['Gate 2', 'en', 'Stufe 2', 'de']);
 	});
 
 	test('says one and many apart', () => {

@@ -9,6 +9,7 @@ export {
 	LANGUAGE_NAMES,
 	LANGUAGES,
 	speaker,
+	speakerOf,
 	type Facts,
 	type Key,
 	type Language,
@@ -16,7 +17,7 @@ export {
 } from './say';
 export { duration, momentsAt, type Moments } from './moment';
 export { sayCause, type Names } from './cause';
-export { sayNote, sayNumber, type SeriesClock } from './note';
+export { sayNote, sayNumber, withMark, type SeriesClock } from './note';
 export { purgeSentence } from './purge-sentence';
 export {
 	sayConditionFinding,

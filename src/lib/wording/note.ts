@@ -1,10 +1,8 @@
 import type { Json } from '../base';
 import type { CalcNote } from '../calc';
 import { fromSi, shownUnit, type QuantityName } from '../quantity';
-import { NOTES } from './en/notes';
-import { STATES } from './en/states';
 import { duration, type Moments } from './moment';
-import { capitalised } from './say';
+import { capitalised, isKey, LANGUAGES, type Say } from './say';
 import { printInstant, millis } from '../record';
 
 /** What a moment of a series means on the clock: the instant of its zero, when the calculation knows it. */
@@ -14,39 +12,37 @@ export type SeriesClock = { readonly zero: string | undefined; readonly moments:
  * A calculator's note as a sentence of the catalogue; where there is none, as its name and facts in SI units, so that
  * nothing a calculator said is lost.
  */
-export function sayNote(note: CalcNote, clock?: SeriesClock): string {
+export function sayNote(note: CalcNote, say: Say, clock?: SeriesClock): string {
 	const { kind, level: _level, criterion, ...facts } = note;
 	const head = typeof criterion === 'string' && criterion.length === 1 ? `(${criterion}) ` : '';
 	const key = `note.${kind}`;
-	const filled = isNote(key) ? fill(NOTES[key], note, clock) : undefined;
-	return head + (filled ?? plainly(kind, facts));
+	const filled = isKey(key) ? fill(LANGUAGES[say.language][key], note, say, clock) : undefined;
+	return head + (filled ?? plainly(kind, facts, say));
 }
 
-const isNote = (key: string): key is keyof typeof NOTES => Object.hasOwn(NOTES, key);
-
 /** @returns undefined when the note lacks a fact that the sentence needs: then it is said plainly */
-function fill(template: string, note: CalcNote, clock: SeriesClock | undefined): string | undefined {
+function fill(template: string, note: CalcNote, say: Say, clock: SeriesClock | undefined): string | undefined {
 	const missing = [...template.matchAll(PLACEHOLDER)].some(([, name = '']) => (note[name] ?? null) === null);
 	if (missing) return undefined;
 	return template.replace(PLACEHOLDER, (_, name: string, form: string | undefined) =>
-		shownFact(note[name] ?? null, form, clock),
+		shownFact(note[name] ?? null, form, say, clock),
 	);
 }
 
 const PLACEHOLDER = /\{(\w+)(?::([\w%]+))?\}/g;
 
-function shownFact(fact: Json, form: string | undefined, clock: SeriesClock | undefined): string {
-	if (form === 'basis' && (fact === 'wet' || fact === 'dry')) return STATES[`basis.${fact}`];
-	if (typeof fact !== 'number' || form === undefined) return sayFact(fact);
+function shownFact(fact: Json, form: string | undefined, say: Say, clock: SeriesClock | undefined): string {
+	if (form === 'basis' && (fact === 'wet' || fact === 'dry')) return say(`basis.${fact}`);
+	if (typeof fact !== 'number' || form === undefined) return sayFact(fact, say);
 	if (form === 'time') return duration(fact * 1000);
 	if (form === 'clock')
 		return clock?.zero === undefined
-			? `${sayNumber(fact)}\u00a0s`
+			? `${sayNumber(fact, say)}\u00a0s`
 			: clock.moments.clock(printInstant(millis(clock.zero) + fact * 1000, 0));
 	const shown = FORMS[form];
-	if (shown === undefined) return sayNumber(fact);
+	if (shown === undefined) return sayNumber(fact, say);
 	const value = fromSi(fact, shown.quantity, shown.unit);
-	return `${sayNumber(value.ok ? value.value : fact)}\u00a0${shownUnit(shown.unit)}`;
+	return `${sayNumber(value.ok ? value.value : fact, say)}\u00a0${shownUnit(shown.unit)}`;
 }
 
 const FORMS: { readonly [form: string]: { readonly quantity: QuantityName; readonly unit: string } } = {
@@ -57,26 +53,34 @@ const FORMS: { readonly [form: string]: { readonly quantity: QuantityName; reado
 	K: { quantity: 'temperature-difference', unit: 'K' },
 };
 
-function plainly(kind: string, facts: { readonly [name: string]: Json }): string {
+function plainly(kind: string, facts: { readonly [name: string]: Json }, say: Say): string {
 	const said = Object.entries(facts).flatMap(([name, value]) =>
-		value === null ? [] : [`${spaced(name)} ${sayFact(value)}`],
+		value === null ? [] : [`${spaced(name)} ${sayFact(value, say)}`],
 	);
 	const title = capitalised(spaced(kind));
 	return said.length === 0 ? `${title}.` : `${title}: ${said.join(', ')}.`;
 }
 
-function sayFact(value: Json): string {
-	if (typeof value === 'number') return sayNumber(value);
+function sayFact(value: Json, say: Say): string {
+	if (typeof value === 'number') return sayNumber(value, say);
 	if (typeof value === 'string') return value;
 	if (typeof value === 'boolean' || value === null) return String(value);
-	if (Array.isArray(value)) return value.map(sayFact).join(', ');
+	if (Array.isArray(value)) return value.map((part) => sayFact(part, say)).join(', ');
 	return Object.entries(value)
-		.map(([name, part]) => `${spaced(name)} ${sayFact(part)}`)
+		.map(([name, part]) => `${spaced(name)} ${sayFact(part, say)}`)
 		.join(' ');
 }
 
 /** Four significant digits, as is enough to recognise a value; the stored result has them all. */
-export function sayNumber(value: number): string {
+export function sayNumber(value: number, say: Say): string {
+	return withMark(printed(value), say);
+}
+
+/** A number of the program's data with the decimal mark of the language; what a person typed is never changed. */
+export const withMark = (number: string, say: Say): string =>
+	say.language === 'de' && /^\D?\d[\d\u00a0]*\.\d/.test(number) ? number.replace('.', ',') : number;
+
+function printed(value: number): string {
 	if (!Number.isFinite(value)) return String(value);
 	const size = Math.abs(value);
 	if (size !== 0 && (size < 1e-3 || size >= 1e7)) return value.toExponential(3).replaceAll('-', '−').replace('+', '');

@@ -2,7 +2,7 @@ import * as v from 'valibot';
 import type { CalcResult } from '../calc';
 import { fromSi, shownUnit, toSi } from '../quantity';
 import { duration } from './moment';
-import { sayNumber, type SeriesClock } from './note';
+import { sayNumber, withMark, type SeriesClock } from './note';
 import { millis, printInstant } from '../record';
 import type { Say } from './say';
 
@@ -28,15 +28,15 @@ export function purgeSentence(
 	);
 	const slowest = notes.find(({ kind }) => kind === 'slowest-place')?.place;
 	const title = places.find(({ tag }) => tag === slowest)?.title ?? slowest;
-	const bound = `${String(limit.oxygen.value)}\u00a0${shownUnit(limit.oxygen.unit)}`;
+	const bound = `${withMark(String(limit.oxygen.value), say)}\u00a0${shownUnit(limit.oxygen.unit)}`;
 	return [
 		say('purge.adequate', {
 			since: moments.clock(printInstant(millis(zero) + since * 1000, 0)),
 			places: places.length,
-			accept: acceptance(limit.oxygen, guard),
+			accept: acceptance(limit.oxygen, guard, say),
 			basis: say(`basis.${limit.basis}`),
 			limit: bound,
-			guard: String(guard.value),
+			guard: withMark(String(guard.value), say),
 			held: duration(held * 1000),
 		}),
 		...(swept.length === 0 ? [] : [say('purge.swept', { n: swept.length, list: swept.join(', ') })]),
@@ -48,10 +48,10 @@ export function purgeSentence(
 type Measure = { readonly value: string | number; readonly unit: string };
 
 /** Limit less guard, in the unit of the limit. */
-function acceptance(limit: Measure, guard: Measure): string {
+function acceptance(limit: Measure, guard: Measure, say: Say): string {
 	const [most, kept] = [toSi(limit, 'fraction'), toSi(guard, 'fraction')];
 	const shown = most.ok && kept.ok ? fromSi(most.value.value - kept.value.value, 'fraction', limit.unit) : undefined;
-	return shown?.ok === true ? `${sayNumber(shown.value)}\u00a0${shownUnit(limit.unit)}` : '–';
+	return shown?.ok === true ? `${sayNumber(shown.value, say)}\u00a0${shownUnit(limit.unit)}` : '–';
 }
 
 const Measured = v.looseObject({ value: v.union([v.string(), v.number()]), unit: v.string() });

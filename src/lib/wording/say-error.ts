@@ -68,7 +68,7 @@ export function sayRefusal(refusal: Refusal, say: Say): string {
 	const key = [`refusal.${kind}`, `quantity.${kind}`].find(isKey);
 	const known = { ...factsOf(facts), range: rangeOf(refusal) };
 	if (key !== undefined && asksFor(key).every((name) => Object.hasOwn(known, name))) return at + say(key, known);
-	return at + sayNote({ kind, level: 'reason', ...definedFacts(facts) });
+	return at + sayNote({ kind, level: 'reason', ...definedFacts(facts) }, say);
 }
 
 function rangeOf({ min, max, unit }: Refusal): string {

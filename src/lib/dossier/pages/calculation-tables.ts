@@ -65,7 +65,7 @@ function row(story: Story, result: CalcResult, name: string, columns: readonly s
 	const shown = columns.map((column) => {
 		const value = result.values[column];
 		if (value === undefined) return '–';
-		return momentOf(name, value.value, result, story) ?? shownValue(value, output?.quantity ?? '');
+		return momentOf(name, value.value, result, story) ?? shownValue(value, output?.quantity ?? '', story.say);
 	});
 	return { cells: [output?.means ?? name, shownSymbol(output?.symbol ?? ''), ...shown] };
 }
@@ -91,7 +91,9 @@ export function inputTable(flow: Flow, story: Story, { calc, constants, inputs }
 			{ head: say('calc.name'), width: 130 },
 			{ head: say('calc.given') },
 		],
-		inputLines(inputs).map(({ name, lines }) => ({ cells: [name, known.get(name)?.means ?? '', lines.join('\n')] })),
+		inputLines(inputs, say).map(({ name, lines }) => ({
+			cells: [name, known.get(name)?.means ?? '', lines.join('\n')],
+		})),
 	);
 	flow.write(say('calc.inputs', { constants }), STYLES.note);
 }

@@ -111,7 +111,7 @@ function notes(flow: Flow, story: Story, result: CalcResult): void {
 	if (result.notes.length === 0) return;
 	const clock: SeriesClock = { zero: zeroOf(result), moments: story.moments };
 	flow.heading(story.say('calc.notes'), { style: STYLES.subheading });
-	for (const note of result.notes) flow.write(sayNote(note, clock), STYLES.note);
+	for (const note of result.notes) flow.write(sayNote(note, story.say, clock), STYLES.note);
 }
 
 const CLOCK_UNITS = ['s', 'min', 'h'];

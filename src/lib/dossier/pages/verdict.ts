@@ -20,7 +20,7 @@ export function verdict(flow: Flow, { say, moments }: Story, result: CalcResult)
 	const said =
 		judged.word === 'adequate'
 			? [purgeSentence(result, say, clock) ?? say('calc.adequate')]
-			: judged.reasons.map((reason) => sayNote(reason, clock));
+			: judged.reasons.map((reason) => sayNote(reason, say, clock));
 	const lines = [...said, ...outside].filter((line) => line !== '');
 	const left = 40;
 	const set = lines.flatMap((line) => wrap(line, AREA.width - left - 14, STYLES.body));

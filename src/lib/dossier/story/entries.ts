@@ -133,7 +133,7 @@ function calculated(event: Entry, step: Step, story: Story): readonly Found[] {
 	const means = capitalised(outputOf(result.calc, output)?.means ?? output);
 	return value === undefined
 		? []
-		: [line(means, shownIn(value, quantity, unit), bounds === undefined ? '' : printBounds(bounds, story))];
+		: [line(means, shownIn(value, quantity, unit, story.say), bounds === undefined ? '' : printBounds(bounds, story))];
 }
 
 function chosen({ choice, confirmed }: Body, step: Step): readonly Found[] {
