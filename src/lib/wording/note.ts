@@ -65,7 +65,7 @@ function sayFact(value: Json, say: Say): string {
 	if (typeof value === 'number') return sayNumber(value, say);
 	if (typeof value === 'string') return value;
 	if (typeof value === 'boolean' || value === null) return String(value);
-	if (Array.isArray(value)) return value.map((part) => sayFact(part, say)).join(', ');
+	if (Array.isArray(value)) return value.map((part: Json) => sayFact(part, say)).join(', ');
 	return Object.entries(value)
 		.map(([name, part]) => `${spaced(name)} ${sayFact(part, say)}`)
 		.join(' ');

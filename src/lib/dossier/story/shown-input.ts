@@ -15,7 +15,7 @@ export function inputLines(
 /** A list is told item by item, a group part by part, everything else in one line. */
 function linesOf(value: Json, say: Say): readonly string[] {
 	if (Array.isArray(value) && value.some((item) => typeof item === 'object'))
-		return value.map((item) => said(item, say));
+		return value.map((item: Json) => said(item, say));
 	if (isGroup(value) && !isMeasure(value) && Object.values(value).some(isGroup)) {
 		return Object.entries(value).map(([name, part]) => `${name}: ${said(part, say)}`);
 	}
@@ -28,7 +28,7 @@ function said(value: Json, say: Say): string {
 	if (value === null || typeof value === 'boolean') return String(value);
 	if (Array.isArray(value)) {
 		const isLong = value.length > 8 && value.every((item) => typeof item === 'number');
-		return isLong ? say('app.origin.entries', { n: value.length }) : value.map((item) => said(item, say)).join(' / ');
+		return isLong ? say('app.origin.entries', { n: value.length }) : value.map((item: Json) => said(item, say)).join(' / ');
 	}
 	const group = value as { readonly [name: string]: Json };
 	if (isMeasure(group)) {
