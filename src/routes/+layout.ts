@@ -5,4 +5,6 @@ export const ssr = false;
 export const prerender = true;
 
 /** Made once, for as long as the tab lives. */
-export const load = (): { readonly preferences: Preferences } => ({ preferences: new Preferences(localStorage) });
+export const load = (): { readonly preferences: Preferences } => ({
+	preferences: new Preferences(localStorage, navigator.languages),
+});

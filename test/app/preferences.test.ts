@@ -19,6 +19,12 @@ test('what was chosen for this tablet is there again after a reload', () => {
 	expect(memory.kept).toEqual({ look: 'night', sound: 'off' });
 });
 
+test('as long as nobody chose, the language is the first of the browser that the app speaks', () => {
+	expect(new Preferences(memoryOf({}), ['fr-FR', 'de-AT', 'en-GB']).language).toBe('de');
+	expect(new Preferences(memoryOf({}), ['fr-FR']).language).toBe('en');
+	expect(new Preferences(memoryOf({ language: 'en' }), ['de']).language).toBe('en');
+});
+
 test('a language that the app does not speak is English', () => {
 	expect(new Preferences(memoryOf({ language: 'xx' })).language).toBe('en');
 	expect(new Preferences(memoryOf({ language: 'toString' })).language).toBe('en');

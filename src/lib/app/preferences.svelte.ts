@@ -3,10 +3,13 @@ import { LANGUAGES, type Language } from '../wording';
 /** What a person chose for this tablet's screens. It lies beside the database, so that it is known before that opens. */
 export class Preferences {
 	readonly #memory: Pick<Storage, 'getItem' | 'setItem'>;
+	readonly #asked: Language;
 	#chosen = $state.raw<{ readonly [name: string]: string }>({});
 
-	constructor(memory: Pick<Storage, 'getItem' | 'setItem'>) {
+	/** @param languages what the browser asks for, best first: the language as long as nobody chose */
+	constructor(memory: Pick<Storage, 'getItem' | 'setItem'>, languages: readonly string[] = []) {
 		this.#memory = memory;
+		this.#asked = languages.map((each) => each.slice(0, 2).toLowerCase()).find(isLanguage) ?? 'en';
 		this.#chosen = Object.fromEntries(NAMES.map((name) => [name, memory.getItem(name) ?? '']));
 	}
 
@@ -21,7 +24,7 @@ export class Preferences {
 
 	get language(): Language {
 		const { language = '' } = this.#chosen;
-		return Object.hasOwn(LANGUAGES, language) ? (language as Language) : 'en';
+		return isLanguage(language) ? language : this.#asked;
 	}
 
 	set language(language: Language) {
@@ -45,3 +48,5 @@ export class Preferences {
 
 /** Their names in local storage. */
 const NAMES = ['look', 'language', 'sound'] as const;
+
+const isLanguage = (text: string): text is Language => Object.hasOwn(LANGUAGES, text);
