@@ -28,7 +28,9 @@ function said(value: Json, say: Say): string {
 	if (value === null || typeof value === 'boolean') return String(value);
 	if (Array.isArray(value)) {
 		const isLong = value.length > 8 && value.every((item) => typeof item === 'number');
-		return isLong ? say('app.origin.entries', { n: value.length }) : value.map((item: Json) => said(item, say)).join(' / ');
+		return isLong
+			? say('app.origin.entries', { n: value.length })
+			: value.map((item: Json) => said(item, say)).join(' / ');
 	}
 	const group = value as { readonly [name: string]: Json };
 	if (isMeasure(group)) {
