@@ -34,6 +34,21 @@ const SHIPPED: readonly { readonly block: Version; readonly rows: { readonly [ta
 				site: [{ name: 'settings', value: { look: 'night' } }],
 			},
 		},
+		{
+			block: { version: 2, stores: { shiftKeys: '[person+device+log]' } },
+			rows: {
+				events: [
+					{ ...place(first!), text: first!.text },
+					{ ...place(second!), text: second!.text, signature: 'c2lnbmVk' },
+				],
+				logs: [{ log: LOG, events: 2, lastEntered: second!.entered, lastEnteredAt: second!.enteredAt, sealed: false }],
+				drafts: [{ startUp: LOG, step: 'G1-02', person: 'P-01', typed: { dp: '12,5' }, saved: second!.entered }],
+				shiftKeys: [
+					{ person: 'P-01', device: 'T-1', log: LOG, shiftKey: 'f'.repeat(64), notAfter: 4e12, touched: 1e12 },
+				],
+				site: [{ name: 'settings', value: { look: 'night' } }],
+			},
+		},
 	];
 
 test('the blocks of shipped versions are history: none was edited, a new one stands here as well', () => {
@@ -48,6 +63,7 @@ test.each(SHIPPED)('a tablet at version $block.version opens with everything it 
 	expect([events, damaged]).toEqual([[first, { ...second, signature: 'c2lnbmVk' }], []]);
 	expect(value(await store.drafts.list())).toEqual(rows.drafts);
 	expect(await store.site.read('settings')).toEqual({ ok: true, value: { look: 'night' } });
+	expect(value(await store.shiftKeys.list('T-1', 2e12))).toEqual(rows.shiftKeys ?? []);
 });
 
 const next = (upgrade: NonNullable<Version['upgrade']>): readonly Version[] => [
@@ -103,7 +119,10 @@ test('no upgrade may rewrite events', async () => {
 
 /** Makes a database as that version's block says, with nothing of today's code but Dexie. */
 async function inTheField(name: string, block: Version, rows: { readonly [table: string]: readonly object[] }) {
-	const old = database(name, [block]);
+	const old = database(
+		name,
+		SHIPPED.map((one) => one.block).filter(({ version }) => version <= block.version),
+	);
 	await old.open();
 	old.close();
 	const raw = await answer(indexedDB.open(name));

@@ -5,6 +5,10 @@ import { openStore, type Memory, type Store } from '../../src/lib/store';
 import { LOG, NOON, notes } from '../support/kept-events';
 import { answer, freshName, tab } from '../support/open-stores';
 import { value } from '../support/test-site';
+import { VERSIONS } from '../../src/lib/store/db';
+
+/** One version above what this app knows. */
+const NEWER = (VERSIONS.at(-1)?.version ?? 0) + 1;
 
 function memory(kept: string | null = null): Memory {
 	return { read: () => kept, write: (text) => (kept = text) };
@@ -83,14 +87,14 @@ describe('a connection that the browser loses', () => {
 
 test('an app that is older than the database leaves it alone and says so', async () => {
 	const name = freshName();
-	const newer = await answer(indexedDB.open(name, 20));
+	const newer = await answer(indexedDB.open(name, 10 * NEWER));
 	newer.close();
 	expect(await openStore(name, { now: NOON })).toEqual({
 		ok: false,
-		error: { kind: 'storage-newer', version: 2, known: 1 },
+		error: { kind: 'storage-newer', version: NEWER, known: NEWER - 1 },
 	});
 	const left = await answer(indexedDB.open(name));
-	expect([left.version, [...left.objectStoreNames]]).toEqual([20, []]);
+	expect([left.version, [...left.objectStoreNames]]).toEqual([10 * NEWER, []]);
 	left.close();
 });
 
@@ -106,7 +110,7 @@ test('when a newer app takes the database over, this tab is told, and refuses to
 	const store = await tab(name);
 	let told = 0;
 	store.onClosed(() => told++);
-	const newer = await answer(indexedDB.open(name, 20));
+	const newer = await answer(indexedDB.open(name, 10 * NEWER));
 	expect(told).toBe(1);
 	expect(await store.events.append(notes(1)[0]!)).toEqual({ ok: false, error: { kind: 'storage-closed' } });
 	expect(await store.events.readLog(LOG)).toEqual({ ok: false, error: { kind: 'storage-closed' } });

@@ -1,5 +1,5 @@
 import { fail, ok, utf8, type Result } from '../base';
-import { makeEntryKey, sign, toJwk, type SigningKey } from '../identity';
+import { makeEntryKey, makeResumeCode, sign, toJwk, webRandom, type ResumeCode, type SigningKey } from '../identity';
 import {
 	allOf,
 	gateSheet,
@@ -132,9 +132,18 @@ export async function seal(startUp: OpenStartUp, pin: string): Promise<Result<'s
 }
 
 /** The shift's entry key, delegated by the gate key: one PIN, and entries need no other until the shift is over. */
-export async function beginShift(startUp: OpenStartUp, pin: string): Promise<Result<'signed', Problem>> {
+export async function beginShift(startUp: OpenStartUp, pin: string, code?: string): Promise<Result<'signed', Problem>> {
+	const resume = code === undefined ? undefined : await makeResumeCode(code, { pin, random: webRandom });
+	if (resume?.ok === false) return resume;
 	const key = await openKey(startUp, pin);
-	if (!key.ok) return key;
+	return key.ok ? beginShiftWith(startUp, key.value, resume?.value) : key;
+}
+
+async function beginShiftWith(
+	startUp: OpenStartUp,
+	key: SigningKey,
+	chosen?: ResumeCode,
+): Promise<Result<'signed', Problem>> {
 	const { tablet } = startUp;
 	const now = tablet.clock.now();
 	const made = await makeEntryKey();
@@ -144,10 +153,25 @@ export async function beginShift(startUp: OpenStartUp, pin: string): Promise<Res
 		notAfter: startUp.instant(now + SHIFT),
 		entriesOnly: true,
 	};
-	const written = await startUp.write('shift key', body, { key: key.value });
+	const written = await startUp.write('shift key', body, { key });
 	if (!written.ok) return written;
-	tablet.keepShift(written.value.person, startUp.id, { key: made, shiftKey: written.value.id });
-	return ok('signed');
+	const { person, id: shiftKey } = written.value;
+	const resume = chosen === undefined ? tablet.shifts.resumeOf(person) : { ...chosen, wrong: 0 };
+	const row = { person, log: startUp.id, shiftKey, key: made, notAfter: now + SHIFT };
+	const kept = await tablet.shifts.begin({ ...row, ...(resume === undefined ? {} : { resume }) });
+	return kept.ok ? ok('signed') : kept;
+}
+
+/** After the screen was covered: the code that was chosen with the shift, or the PIN; the shift is the same. */
+export async function goOn(
+	startUp: OpenStartUp,
+	shown: { readonly code: string } | { readonly pin: string },
+): Promise<Result<'runs', Problem>> {
+	const { person, shifts } = startUp.tablet;
+	if (person === undefined) return fail({ kind: 'nobody-chosen' });
+	if ('code' in shown) return shifts.goOn(person.person, shown.code);
+	const key = await openKey(startUp, shown.pin);
+	return key.ok ? ok('runs') : key;
 }
 
 const SHIFT = 12 * 3_600_000;

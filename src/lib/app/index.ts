@@ -27,6 +27,7 @@ export {
 	answerRefusal,
 	beginShift,
 	disposeDeviation,
+	goOn,
 	handOver,
 	newestCopy,
 	noteCopy,

@@ -15,6 +15,7 @@ import {
 	type Standing,
 } from '../record';
 import type { Draft as KeptDraft } from '../store';
+import type { ShiftState } from './shifts.svelte';
 import { signOn, writeEvent, type Signer } from './logbook';
 import type { Problem } from './problem';
 import { SITE_LOG, type Tablet } from './tablet.svelte';
@@ -134,8 +135,16 @@ export class OpenStartUp {
 	entrySigner(): Result<Signer, Problem> {
 		const { person } = this.tablet;
 		if (person === undefined) return fail({ kind: 'nobody-chosen' });
-		const shift = this.tablet.shiftOf(person.person, this.id);
-		return shift === undefined ? fail({ kind: 'no-shift', person: person.name }) : ok(shift);
+		const shift = this.tablet.shifts.signerOf(person.person, this.id);
+		if (shift !== undefined) return ok(shift);
+		const isOver = this.shiftState === 'none';
+		return fail({ kind: isOver ? 'no-shift' : 'shift-covered', person: person.name });
+	}
+
+	/** Of who holds the tablet, in this start-up. */
+	get shiftState(): ShiftState {
+		const { person } = this.tablet;
+		return person === undefined ? 'none' : this.tablet.shifts.stateOf(person.person, this.id);
 	}
 
 	draft<K extends EventKind>(kind: K, body: BodyOf<K>, seen: Seen = {}): Result<Draft<K>, Problem> {
@@ -226,7 +235,7 @@ export class OpenStartUp {
 
 	/** Another tab was faster: the same words are signed again on top of what it wrote. */
 	async #signAgain(event: RecordEvent): Promise<Result<unknown, Problem>> {
-		const signer = this.tablet.shiftOf(event.person, this.id);
+		const signer = this.tablet.shifts.signerOf(event.person, this.id);
 		if (signer === undefined) return fail({ kind: 'no-shift', person: event.person });
 		const { log, kind, body, person, device, entered, observed, certificate } = event;
 		const draft: Draft = {

@@ -1,3 +1,4 @@
+import type { ResumeCodeError } from '../identity';
 import type { ComposeError, SeriesError, TrendError } from '../record';
 import type { CannotOpen, ChainMovedOn, StorageError } from '../store';
 
@@ -9,12 +10,18 @@ export type Problem =
 	| ComposeError
 	| SeriesError
 	| TrendError
+	| ResumeCodeError
 	/** The tablet holds no site and no people yet. */
 	| { readonly kind: 'no-site' }
 	| { readonly kind: 'nobody-chosen' }
 	| { readonly kind: 'not-enrolled-here'; readonly person: string }
 	/** Entries are signed with the key of the shift, and none was begun in this start-up. */
 	| { readonly kind: 'no-shift'; readonly person: string }
+	/** The screen was covered meanwhile: who holds the tablet says so again before the next entry. */
+	| { readonly kind: 'shift-covered'; readonly person: string }
+	| { readonly kind: 'wrong-code'; readonly left: number }
+	/** Three wrong codes, or none chosen: the PIN it is. */
+	| { readonly kind: 'code-used-up' }
 	| { readonly kind: 'no-such-start-up'; readonly startUp: string }
 	| { readonly kind: 'start-up-unreadable'; readonly startUp: string; readonly what: string }
 	| { readonly kind: 'no-such-step'; readonly step: string }

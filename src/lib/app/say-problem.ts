@@ -18,6 +18,9 @@ export function sayProblem(problem: Problem, say: Say): string {
 		case 'sheet-changed':
 		case 'weak-wrap':
 		case 'damaged-wrap':
+		case 'code-used-up':
+		case 'resume-code-easy':
+		case 'resume-code-in-pin':
 			return say(`problem.${problem.kind}`);
 		case 'storage-failed':
 			return say('problem.storage-failed', { name: problem.name, message: problem.message });
@@ -25,6 +28,10 @@ export function sayProblem(problem: Problem, say: Say): string {
 			return say('problem.wait', { time: duration(problem.milliseconds), left: problem.left });
 		case 'wrong-pin':
 			return say('problem.wrong-pin', { left: problem.left });
+		case 'wrong-code':
+			return say('problem.wrong-code', { left: problem.left });
+		case 'resume-code-length':
+			return say('problem.resume-code-length', { atLeast: problem.atLeast, atMost: problem.atMost });
 		case 'no-such-field':
 			return say('problem.no-such-field', { step: problem.step, field: problem.field });
 		case 'no-rows-here':
@@ -54,6 +61,7 @@ export function sayProblem(problem: Problem, say: Say): string {
 			return say('problem.trend', { because: sayTrendError(problem, say) });
 		case 'not-enrolled-here':
 		case 'no-shift':
+		case 'shift-covered':
 			return say(`problem.${problem.kind}`, { person: problem.person });
 		case 'no-such-start-up':
 		case 'sealed':

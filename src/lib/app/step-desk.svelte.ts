@@ -1,5 +1,5 @@
 import { fromUtf8, ok, type Json, type Result } from '../base';
-import type { Attachment } from '../store';
+import type { Attachment, DraftKey } from '../store';
 import type { Step } from '../procedure';
 import { parseTrend, type Trend, type Typed, type TypedRow, type TypedValue } from '../record';
 import { attachSeries, calculate, enter, type TrendFile } from './entries';
@@ -27,24 +27,28 @@ export type TypedSoFar = {
 export class StepDesk {
 	readonly startUp: OpenStartUp;
 	readonly step: Step;
+	/** Where what is half typed lies: with the person who had the tablet when the step was opened. */
+	readonly #key: DraftKey;
 	#draft = $state.raw<TypedSoFar>({});
 	#file = $state.raw<TrendFile>();
 	#problem = $state.raw<Problem>();
 	#busy = $state.raw(false);
 	#saving: Promise<unknown> = Promise.resolve();
 
-	private constructor(startUp: OpenStartUp, step: Step, draft: TypedSoFar) {
+	private constructor(startUp: OpenStartUp, step: Step, key: DraftKey, draft: TypedSoFar) {
 		this.startUp = startUp;
 		this.step = step;
+		this.#key = key;
 		this.#draft = draft;
 	}
 
 	static async open(startUp: OpenStartUp, id: string): Promise<Result<StepDesk, Problem>> {
 		const step = startUp.stepOf(id);
 		if (!step.ok) return step;
-		const kept = await startUp.tablet.store.drafts.read(keyOf(startUp, id));
+		const key = { startUp: startUp.id, step: id, person: startUp.tablet.person?.person ?? '' };
+		const kept = await startUp.tablet.store.drafts.read(key);
 		if (!kept.ok) return kept;
-		return ok(new StepDesk(startUp, step.value, (kept.value?.typed ?? {}) as TypedSoFar));
+		return ok(new StepDesk(startUp, step.value, key, (kept.value?.typed ?? {}) as TypedSoFar));
 	}
 
 	get draft(): TypedSoFar {
@@ -74,7 +78,7 @@ export class StepDesk {
 		this.#problem = undefined;
 		const { store, clock } = this.startUp.tablet;
 		const saved = this.startUp.instant(clock.now());
-		const row = { ...keyOf(this.startUp, this.step.id), typed: draft as unknown as Json, saved };
+		const row = { ...this.#key, typed: draft as unknown as Json, saved };
 		this.#saving = this.#saving
 			.then(() => store.drafts.save(row))
 			.then((kept) => {
@@ -122,7 +126,7 @@ export class StepDesk {
 		await this.#saving;
 		const written = await write();
 		if (written.ok) {
-			await this.startUp.tablet.store.drafts.drop(keyOf(this.startUp, this.step.id));
+			await this.startUp.tablet.store.drafts.drop(this.#key);
 			this.#draft = {};
 			this.#file = undefined;
 		}
@@ -131,12 +135,6 @@ export class StepDesk {
 		return written.ok;
 	}
 }
-
-const keyOf = (startUp: OpenStartUp, step: string) => ({
-	startUp: startUp.id,
-	step,
-	person: startUp.tablet.person?.person ?? '',
-});
 
 function typedOf({ values, rows, confirmed, choice, flow, begun, mode }: TypedSoFar): Typed {
 	const read = (value: TypedValue): TypedValue => (mode === undefined ? value : { ...value, analyserMode: mode });

@@ -2,8 +2,8 @@ import { fail, ok, type Result } from '../base';
 import { readCertificate, type Certificate, type Role, type SigningKey } from '../identity';
 import type { GateKeyRow, Store, Tablet as KeptTablet } from '../store';
 import type { Clock } from './clock';
-import type { Signer } from './logbook';
 import type { Problem } from './problem';
+import { COVER_AFTER, Shifts } from './shifts.svelte';
 
 export type TabletPerson = {
 	readonly person: string;
@@ -12,11 +12,13 @@ export type TabletPerson = {
 	readonly certificate: Certificate;
 	/** False after the tenth wrong PIN: to be enrolled again, in person. */
 	readonly hasKey: boolean;
+	/** Wrong PINs in a row, shown to whoever looks next. */
+	readonly wrongPins: number;
 };
 
 export const SITE_LOG = 'site';
 
-/** This tablet: who is enrolled on it, who holds it now, whose shift was begun, and whether its screen is blanked. */
+/** This tablet: who is enrolled on it, who holds it now, whose shift runs, and whether its screen is covered. */
 export class Tablet {
 	readonly store: Store;
 	readonly clock: Clock;
@@ -24,7 +26,7 @@ export class Tablet {
 	readonly #kept: KeptTablet;
 	#people = $state.raw<readonly TabletPerson[]>([]);
 	#person = $state.raw<string>();
-	#shifts = $state.raw<{ readonly [personAndLog: string]: Signer }>({});
+	readonly shifts: Shifts;
 	#lastTouch = $state.raw(0);
 	#now = $state.raw(0);
 	/** PIN of everybody on a demonstration, shown where people are. */
@@ -37,6 +39,7 @@ export class Tablet {
 		readonly kept: KeptTablet;
 		readonly people: readonly TabletPerson[];
 		readonly settings: Settings;
+		readonly shifts: Shifts;
 	}) {
 		this.store = of.store;
 		this.clock = of.clock;
@@ -46,6 +49,7 @@ export class Tablet {
 		this.#person = of.people.some(({ person }) => person === of.settings.person) ? of.settings.person : undefined;
 		this.demonstrationPin = of.settings.demonstrationPin;
 		this.#lastTouch = this.#now = of.clock.now();
+		this.shifts = of.shifts;
 		this.#stop = of.clock.every(IDLE_LOOK, () => (this.#now = of.clock.now()));
 	}
 
@@ -59,7 +63,9 @@ export class Tablet {
 		if (!settings.ok) return settings;
 		const device = kept.value.device;
 		const people = rows.value.filter((row) => row.device === device).flatMap(personOf);
-		return ok(new Tablet({ store, clock, kept: kept.value, people, settings: settings.value }));
+		const shifts = await Shifts.open(store, clock, device);
+		if (!shifts.ok) return shifts;
+		return ok(new Tablet({ store, clock, kept: kept.value, people, settings: settings.value, shifts: shifts.value }));
 	}
 
 	close(): void {
@@ -77,7 +83,13 @@ export class Tablet {
 
 	/** Nobody touched it for a while: what it shows is covered, what was typed is kept. */
 	get isBlank(): boolean {
-		return this.#now - this.#lastTouch >= BLANK_AFTER;
+		return this.#now - this.#lastTouch >= COVER_AFTER;
+	}
+
+	/** Seconds until the screen is covered, once that is near: one touch puts it off. */
+	get coversIn(): number | undefined {
+		const left = COVER_AFTER - (this.#now - this.#lastTouch);
+		return left > 0 && left <= WARNING ? Math.ceil(left / 1000) : undefined;
 	}
 
 	get tabletKey(): SigningKey {
@@ -85,7 +97,9 @@ export class Tablet {
 	}
 
 	touched(): void {
+		const wasCovered = this.clock.now() - this.#lastTouch >= COVER_AFTER;
 		this.#lastTouch = this.#now = this.clock.now();
+		void (wasCovered ? this.shifts.lookAgain() : this.shifts.touched());
 	}
 
 	/** Two taps: the tablet changes hands, and what was typed stays with whom it belongs to. */
@@ -95,32 +109,32 @@ export class Tablet {
 		await writeSettings(this.store, { person });
 	}
 
-	shiftOf(person: string, log: string): Signer | undefined {
-		return this.#shifts[JSON.stringify([person, log])];
-	}
-
-	keepShift(person: string, log: string, signer: Signer): void {
-		this.#shifts = { ...this.#shifts, [JSON.stringify([person, log])]: signer };
-	}
-
 	/** The gate key of a person, opened for one act. The try is counted before it is made. */
 	async openKey(person: string, pin: string): Promise<Result<SigningKey, Problem>> {
 		const opened = await this.store.gateKeys.open({ person, device: this.device, pin, now: this.clock.now() });
-		if (!opened.ok && opened.error.kind === 'destroyed')
-			this.#people = this.#people.map((one) => (one.person === person ? { ...one, hasKey: false } : one));
+		await this.#lookAtPeople();
+		if (opened.ok) await this.shifts.resumed(person);
+		else if (opened.error.kind === 'destroyed') await this.shifts.end(person);
 		return opened;
+	}
+
+	async #lookAtPeople(): Promise<void> {
+		const rows = await this.store.gateKeys.list();
+		if (rows.ok) this.#people = rows.value.filter((row) => row.device === this.device).flatMap(personOf);
 	}
 }
 
-/** record.md: the screen blanks after five minutes. */
-const BLANK_AFTER = 5 * 60_000;
+/** From here on the tablet says that it will cover itself (WCAG 2.2.1 asks for twenty seconds). */
+const WARNING = 30_000;
 const IDLE_LOOK = 5_000;
 
-function personOf({ certificate: der, gateKey }: GateKeyRow): readonly TabletPerson[] {
+function personOf({ certificate: der, gateKey, tries }: GateKeyRow): readonly TabletPerson[] {
 	const certificate = readCertificate(der);
 	if (!certificate.ok || certificate.value.subject.kind !== 'person') return [];
 	const { person, printedName: name, roles } = certificate.value.subject;
-	return [{ person, name, roles, certificate: certificate.value, hasKey: gateKey !== undefined }];
+	return [
+		{ person, name, roles, certificate: certificate.value, hasKey: gateKey !== undefined, wrongPins: tries.failures },
+	];
 }
 
 export type Settings = {

@@ -13,6 +13,7 @@ export { MIN_ITERATIONS, wrappedKey, type UnwrapError, type WrappedKey } from '.
 export { checkPin, type PinError, type UnlockMode } from './pin';
 export { beginTry, mayTry, NO_TRIES, succeeded, type MayTry, type Tries } from './lockout';
 export { makeGateKey, openGateKey, type GateKey, type OpenGateKeyError } from './gate-key';
+export { isResumeCode, makeResumeCode, type ResumeCode, type ResumeCodeError } from './resume-code';
 export { checkShiftKey, coveredBy, type OutsideShiftKey, type ShiftKey, type ShiftKeyError } from './shift-key';
 export {
 	fingerprintOf,

@@ -7,7 +7,7 @@ export type PublicKey = string & { readonly __publicKey: true };
 /** A key that can sign now. It cannot be exported: what leaves it are signatures. */
 export type SigningKey = { readonly alg: 'ES256'; readonly publicKey: PublicKey; readonly privateKey: CryptoKey };
 
-/** Of a shift: made in memory, never stored, cannot be exported. A gate key signs for it (`shift-key.ts`). */
+/** Of a shift: cannot be exported, and is kept on the tablet until the shift ends. A gate key signs for it (`shift-key.ts`). */
 export async function makeEntryKey(): Promise<SigningKey> {
 	const pair = await subtle.generateKey(P256, false, ['sign', 'verify']);
 	return { alg: 'ES256', publicKey: await exportPublicKey(pair.publicKey), privateKey: pair.privateKey };

@@ -2,7 +2,7 @@ import { Dexie, type Table } from 'dexie';
 import { addOnly } from './add-only';
 import type { EventKey, EventRow } from './event-row';
 import type { LogRow } from './log-row';
-import type { Draft, GateKeyRow, KeptAttachment, SiteRow } from './rows';
+import type { Draft, GateKeyRow, KeptAttachment, ShiftKeyRow, SiteRow } from './rows';
 
 /** The tablet's database. Only this file knows its shape; every other file of the room gets it as an argument. */
 export type Database = Dexie & {
@@ -14,6 +14,7 @@ export type Database = Dexie & {
 	readonly attachments: Table<KeptAttachment, string>;
 	readonly drafts: Table<Draft, readonly [startUp: string, step: string, person: string]>;
 	readonly gateKeys: Table<GateKeyRow, readonly [person: string, device: string]>;
+	readonly shiftKeys: Table<ShiftKeyRow, readonly [person: string, device: string, log: string]>;
 	readonly site: Table<SiteRow, string>;
 };
 
@@ -37,6 +38,8 @@ export const VERSIONS: readonly Version[] = [
 			site: 'name',
 		},
 	},
+	// A shift survives the death of the browser: its key is kept until it ends.
+	{ version: 2, stores: { shiftKeys: '[person+device+log]' } },
 ];
 
 export type Version = {

@@ -13,6 +13,7 @@ import {
 } from '../identity';
 import type { Database } from './db';
 import type { GateKeyRow } from './rows';
+import { shiftsOf } from './shift-keys';
 import { attempt, type StorageError } from './storage-error';
 
 export type Owner = { readonly person: string; readonly device: string };
@@ -61,7 +62,7 @@ export const gateKeys = (db: Database): GateKeys => ({
 		if (opened.error.kind !== 'wrong-pin') return fail(opened.error);
 		const next = mayTry(counted.value.tries, now);
 		if (next.kind !== 'destroyed') return fail({ kind: 'wrong-pin', left: next.left });
-		const destroyed = await attempt(() => change(db, owner, withoutKey));
+		const destroyed = await attempt(() => destroy(db, owner));
 		return destroyed.ok ? fail({ kind: 'destroyed' }) : destroyed;
 	},
 });
@@ -71,14 +72,14 @@ const countTry = (
 	owner: Owner,
 	now: number,
 ): PromiseLike<Result<{ readonly gateKey: GateKey; readonly tries: Tries }, CannotOpen>> =>
-	db.transaction('rw', db.gateKeys, async () => {
+	db.transaction('rw', [db.gateKeys, db.shiftKeys], async () => {
 		const row = await db.gateKeys.get(keyOf(owner));
 		if (row === undefined) return fail({ kind: 'no-gate-key' });
 		const may = mayTry(row.tries, now);
 		if (may.kind === 'wait') return fail(may);
 		if (may.kind === 'destroyed' || row.gateKey === undefined) {
 			// The plug was pulled between the tenth try and this.
-			await db.gateKeys.put(withoutKey(row));
+			await destroyIn(db, owner);
 			return fail({ kind: 'destroyed' });
 		}
 		const tries = beginTry(row.tries, now);
@@ -92,6 +93,17 @@ const change = (db: Database, owner: Owner, to: (row: GateKeyRow) => GateKeyRow)
 		if (row !== undefined) await db.gateKeys.put(to(row));
 		return ok('saved');
 	});
+
+/** With the gate key go the keys that it delegated to: whoever guessed at the one shall not enter with the other. */
+const destroy = (db: Database, owner: Owner): PromiseLike<Result<'saved', never>> =>
+	db.transaction('rw', [db.gateKeys, db.shiftKeys], () => destroyIn(db, owner));
+
+async function destroyIn(db: Database, owner: Owner): Promise<Result<'saved', never>> {
+	const row = await db.gateKeys.get(keyOf(owner));
+	if (row !== undefined) await db.gateKeys.put(withoutKey(row));
+	await shiftsOf(db, owner).delete();
+	return ok('saved');
+}
 
 function withoutKey({ gateKey: _destroyed, ...row }: GateKeyRow): GateKeyRow {
 	return row;

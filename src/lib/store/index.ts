@@ -10,8 +10,19 @@ export type { StartUp } from './log-row';
 export type { Attachments } from './attachments';
 export type { Drafts } from './drafts';
 export type { CannotOpen, GateKeys, Owner } from './gate-keys';
+export type { ShiftKeys } from './shift-keys';
 export type { SiteStore } from './site';
 export type { CopiedChain, Health, HealthStore } from './health';
 export type { Memory } from './memory';
-export type { Attachment, Copy, Draft, DraftKey, GateKeyRow, KeptAttachment, SiteValues, Tablet } from './rows';
+export type {
+	Attachment,
+	Copy,
+	Draft,
+	DraftKey,
+	GateKeyRow,
+	KeptAttachment,
+	ShiftKeyRow,
+	SiteValues,
+	Tablet,
+} from './rows';
 export type { StorageError } from './storage-error';

@@ -8,6 +8,7 @@ import { gateKeys, type GateKeys } from './gate-keys';
 import { healthStore, type HealthStore } from './health';
 import { erasedBefore, pageMemory, type Memory } from './memory';
 import type { Birth } from './rows';
+import { shiftKeys, type ShiftKeys } from './shift-keys';
 import { readSite, siteStore, type SiteStore } from './site';
 import { storageError, type StorageError } from './storage-error';
 
@@ -17,6 +18,7 @@ export type Store = {
 	readonly attachments: Attachments;
 	readonly drafts: Drafts;
 	readonly gateKeys: GateKeys;
+	readonly shiftKeys: ShiftKeys;
 	readonly site: SiteStore;
 	readonly health: HealthStore;
 	/** Set when the browser has erased what this tablet held: to be told, and the tablet enrolled anew. */
@@ -56,6 +58,7 @@ function storeOn(db: Database, birth: Birth, memory: Memory | undefined): Store 
 		attachments: attachments(db),
 		drafts: drafts(db),
 		gateKeys: gateKeys(db),
+		shiftKeys: shiftKeys(db),
 		site: siteStore(db),
 		health: healthStore(db),
 		...(gone === undefined ? {} : { erased: { made: gone.made, acknowledge } }),

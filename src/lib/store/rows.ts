@@ -1,5 +1,5 @@
 import type { Json } from '../base';
-import type { GateKey, SignedTrustList, SigningKey, SiteRootFile, Tries } from '../identity';
+import type { GateKey, ResumeCode, SignedTrustList, SigningKey, SiteRootFile, Tries } from '../identity';
 
 /** A photo or trend file, named by its bytes; the shape in which events carry it. */
 export type Attachment = {
@@ -33,6 +33,25 @@ export type GateKeyRow = {
 	/** DER; `readCertificate` says what it claims. */
 	readonly certificate: Uint8Array<ArrayBuffer>;
 	readonly tries: Tries;
+};
+
+/**
+ * The key of a person's shift in one start-up, kept so that a browser that was killed goes on. It cannot be exported by a
+ * script and lies on the medium as plain bytes (as the tablet's own): it signs entries only, for twelve hours at most.
+ */
+export type ShiftKeyRow = {
+	readonly person: string;
+	readonly device: string;
+	readonly log: string;
+	/** Id of the `shift key` event by which the gate key delegates to it. */
+	readonly shiftKey: string;
+	readonly key: SigningKey;
+	/** In milliseconds; from here on the key is no use and is dropped. */
+	readonly notAfter: number;
+	/** When its owner last had the tablet in hand, in milliseconds. */
+	readonly touched: number;
+	/** With what the owner goes on after the screen was covered, and how often something else was typed. */
+	readonly resume?: ResumeCode & { readonly wrong: number };
 };
 
 /** What the tablet knows of its site and of itself, one value under each name. */

@@ -6,6 +6,7 @@ import { ERRORS } from './en/errors';
 import { FINDINGS } from './en/findings';
 import { GATES } from './en/gates';
 import { NOTES } from './en/notes';
+import { PEOPLE } from './en/people';
 import { SCREEN_ACTS } from './en/screen-acts';
 import { SCREEN_FRAME } from './en/screen-frame';
 import { SCREEN_LINE } from './en/screen-line';
@@ -28,6 +29,7 @@ export const EN = {
 	...SCREEN_FRAME,
 	...SCREEN_LINE,
 	...SCREEN_STEPS,
+	...PEOPLE,
 	...SCREEN_ACTS,
 	...SCREEN_PAGES,
 	...SETTINGS,

@@ -97,12 +97,4 @@ export const SCREEN_PAGES = {
 	'ui.deviations.became': 'What became of it',
 	'ui.deviations.reason': 'Reason',
 	'ui.deviations.close': 'Close the deviation',
-	'ui.people.none': 'Nobody is enrolled yet',
-	'ui.people.how': 'Enrol the first person: they get a certificate of this site and a PIN.',
-	'ui.people.here': 'key open here',
-	'ui.people.not here': 'not here',
-	'ui.people.open': 'Open',
-	'ui.person.who': 'Who has the tablet?',
-	'ui.person.pin of': 'PIN of {name}',
-	'ui.person.begin': 'Begin the shift of {name}',
 } as const;

@@ -1,0 +1,42 @@
+/** Who holds the tablet, whose shift runs, and what is asked after the screen was covered. */
+export const PEOPLE = {
+	'problem.shift-covered':
+		'The screen was covered meanwhile. Say who you are before the next entry of {person}; what is typed stays.',
+	'problem.wrong-code': 'That code is wrong. {left} tries are left, then it must be the PIN. Nothing was entered.',
+	'problem.code-used-up': 'The short code does not count any more. Go on with the PIN.',
+	'problem.resume-code-length': 'The short code has {atLeast} to {atMost} digits.',
+	'problem.resume-code-easy': 'That short code is too easy: take other digits.',
+	'problem.resume-code-in-pin':
+		'The short code is a part of the PIN: whoever sees it would know too much. Take other digits.',
+	'shift.begin': 'Begin the shift of {person}',
+	'shift.begin text':
+		'Entries are signed with a key of this shift. One PIN now, none for entries until the shift ends; gate acts ask for the PIN every time.',
+	'shift.code': 'Short code, if you like: four digits to go on with when the screen was covered',
+	'shift.begin does': 'Begin shift',
+	'shift.go on': '{person} goes on',
+	'shift.go on code': 'The screen was covered. Your short code and entering goes on; what was typed is kept.',
+	'shift.go on pin': 'The screen was covered. Your PIN and entering goes on; what was typed is kept.',
+	'shift.short code': 'Short code',
+	'shift.go on does': 'Go on',
+	'shift.with pin': 'Go on with the PIN',
+	'shift.end': 'End the shift of {person}',
+	'shift.ended': 'The shift of {person} has ended on this tablet. The next entry asks for the PIN.',
+	'cover.soon': 'The screen covers itself in {seconds} s. Touch it to go on.',
+	'person.who': 'Who holds the tablet?',
+	'person.keeps': 'What is half typed stays with whom typed it.',
+	'person.holds': 'holds the tablet',
+	'person.runs': 'shift until {at}',
+	'person.no shift': 'no shift',
+	'person.no key': 'key destroyed after ten wrong PINs: to be enrolled again, in person',
+	'person.wrong pin': '{n} wrong PIN on this tablet since the last right one',
+	'person.wrong pins': '{n} wrong PINs on this tablet since the last right one',
+	'person.certificate': 'certificate {from} to {until}',
+	'person.certificate ended': 'certificate ended {until}: signatures still work and say so',
+	'person.certificate later': 'certificate begins {from}',
+	'person.take': 'Take the tablet',
+	'person.all': 'People and certificates',
+	'people.title': '{n} people sign on this tablet',
+	'people.wrong pin':
+		'Three wrong PINs in a row make the tablet wait, longer each time; the tenth destroys the key. Its owner is then enrolled again, in person. What was signed before stays.',
+	'people.none': 'Nobody is enrolled on this tablet',
+} as const;
