@@ -56,7 +56,6 @@ export const APP = {
 	'app.demonstration': 'Show the demonstration',
 	'app.demonstration goes on': 'Preparing the demonstration: {done} of {of}',
 	'app.demonstration facts': 'Demonstration, nothing here is real.',
-	'app.who are you': 'Who holds the tablet?',
 	'app.pin of demonstration': 'Demonstration: everybody here has the PIN {pin}.',
 	'app.facts': '{id}. Procedure {procedure}, revision {revision}. {at}.',
 	'app.opened': 'Opened {at}, {n} events',
