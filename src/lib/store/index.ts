@@ -1,5 +1,5 @@
 /**
- * store: what a tablet keeps: events, attachments, drafts, gate keys, the site and the storage's health, in IndexedDB.
+ * store: what a tablet keeps: events, attachments, drafts, gate keys, keys of shifts, the site and the storage's health, in IndexedDB.
  * Whatever says saved is durable; events are only ever added; what storage cannot do comes back as data.
  * May import: base, identity, plant, procedure, record.
  */

@@ -21,6 +21,9 @@ export function shownPeople(tablet: Tablet, say: Say, utcOffsetMinutes?: number)
 			...(hasKey && wrongPins > 0 ? { warning: counted(say, 'person.wrong pin', 'person.wrong pins', wrongPins) } : {}),
 		};
 	});
+	const rank = ({ person, isInShift }: ShownPerson): number =>
+		person === tablet.person?.person ? 0 : isInShift ? 1 : 2;
+	return people.sort((a, b) => rank(a) - rank(b));
 }
 
 function certificateOf({ certificate }: TabletPerson, now: number, say: Say, moments: Moments): string {
