@@ -6,6 +6,7 @@ import { ERRORS } from './de/errors';
 import { FINDINGS } from './de/findings';
 import { GATES } from './de/gates';
 import { NOTES } from './de/notes';
+import { PEOPLE } from './de/people';
 import { SCREEN_ACTS } from './de/screen-acts';
 import { SCREEN_FRAME } from './de/screen-frame';
 import { SCREEN_LINE } from './de/screen-line';
@@ -42,6 +43,7 @@ export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...SCREEN_FRAME,
 	...SCREEN_LINE,
 	...SCREEN_STEPS,
+	...PEOPLE,
 	...SCREEN_ACTS,
 	...SCREEN_PAGES,
 	...SETTINGS,

@@ -65,15 +65,7 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'app.demonstration': 'Vorführung zeigen',
 	'app.demonstration goes on': 'Die Vorführung wird vorbereitet: {done} von {of}',
 	'app.demonstration facts': 'Vorführung, nichts hier ist echt.',
-	'app.who are you': 'Wer hat das Tablet?',
-	'app.shift title': 'Schicht von {person} beginnen',
-	'app.shift text':
-		'Einträge werden mit einem Schlüssel dieser Schicht unterschrieben. Jetzt eine PIN, dann keine für Einträge bis zu ihrem Ende.',
-	'app.shift does': 'Schicht beginnen',
 	'app.pin of demonstration': 'Vorführung: alle haben hier die PIN {pin}.',
-	'app.holds tablet': 'hat das Tablet',
-	'app.take tablet': 'Tablet übernehmen',
-	'app.no key': 'Schlüssel nach zehn falschen PINs vernichtet; neu aufzunehmen',
 	'app.facts': '{id}. Anfahrvorschrift {procedure}, Revision {revision}. {at}.',
 	'app.opened': 'Eröffnet {at}, {n} Ereignisse',
 	'app.sealed': 'versiegelt',
@@ -107,5 +99,4 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'app.hand-over': 'die Übergabe',
 	'app.storage closed':
 		'Der Speicher wurde unter diesem Tab geschlossen. Das Gespeicherte ist sicher; die Seite neu laden.',
-	'app.nobody': 'Auf diesem Tablet ist niemand aufgenommen.',
 };

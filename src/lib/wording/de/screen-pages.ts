@@ -101,12 +101,4 @@ export const SCREEN_PAGES: { readonly [key in keyof typeof EN]: string } = {
 	'ui.deviations.became': 'Was daraus wurde',
 	'ui.deviations.reason': 'Grund',
 	'ui.deviations.close': 'Abweichung schließen',
-	'ui.people.none': 'Noch niemand ist aufgenommen',
-	'ui.people.how': 'Die erste Person aufnehmen: sie erhält ein Zertifikat dieses Werks und eine PIN.',
-	'ui.people.here': 'Schlüssel hier offen',
-	'ui.people.not here': 'nicht hier',
-	'ui.people.open': 'Öffnen',
-	'ui.person.who': 'Wer hat das Tablet?',
-	'ui.person.pin of': 'PIN von {name}',
-	'ui.person.begin': 'Schicht von {name} beginnen',
 };
