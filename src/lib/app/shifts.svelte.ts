@@ -82,7 +82,8 @@ export class Shifts {
 	/** Somebody has the tablet in hand: the shifts that are not covered stay so. */
 	async touched(): Promise<void> {
 		const now = this.#clock.now();
-		const people = [...new Set(this.#rows.filter((row) => !this.#isCovered(row)).map(({ person }) => person))];
+		const inHand = this.#rows.filter((row) => !this.#isCovered(row)).map(({ person }) => person);
+		const people = inHand.filter((person, i) => inHand.indexOf(person) === i);
 		this.#rows = this.#rows.map((row) => (people.includes(row.person) ? { ...row, touched: now } : row));
 		if (Math.abs(now - this.#noted) < NOTED_EVERY) return;
 		this.#noted = now;
