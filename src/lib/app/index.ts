@@ -47,3 +47,4 @@ export { objectionsNow } from './objections';
 export { copyFile } from './copy-file';
 export { Archive } from './archive.svelte';
 export { checkFile, type CheckedFile } from './check-file';
+export { nowFacts } from './now/now-facts';

@@ -83,6 +83,11 @@ export class OpenStartUp {
 		this.#stops = [];
 	}
 
+	/** The tablet that it is open on. */
+	get device(): string {
+		return this.tablet.device;
+	}
+
 	get log(): readonly RecordEvent[] {
 		return this.#log;
 	}

@@ -10,6 +10,7 @@ import { PEOPLE } from './en/people';
 import { SCREEN_ACTS } from './en/screen-acts';
 import { SCREEN_FRAME } from './en/screen-frame';
 import { SCREEN_LINE } from './en/screen-line';
+import { SCREEN_NOW } from './en/screen-now';
 import { SCREEN_PAGES } from './en/screen-pages';
 import { SCREEN_STEPS } from './en/screen-steps';
 import { SETTINGS } from './en/settings';
@@ -31,6 +32,7 @@ export const EN = {
 	...SCREEN_STEPS,
 	...PEOPLE,
 	...SCREEN_ACTS,
+	...SCREEN_NOW,
 	...SCREEN_PAGES,
 	...SETTINGS,
 } as const;

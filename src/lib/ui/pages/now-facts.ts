@@ -14,13 +14,16 @@ export type NowFacts = {
 		/** "limit 8.0, margin 0.6" */
 		readonly against: string;
 	};
-	readonly inert?: { readonly minutes: string; readonly reserve: string };
+	/** No minutes while it is not recorded as in use. */
+	readonly inert?: { readonly minutes?: string; readonly reserve: string };
 	readonly blocks?: {
 		readonly state: ContactState;
 		readonly title: string;
 		/** Who is on it, since when. */
 		readonly said: string;
+		/** Where to go on: a step, a hold point, or neither. */
 		readonly step?: string;
+		readonly gate?: number;
 	};
 	readonly nextToLapse: readonly {
 		readonly step: string;
