@@ -48,3 +48,5 @@ export { copyFile } from './copy-file';
 export { Archive } from './archive.svelte';
 export { checkFile, type CheckedFile } from './check-file';
 export { nowFacts } from './now/now-facts';
+export { logHeads, logLines } from './log-lines';
+export { NoteDesk } from './note-desk.svelte';

@@ -10,6 +10,7 @@ import { PEOPLE } from './de/people';
 import { SCREEN_ACTS } from './de/screen-acts';
 import { SCREEN_FRAME } from './de/screen-frame';
 import { SCREEN_LINE } from './de/screen-line';
+import { SCREEN_LOG } from './de/screen-log';
 import { SCREEN_NOW } from './de/screen-now';
 import { SCREEN_PAGES } from './de/screen-pages';
 import { SCREEN_STEPS } from './de/screen-steps';
@@ -46,6 +47,7 @@ export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...SCREEN_STEPS,
 	...PEOPLE,
 	...SCREEN_ACTS,
+	...SCREEN_LOG,
 	...SCREEN_NOW,
 	...SCREEN_PAGES,
 	...SETTINGS,

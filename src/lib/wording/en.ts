@@ -10,6 +10,7 @@ import { PEOPLE } from './en/people';
 import { SCREEN_ACTS } from './en/screen-acts';
 import { SCREEN_FRAME } from './en/screen-frame';
 import { SCREEN_LINE } from './en/screen-line';
+import { SCREEN_LOG } from './en/screen-log';
 import { SCREEN_NOW } from './en/screen-now';
 import { SCREEN_PAGES } from './en/screen-pages';
 import { SCREEN_STEPS } from './en/screen-steps';
@@ -32,6 +33,7 @@ export const EN = {
 	...SCREEN_STEPS,
 	...PEOPLE,
 	...SCREEN_ACTS,
+	...SCREEN_LOG,
 	...SCREEN_NOW,
 	...SCREEN_PAGES,
 	...SETTINGS,

@@ -5,6 +5,7 @@ export const SCREEN_FRAME = {
 	'ui.frame.line': 'Line',
 	'ui.frame.lapsed': 'Lapsed',
 	'ui.frame.deviations': 'Deviations',
+	'ui.frame.log': 'Log',
 	'ui.frame.happened': 'Something happened',
 	'ui.frame.about': 'About Gatehold',
 } as const;
