@@ -67,7 +67,7 @@ function saidOxygen(told: OpenRecord, say: Say, moments: Moments) {
 		against:
 			limit === undefined
 				? say('now.no limit')
-				: say('now.against', { limit: limit.value, guard: limit.guard, margin: sayNumber(limit.margin) }),
+				: say('now.against', { limit: limit.value, guard: limit.guard, margin: sayNumber(limit.margin, say) }),
 	};
 }
 
@@ -83,7 +83,7 @@ function saidInert(told: OpenRecord, states: readonly MachineState[], say: Say, 
 		at: moments.clock(told.instant(left.readAt)),
 	});
 	const flow = say(left.isMeasured ? 'now.flow measured' : 'now.flow planned', {
-		flow: sayNumber(Math.round(left.flow)),
+		flow: sayNumber(Math.round(left.flow), say),
 	});
 	return {
 		...(left.minutes === undefined ? {} : { minutes: String(left.minutes) }),
