@@ -18,6 +18,7 @@ import {
 } from '../../src/lib/app';
 import { printInstant } from '../../src/lib/record';
 import { openStore, type Store } from '../../src/lib/store';
+import { speaker } from '../../src/lib/wording';
 import { freshName, tab } from '../support/open-stores';
 import { TestClock } from '../support/tablet-clock';
 import { value } from '../support/test-site';
@@ -121,7 +122,7 @@ describe('the demonstration, taken up in the middle of its purge', () => {
 		value(await calculate(startUp, '2.27'));
 		value(await enter(startUp, '2.26', watch('3,1')));
 		expect(gateOf(startUp, 2)).toBe('ready');
-		const sheet = () => sheetOf(startUp, 2, 'released', { skipped: 'no second place in reach' });
+		const sheet = () => sheetOf(startUp, 2, 'released', speaker('en'), { skipped: 'no second place in reach' });
 		const sign = () => release(startUp, { gate: 2, pin: DEMONSTRATION_PIN, shown: sheet() });
 		expect(await sign()).toMatchObject({ error: { kind: 'refused-act' } });
 		expect(startUp.log.at(-1)).toMatchObject({ kind: 'refused act', body: { act: 'release', gate: 2 } });

@@ -8,6 +8,7 @@ import {
 	standing,
 	statementOf,
 	type BodyOf,
+	type GateSheet,
 	type RecordEvent,
 	type Statement,
 } from '../../src/lib/record';
@@ -48,7 +49,7 @@ export type Bent = {
 	readonly damper?: string;
 	readonly people?: BodyOf<'start-up opened'>['people'];
 	readonly opening?: (body: BodyOf<'start-up opened'>) => BodyOf<'start-up opened'>;
-	readonly statement?: (statement: Statement) => Statement;
+	readonly statement?: (statement: Statement, sheet: GateSheet) => Statement;
 	readonly release?: { readonly person: string; readonly with?: 'shift key' };
 	readonly stopAfter?: 'entries' | 'gate 1';
 	readonly calculation?: (stored: { [name: string]: unknown }) => { [name: string]: unknown };
@@ -167,23 +168,29 @@ async function release(
 	entered: string,
 	bent: Bent,
 ): Promise<void> {
-	const statement = (bent.statement ?? ((same) => same))(shownTo(tablets, gate, entered));
+	const { shown, sheet } = shownTo(tablets, gate, entered);
+	const statement = bent.statement?.(shown, sheet) ?? shown;
 	await tablets.say('gate released', { gate, statement }, { person, device: 'T-1', entered, ...how });
 }
 
 /** What a signer on T-1 sees before signing. */
-function shownTo(tablets: SigningTablets, gate: number, entered: string): Statement {
+function shownTo(
+	tablets: SigningTablets,
+	gate: number,
+	entered: string,
+): { readonly shown: Statement; readonly sheet: GateSheet } {
 	const own = tablets.held('T-1').filter(({ log }) => log === START_UP);
 	const site = tablets.held('OFFICE');
 	const stood = standing(SMALL_PROCEDURE, own, site, entered);
 	const sheet = gateSheet(SMALL_PROCEDURE, stood, [...own, ...site], { gate, device: 'T-1' });
-	return statementOf(sheet, {
+	const shown = statementOf(sheet, {
 		text: `Gate ${gate}: the steps below stand.`,
 		language: 'en',
 		textVersion: '1',
 		build: 'test',
 		declaration: 'No fan stop, opening or loss of inert gas other than listed.',
 	});
+	return { shown, sheet };
 }
 
 /** As the judge gets it: lines that may have been tampered with, and the root that the judge knows. */

@@ -3,6 +3,7 @@ import { verifyDossier, verifyRecord, type Report } from '../../lib/verify';
 import { unusable, type Command, type Outcome, type Terminal } from '../command';
 import { readBytes } from '../files';
 import { readOptions } from '../options';
+import { restate } from '../../lib/wording';
 import { REBUILD } from '../rebuild';
 import { tellReport } from '../tell-report';
 
@@ -52,10 +53,10 @@ async function judge(
 	if (!bytes.ok) return { outcome: unusable(terminal, bytes.error) };
 	const now = new Date().toISOString();
 	if (startsAsPdf(bytes.value)) {
-		const { signatures: _, ...report } = await verifyDossier(bytes.value, { root, now, rebuild: REBUILD });
+		const { signatures: _, ...report } = await verifyDossier(bytes.value, { root, now, rebuild: REBUILD, restate });
 		return { outcome: OUTCOMES[report.outcome], report };
 	}
-	const report = await verifyRecord({ lines: [{ name: file, bytes: bytes.value }], root, now });
+	const report = await verifyRecord({ lines: [{ name: file, bytes: bytes.value }], root, now, restate });
 	if (report.counts.events === 0 && report.counts.siteEvents === 0) {
 		const because = report.checks.find(({ outcome }) => outcome === 'failed')?.because ?? 'It is empty.';
 		const todo = 'Nothing was judged. Give a dossier (PDF), or a record with one event a line.';

@@ -13,7 +13,7 @@ import {
 	type GateSheet,
 	type Statement,
 } from '../record';
-import { DECLARATION, releaseStatement, sealStatement, STATEMENT_VERSION } from '../wording';
+import { declarationOf, releaseStatement, sealStatement, statementVersion, writtenHour, type Say } from '../wording';
 import { BUILD } from '../demo';
 import type { OpenStartUp } from './open-start-up.svelte';
 import type { Problem } from './problem';
@@ -37,24 +37,24 @@ export type GateSign = {
 	readonly shown: ShownSheet;
 };
 
-export function sheetOf(startUp: OpenStartUp, gate: number, meaning: Meaning, copy?: CopySaid): ShownSheet {
+/** @param say the language that is shown, and so the one that is signed and kept */
+export function sheetOf(startUp: OpenStartUp, gate: number, meaning: Meaning, say: Say, copy?: CopySaid): ShownSheet {
 	const { procedure, standing, events, siteLog, tablet } = startUp;
 	const sheet = gateSheet(procedure, standing, [...events, ...siteLog], { gate, device: tablet.device });
 	const statement = statementOf(sheet, {
 		text: releaseStatement(sheet, meaning, {
-			local: hourOf,
+			say,
+			local: writtenHour,
 			event: (what) => procedure.plantEvents.find(({ id }) => id === what)?.title ?? what,
 		}),
-		language: 'en',
-		textVersion: STATEMENT_VERSION,
+		language: say.language,
+		textVersion: statementVersion(say),
 		build: BUILD,
-		declaration: DECLARATION,
+		declaration: declarationOf(say),
 		...(copy === undefined ? {} : { copy }),
 	});
 	return { sheet, statement, events: events.length };
 }
-
-const hourOf = (instant: string): string => instant.slice(11, 16);
 
 export async function release(startUp: OpenStartUp, how: GateSign): Promise<Result<'signed', Problem>> {
 	const { gate, shown } = how;
@@ -112,7 +112,7 @@ export async function handOver(
 	return written.ok ? ok('signed') : written;
 }
 
-export async function seal(startUp: OpenStartUp, pin: string): Promise<Result<'signed', Problem>> {
+export async function seal(startUp: OpenStartUp, pin: string, say: Say): Promise<Result<'signed', Problem>> {
 	const key = await openKey(startUp, pin);
 	if (!key.ok) return key;
 	const head = await signHead(startUp, 'seal', key.value);
@@ -120,13 +120,13 @@ export async function seal(startUp: OpenStartUp, pin: string): Promise<Result<'s
 	const heads = Object.fromEntries(
 		[...headsOf(startUp.log)].map(([device, { number, id }]) => [device, { number, id }]),
 	);
-	const { sheet } = sheetOf(startUp, startUp.procedure.gates.at(-1)?.number ?? 0, 'accepted');
+	const { sheet } = sheetOf(startUp, startUp.procedure.gates.at(-1)?.number ?? 0, 'accepted', say);
 	const statement = statementOf(sheet, {
-		text: sealStatement(startUp.id),
-		language: 'en',
-		textVersion: STATEMENT_VERSION,
+		text: sealStatement(startUp.id, say),
+		language: say.language,
+		textVersion: statementVersion(say),
 		build: BUILD,
-		declaration: DECLARATION,
+		declaration: declarationOf(say),
 	});
 	return judgedAct(startUp, key.value, 'seal', 'sealed', { heads, statement });
 }

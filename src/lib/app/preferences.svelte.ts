@@ -1,4 +1,4 @@
-import { LANGUAGES, type Language } from '../wording';
+import { isLanguage, type Language } from '../wording';
 
 /** What a person chose for this tablet's screens. It lies beside the database, so that it is known before that opens. */
 export class Preferences {
@@ -48,5 +48,3 @@ export class Preferences {
 
 /** Their names in local storage. */
 const NAMES = ['look', 'language', 'sound'] as const;
-
-const isLanguage = (text: string): text is Language => Object.hasOwn(LANGUAGES, text);

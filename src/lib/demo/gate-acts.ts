@@ -1,7 +1,7 @@
 import type { Plant } from '../plant';
 import type { Procedure } from '../procedure';
 import { gateSheet, headsOf, statementOf, standing, type BodyOf, type Statement, type Trend } from '../record';
-import { DECLARATION, releaseStatement, sealStatement, STATEMENT_VERSION } from '../wording';
+import { declarationOf, releaseStatement, sealStatement, speaker, statementVersion, writtenHour } from '../wording';
 import type { Person } from './demo-site';
 import type { Around } from './entry-body';
 import type { Act, PlayFile } from './play-file';
@@ -21,8 +21,8 @@ export type Stage = {
 
 type Of<D extends Act['do']> = Extract<Act, { do: D }>;
 
-/** Plant local time of an instant, as it stands in a statement: "02:11". */
-const hourOf = (instant: string): string => instant.slice(11, 16);
+/** The story is told in English. */
+const say = speaker('en');
 
 function sheetAt({ procedure, tablets }: Stage, gate: number, { device, entered }: Said) {
 	const events = tablets.startUp(device);
@@ -34,13 +34,14 @@ function statementFor(stage: Stage, gate: number, meaning: string, said: Said, c
 	const sheet = sheetAt(stage, gate, said);
 	return statementOf(sheet, {
 		text: releaseStatement(sheet, meaning, {
-			local: hourOf,
+			say,
+			local: writtenHour,
 			event: (what) => stage.procedure.plantEvents.find(({ id }) => id === what)?.title ?? what,
 		}),
-		language: 'en',
-		textVersion: STATEMENT_VERSION,
+		language: say.language,
+		textVersion: statementVersion(say),
 		build: stage.build,
-		declaration: DECLARATION,
+		declaration: declarationOf(say),
 		...(copy === undefined ? {} : { copy }),
 	});
 }
@@ -121,11 +122,11 @@ export async function seal(stage: Stage, said: Said): Promise<void> {
 	const last = stage.procedure.gates.at(-1)?.number ?? 0;
 	const sheet = sheetAt(stage, last, said);
 	const words = {
-		text: sealStatement(play.startUp),
-		language: 'en',
-		textVersion: STATEMENT_VERSION,
+		text: sealStatement(play.startUp, say),
+		language: say.language,
+		textVersion: statementVersion(say),
 		build: stage.build,
-		declaration: DECLARATION,
+		declaration: declarationOf(say),
 	};
 	await tablets.say('sealed', { heads, statement: statementOf(sheet, words) }, said);
 }

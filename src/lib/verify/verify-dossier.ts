@@ -7,6 +7,7 @@ import { checkPdf } from './pdf/check-pdf';
 import type { SignatureReport } from './pdf/check-signature';
 import { readPdf } from './pdf/read-pdf';
 import { makeReport, type Report } from './report';
+import type { Restate } from './check-statements';
 import { judgeRecord } from './verify-record';
 
 type Bytes = Uint8Array<ArrayBuffer>;
@@ -28,6 +29,7 @@ export type DossierQuestion = {
 	/** The file existed not later than this: an archive receipt. */
 	readonly provenBy?: Instant | undefined;
 	readonly rebuild?: Rebuild | undefined;
+	readonly restate?: Restate | undefined;
 };
 
 export type DossierReport = Report & {
@@ -55,6 +57,7 @@ export async function verifyDossier(bytes: Bytes, question: DossierQuestion): Pr
 		trustList,
 		now,
 		provenBy,
+		restate: question.restate,
 	});
 	// The newest list that the record brings is the list that the closing signatures are asked against as well.
 	const pdf = await checkPdf(reading, {

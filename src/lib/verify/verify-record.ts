@@ -12,7 +12,7 @@ import { checkPerformers, checkRoles } from './check-performers';
 import { checkSeal } from './check-seal';
 import { checkSignatures } from './check-signatures';
 import { checkSiteHeads } from './check-site-heads';
-import { checkStatements } from './check-statements';
+import { checkStatements, type Restate } from './check-statements';
 import { undecided, type Check } from './pdf/check';
 import { countsOf, processResult } from './process-result';
 import { makeReport, type Report } from './report';
@@ -29,6 +29,7 @@ export type RecordQuestion = TrustGiven & {
 	readonly lines: readonly Named[];
 	/** Photos and trends. */
 	readonly attachments?: readonly Named[];
+	readonly restate?: Restate | undefined;
 };
 
 /** Reads a record back and says, check by check, what holds. Takes any bytes, stops at nothing, and always answers. */
@@ -73,7 +74,7 @@ export async function judgeRecord(question: RecordQuestion): Promise<JudgedRecor
 				? [undecided('acts were allowed by the rules', 'The record holds no procedure that can be read.')]
 				: [
 						...checkGates(replayed),
-						...checkStatements(replayed),
+						...checkStatements(replayed, question.restate),
 						...checkBindings(replayed, documents.plant, question.attachments ?? []),
 					]),
 			...checkSeal(startUp),

@@ -15,6 +15,7 @@ import { SCREEN_NOW } from './de/screen-now';
 import { SCREEN_PAGES } from './de/screen-pages';
 import { SCREEN_STEPS } from './de/screen-steps';
 import { SETTINGS } from './de/settings';
+import { STATEMENTS } from './de/statements';
 import { STATES } from './de/states';
 import type { EN } from './en';
 
@@ -34,6 +35,7 @@ import type { EN } from './en';
  */
 export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...STATES,
+	...STATEMENTS,
 	...COVER,
 	...GATES,
 	...CHAPTERS,

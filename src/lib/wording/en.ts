@@ -15,11 +15,13 @@ import { SCREEN_NOW } from './en/screen-now';
 import { SCREEN_PAGES } from './en/screen-pages';
 import { SCREEN_STEPS } from './en/screen-steps';
 import { SETTINGS } from './en/settings';
+import { STATEMENTS } from './en/statements';
 import { STATES } from './en/states';
 
 /** English. Every message under a key that says where it stands; another language has the same keys. */
 export const EN = {
 	...STATES,
+	...STATEMENTS,
 	...COVER,
 	...GATES,
 	...CHAPTERS,

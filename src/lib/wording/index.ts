@@ -6,6 +6,7 @@
 export {
 	capitalised,
 	counted,
+	isLanguage,
 	LANGUAGE_NAMES,
 	LANGUAGES,
 	speaker,
@@ -30,4 +31,4 @@ export {
 	sayShapeError,
 	sayTrendError,
 } from './say-error';
-export { DECLARATION, releaseStatement, sealStatement, STATEMENT_VERSION } from './statement';
+export { declarationOf, releaseStatement, restate, sealStatement, statementVersion, writtenHour } from './statement';

@@ -15,6 +15,8 @@ export const LANGUAGE_NAMES: { readonly [language in Language]: string } = { en:
 
 export const LANGUAGES: { readonly [language in Language]: { readonly [key in Key]: string } } = { en: EN, de: DE };
 
+export const isLanguage = (text: string): text is Language => Object.hasOwn(LANGUAGES, text);
+
 export const isKey = (text: string): text is Key => Object.hasOwn(EN, text);
 
 /** The facts that a message needs. */

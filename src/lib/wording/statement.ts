@@ -1,62 +1,118 @@
 import type { GateSheet } from '../record';
+import { isKey, isLanguage, speaker, type Say } from './say';
 
 /** Version of the sentences below: it stands inside every signed statement, so that they can be found again. */
-export const STATEMENT_VERSION = 'statement-en/1';
+export const statementVersion = (say: Say): string => say('statement.version');
+
+export type StatementWords = {
+	/** The language that is signed. */
+	readonly say: Say;
+	/** Prints an instant as plant local time, "02:11". */
+	readonly local: (instant: string) => string;
+	/** The procedure's name of a plant event: "Process-gas fan stopped". */
+	readonly event: (what: string) => string;
+};
 
 /**
  * The sentence that a signatory signs at a hold point, made from the sheet and nothing else: what is released, on which
  * evidence, what happened since the last act, and what the tablet does not know.
- *
- * @param words.local prints an instant as plant local time, "02:11"
- * @param words.event the procedure's name of a plant event: "Process-gas fan stopped"
  */
-export function releaseStatement(
-	sheet: GateSheet,
-	meaning: string,
-	words: { readonly local: (instant: string) => string; readonly event: (what: string) => string },
-): string {
-	const { local, event } = words;
-	const { counts } = sheet;
+export function releaseStatement(sheet: GateSheet, meaning: string, words: StatementWords): string {
+	const { say, local } = words;
+	const meant = `statement.meaning.${meaning}`;
 	const sentences = [
-		`Gate ${String(sheet.gate)}, ${sheet.title}: ${meaning}. This lets ${sheet.holdPoint} happen.`,
-		`Of ${count(counts.steps ?? 0, 'step')} under it ${String(counts.stand ?? 0)} stand as listed${
-			(counts['not applicable'] ?? 0) > 0 ? `, ${String(counts['not applicable'])} agreed not applicable` : ''
-		}${sheet.newestMinutes === undefined ? '' : `; the newest was observed ${minutes(sheet.newestMinutes)} before, the oldest ${minutes(sheet.oldestMinutes ?? 0)}`}.`,
+		say('statement.act', {
+			gate: sheet.gate,
+			title: sheet.title,
+			meaning: isKey(meant) ? say(meant) : meaning,
+			holdPoint: sheet.holdPoint,
+		}),
+		stepsOf(sheet, say),
 		sheet.eventsSince.length === 0
-			? 'No plant event is recorded since the last act on this gate.'
-			: `Plant events since the last act on this gate: ${sheet.eventsSince
-					.map(
-						({ what, item, begin, end }) =>
-							`${event(what)}${item === undefined ? '' : ` (${item})`} ${local(begin)} to ${end === null ? 'not ended' : local(end)}`,
-					)
-					.join('; ')}.`,
-		...sheet.findingsSince.map(
-			({ instrument, error }) =>
-				`${instrument} was found bad${error === undefined ? '' : ` (as found ${error})`}; what rested on it was proved again.`,
+			? say('statement.no event')
+			: say('statement.events', { events: sheet.eventsSince.map((event) => sayEvent(event, words)).join('; ') }),
+		...sheet.findingsSince.map(({ instrument, error }) =>
+			error === undefined
+				? say('statement.finding', { instrument })
+				: say('statement.finding with error', { instrument, error }),
 		),
 		...(sheet.refusal === undefined
 			? []
-			: [`Refused before: "${sheet.refusal.reason}". Answer: "${sheet.refusal.answer ?? 'none'}".`]),
+			: [
+					say('statement.refused before', {
+						reason: sheet.refusal.reason,
+						answer: sheet.refusal.answer ?? say('statement.no answer'),
+					}),
+				]),
 		...(sheet.openDeviations.length === 0
 			? []
-			: [`Open deviations that do not block this gate: ${sheet.openDeviations.join(', ')}.`]),
-		...sheet.others.map(
-			({ device, number, head, lastHeard }) =>
-				`Tablet ${device} was last heard ${lastHeard === null ? 'never' : `at ${local(lastHeard)}`} (number ${String(number)}, head ${head ?? 'unknown'}); its later entries are not covered.`,
-		),
-		...(sheet.clock === 'agreed' ? [] : ['Clock not agreed: ages are judged by the last agreed time.']),
-		'This is a statement about what was recorded. It is no permission to enter, and replaces no permit, interlock or gas test.',
+			: [say('statement.deviations', { deviations: sheet.openDeviations.join(', ') })]),
+		...sheet.others.map((other) => {
+			const facts = { device: other.device, number: other.number, head: other.head ?? say('statement.head unknown') };
+			return other.lastHeard === null
+				? say('statement.tablet never', facts)
+				: say('statement.tablet', { ...facts, heard: local(other.lastHeard) });
+		}),
+		...(sheet.clock === 'agreed' ? [] : [say('statement.clock')]),
+		say('statement.no permission'),
 	];
 	return sentences.join(' ');
 }
 
+function stepsOf({ counts, newestMinutes, oldestMinutes }: GateSheet, say: Say): string {
+	const n = counts.steps ?? 0;
+	const agreed = counts['not applicable'] ?? 0;
+	return say(n === 1 ? 'statement.step' : 'statement.steps', {
+		n,
+		stand: counts.stand ?? 0,
+		agreed: agreed > 0 ? say('statement.agreed', { n: agreed }) : '',
+		seen:
+			newestMinutes === undefined
+				? ''
+				: say('statement.seen', { newest: minutes(newestMinutes), oldest: minutes(oldestMinutes ?? 0) }),
+	});
+}
+
+function sayEvent({ what, item, begin, end }: GateSheet['eventsSince'][number], words: StatementWords): string {
+	const { say, local, event } = words;
+	const named = `${event(what)}${item === undefined ? '' : ` (${item})`}`;
+	return end === null
+		? say('statement.event goes on', { what: named, begin: local(begin) })
+		: say('statement.event over', { what: named, begin: local(begin), end: local(end) });
+}
+
 /** What the signer declares besides: nothing happened that the record does not say. */
-export const DECLARATION =
-	'I know of no fan stop, opening, loss of inert gas, burner trip, feed stop or power dip other than those listed.';
+export const declarationOf = (say: Say): string => say('statement.declaration');
 
-export const sealStatement = (startUp: string): string =>
-	`The record of ${startUp} is closed. It takes no more entries, only addenda. Sealing says that the record is complete as far as this tablet knows; it does not say that readings, clocks or people were right.`;
+export const sealStatement = (startUp: string, say: Say): string => say('statement.seal', { startUp });
 
-const count = (n: number, what: string): string => `${String(n)} ${what}${n === 1 ? '' : 's'}`;
 const minutes = (n: number): string =>
 	n < 120 ? `${String(n)} min` : `${String(Math.floor(n / 60))} h ${String(n % 60)} min`;
+
+/** What a stored statement was made from, to say its words again. */
+export type Restated =
+	| { readonly sheet: GateSheet; readonly meaning: string; readonly event: (what: string) => string }
+	| { readonly startUp: string };
+
+/**
+ * The words of a stored statement, said again in its own language.
+ *
+ * @returns undefined for a language, or a version of the sentences, that is not spoken here
+ */
+export function restate(
+	said: { readonly language: string; readonly textVersion: string },
+	of: Restated,
+): { readonly text: string; readonly declaration: string } | undefined {
+	const { language } = said;
+	if (!isLanguage(language)) return undefined;
+	const say = speaker(language);
+	if (said.textVersion !== statementVersion(say)) return undefined;
+	const text =
+		'startUp' in of
+			? sealStatement(of.startUp, say)
+			: releaseStatement(of.sheet, of.meaning, { say, local: writtenHour, event: of.event });
+	return { text, declaration: declarationOf(say) };
+}
+
+/** An instant's hour as it was written, with the offset of the tablet: "02:11". */
+export const writtenHour = (instant: string): string => instant.slice(11, 16);

@@ -1,0 +1,75 @@
+import { beforeAll, describe, expect, test } from 'vitest';
+import { readableCode, sha256Hex } from '../../src/lib/base';
+import { statementOf, type GateSheet, type Statement } from '../../src/lib/record';
+import type { Check, Report } from '../../src/lib/verify';
+import { restate, type Language } from '../../src/lib/wording';
+import { judge, makeSignedRecord } from '../support/signed-record';
+import { SMALL_PROCEDURE } from '../support/small-procedure';
+import { makeTestSite, type TestSite } from '../support/test-site';
+
+let site: TestSite;
+beforeAll(async () => {
+	site = await makeTestSite();
+});
+
+const bad = (report: Report): readonly Check[] => report.checks.filter(({ outcome }) => outcome !== 'passed');
+
+const event = (what: string): string => SMALL_PROCEDURE.plantEvents.find(({ id }) => id === what)?.title ?? what;
+
+/** As the app words it, in a language, before it is signed. */
+const worded =
+	(language: Language) =>
+	(said: Statement, sheet: GateSheet): Statement => {
+		const textVersion = `statement-${language}/1`;
+		const words = restate({ language, textVersion }, { sheet, meaning: 'released', event });
+		return statementOf(sheet, { ...said, language, textVersion, ...words! });
+	};
+
+const judged = async (statement: (said: Statement, sheet: GateSheet) => Statement): Promise<Report> =>
+	judge(await makeSignedRecord({ statement }, site), undefined, { restate });
+
+describe('the words of a signed statement are said again in their own language', () => {
+	test.each(['en', 'de'] as const)('%s: a record as it was signed passes', async (language) => {
+		const record = await makeSignedRecord({ statement: worded(language) }, site);
+		const texts = record.events.flatMap((one) => (one.kind === 'gate released' ? [one.body.statement!.text] : []));
+		expect(texts[0]).toMatch(language === 'de' ? /^Stufe 1, .*: freigegeben\. / : /^Gate 1, .*: released\. /);
+		expect((await judge(record, undefined, { restate })).class).toBe('TOTAL-PASSED');
+	});
+
+	test('words that the sheet does not give fail, even with the right code', async () => {
+		const report = await judged((said, sheet) => {
+			const text = worded('de')(said, sheet).text.replace('keine Erlaubnis', 'eine Erlaubnis');
+			return { ...worded('de')(said, sheet), text, code: readableCode(sha256Hex(text), 16) };
+		});
+		expect(report.class).toBe('TOTAL-FAILED');
+		expect(bad(report).map(({ because }) => because)[0]).toMatch(
+			/^T-1 number 6 \(gate released, gate 1\) says "Stufe 1/,
+		);
+	});
+
+	test('a declaration that was not asked for fails', async () => {
+		const report = await judged((said, sheet) => ({ ...worded('de')(said, sheet), declaration: 'Alles in Ordnung.' }));
+		expect(report.class).toBe('TOTAL-FAILED');
+		expect(bad(report)[0]!.because).toContain('declares "Alles in Ordnung."');
+	});
+
+	test('German words that are called English fail', async () => {
+		const report = await judged((said, sheet) => ({
+			...worded('de')(said, sheet),
+			language: 'en',
+			textVersion: 'statement-en/1',
+		}));
+		expect(report.class).toBe('TOTAL-FAILED');
+	});
+
+	test('a language, or a version, that is not spoken here is undecided, and not passed over', async () => {
+		for (const said of [
+			{ language: 'fi', textVersion: 'statement-fi/1' },
+			{ language: 'de', textVersion: 'statement-de/9' },
+		]) {
+			const report = await judged((shown) => ({ ...shown, ...said }));
+			expect(report.class).toBe('INDETERMINATE');
+			expect(bad(report)[0]!.because).toContain(`is worded in ${said.textVersion}, which is not spoken here`);
+		}
+	});
+});
