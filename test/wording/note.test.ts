@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import type { CalcNote } from '../../src/lib/calc';
-import { momentsAt, purgeSentence, sayNote, sayNumber, speaker } from '../../src/lib/wording';
+import { LANGUAGES, momentsAt, purgeSentence, sayNote, sayNumber, speaker } from '../../src/lib/wording';
+import { readTree } from '../architecture/tree';
 import { purgeInputs, run } from '../calc/purge/purge-scene';
 
 const say = speaker('en');
@@ -44,6 +45,24 @@ describe('a note of a calculator', () => {
 	test('that lacks a fact of its sentence is said plainly', () => {
 		expect(sayNote({ kind: 'slowest-place', level: 'remark' }, say, clock)).toBe('Slowest place.');
 	});
+});
+
+/** Names of curves and marks of plots, of dew points, of fits that are said inside another note, of inverse formulas. */
+const NO_NOTES = new Set(
+	[
+		'limit guard window event points band line steps dew none frost',
+		'rate-of-the-analyser too-few-samples too-coarse no-curvature not-falling flow-beyond-meter no-throat-fits',
+	].flatMap((names) => names.split(' ')),
+);
+
+test('everything a calculator notes or refuses has its sentence', () => {
+	const kinds = [...readTree('src/lib/calc')].flatMap(([, text]) =>
+		[...text.matchAll(/kind: '([a-z-]+)'/g)].map(([, kind = '']) => kind),
+	);
+	const known = (kind: string): boolean =>
+		['note', 'refusal', 'quantity'].some((head) => Object.hasOwn(LANGUAGES.en, `${head}.${kind}`));
+	expect([...new Set(kinds)].filter((kind) => !known(kind) && !NO_NOTES.has(kind))).toEqual([]);
+	expect(kinds.length).toBeGreaterThan(50);
 });
 
 describe('the sentence of an adequate purge', () => {

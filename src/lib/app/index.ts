@@ -50,3 +50,8 @@ export { checkFile, type CheckedFile } from './check-file';
 export { nowFacts } from './now/now-facts';
 export { logHeads, logLines } from './log-lines';
 export { NoteDesk } from './note-desk.svelte';
+export { CalculatorDesk } from './calculator-desk.svelte';
+export { asHash, fromHash, keptCases, type Shelf } from './calculator-shelf';
+export { sayPlan } from './say-plan';
+export { sweepable } from './sweep-curve';
+export { stepsThatUse, useInStep, type UsableStep } from './use-in-step';

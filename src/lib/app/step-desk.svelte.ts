@@ -136,6 +136,20 @@ export class StepDesk {
 	}
 }
 
+/** Adds to what is typed on a step that is not open: it is found there when the step is opened. */
+export async function keepInDraft(
+	startUp: OpenStartUp,
+	step: string,
+	change: (draft: TypedSoFar) => TypedSoFar,
+): Promise<Result<'saved', Problem>> {
+	const { store, clock } = startUp.tablet;
+	const key = { startUp: startUp.id, step, person: startUp.tablet.person?.person ?? '' };
+	const kept = await store.drafts.read(key);
+	if (!kept.ok) return kept;
+	const typed = change((kept.value?.typed ?? {}) as TypedSoFar) as unknown as Json;
+	return store.drafts.save({ ...key, typed, saved: startUp.instant(clock.now()) });
+}
+
 function typedOf({ values, rows, confirmed, choice, flow, begun, mode }: TypedSoFar): Typed {
 	const read = (value: TypedValue): TypedValue => (mode === undefined ? value : { ...value, analyserMode: mode });
 	return {

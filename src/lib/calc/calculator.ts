@@ -19,6 +19,26 @@ export type Calculator = {
 	/** Shape of the inputs, from which the published JSON Schema is made. */
 	readonly schema: v.GenericSchema;
 	readonly run: (inputs: unknown) => Result<CalcResult, readonly Refusal[]>;
+	readonly page: CalculatorPage;
+};
+
+/** What a calculator's page shows beside its inputs and numbers: a new calculator brings its page along. */
+export type CalculatorPage = {
+	readonly area: 'purge' | 'flow' | 'tightness' | 'instruments' | 'moisture' | 'stock';
+	/** Other words that people look for it by. */
+	readonly findBy: string;
+	/** Inputs shown at once; the others are folded away until they are wanted. */
+	readonly first: readonly string[];
+	/** Outputs shown at once, the one that is asked for first; the others are folded away. */
+	readonly results: readonly string[];
+	/** What was calculated, in the notation of the drawing room's `typeset`. */
+	readonly formula: readonly string[];
+	/** One screen of explanation: what it assumes, where it ends, what is often done wrong. */
+	readonly explains: readonly string[];
+	/** What can hurt where it is used: inert gas suffocates; a number is no permission to enter. */
+	readonly cautions: readonly ('inert' | 'entry')[];
+	/** Invented inputs that give a result. */
+	readonly example?: { readonly [input: string]: Json };
 };
 
 /** Where an input comes from when a step binds it and nobody types it. */
@@ -28,19 +48,28 @@ export type InputSpec = {
 	readonly name: string;
 	/** The source's own letter, when it has one. */
 	readonly symbol?: string;
+	/** In two or three words, beside the field; `means` is the whole sentence. */
+	readonly label?: string;
 	readonly means: string;
 	/** A name of the quantity room ("pressure-absolute"), or the shape of what is not one number. */
 	readonly quantity: string;
 	/** SI unit that a bare number is read in; absent for what is not one number. */
 	readonly unit?: string;
+	/** Unit that a field offers first, where it is not the usual one of the quantity. */
+	readonly typedIn?: string;
 	readonly min?: number;
 	readonly max?: number;
 	readonly choices?: readonly string[];
 	readonly optional?: true;
 	/** What stands when the input is left out, said in words and used by the calculation. */
 	readonly default?: number | string | boolean;
+	/** What an input of several values is made of; with `repeats` it is a table of such rows. */
+	readonly parts?: readonly InputPart[];
+	readonly repeats?: true;
 	readonly from: InputSource;
 };
+
+export type InputPart = Omit<InputSpec, 'from' | 'parts' | 'repeats'>;
 
 export type OutputSpec = {
 	readonly name: string;

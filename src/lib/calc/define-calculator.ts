@@ -4,7 +4,10 @@ import { CONSTANTS } from './constants';
 import { inputSchema, inputSpecs, readInputs, type Fields, type Given } from './read-inputs';
 
 /** What a calculator says about itself, and the calculation proper: SI values in, values, notes and plots out. */
-type Definition<F extends Fields> = Pick<Calculator, 'id' | 'version' | 'title' | 'answers' | 'sources' | 'outputs'> & {
+type Definition<F extends Fields> = Pick<
+	Calculator,
+	'id' | 'version' | 'title' | 'answers' | 'sources' | 'outputs' | 'page'
+> & {
 	readonly fields: F;
 	readonly compute: (given: Given<F>) => Result<Omit<CalcResult, 'calc' | 'constants' | 'inputs'>, readonly Refusal[]>;
 };

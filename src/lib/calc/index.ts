@@ -9,6 +9,8 @@ export type {
 	CalcResult,
 	Calculator,
 	CalcValue,
+	CalculatorPage,
+	InputPart,
 	InputSource,
 	InputSpec,
 	OutputSpec,
@@ -23,5 +25,15 @@ export { CATALOGUE, latest, runCalculator } from './catalogue';
 export { CONSTANTS, OXYGEN_IN_AIR } from './constants';
 export { differencePressureForFlow, throatForRange, type VenturiDuty } from './flow/venturi-inverse';
 export { dewPoint, type DewPoint } from './moisture/dew-point';
+export {
+	inputsFrom,
+	placeOf,
+	rowsTyped,
+	titleOf,
+	typedFrom,
+	usualUnit,
+	type TypedField,
+	type TypedInputs,
+} from './typed-inputs';
 export { wetFromDry } from './moisture/moisture-basis';
 export { allowedOxygen } from './purge/allowed-oxygen';

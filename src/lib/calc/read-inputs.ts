@@ -17,7 +17,7 @@ export type Fields = { readonly [name: string]: Field<unknown> };
 /** What stands behind each name after reading. */
 export type Given<F extends Fields> = { readonly [Name in keyof F]: F[Name] extends Field<infer T> ? T : never };
 
-type About = Pick<InputSpec, 'means' | 'from'> & { readonly symbol?: string };
+type About = Pick<InputSpec, 'means' | 'from' | 'label' | 'parts' | 'repeats' | 'symbol' | 'typedIn'>;
 type AboutMeasured<Q> = About & { readonly quantity: Q; readonly min?: number; readonly max?: number };
 
 /** A measured value as typed, or a bare number in the SI unit of its quantity. */

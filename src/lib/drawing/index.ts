@@ -34,3 +34,4 @@ export { drawTimeline, type Span, type Timeline, type TimelineLook } from './tim
 export { processSketch, type SketchLook } from './sketch/process-sketch';
 export type { SketchElement } from './sketch/element-names';
 export type { SketchReading } from './sketch/bubble';
+export { symbolNotation, typeset, type Typeset } from './formula/typeset';

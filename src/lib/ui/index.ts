@@ -49,9 +49,13 @@ export { default as DeviationSheet } from './acts/DeviationSheet.svelte';
 export { default as HappenedSheet } from './acts/HappenedSheet.svelte';
 export { default as PersonSwitch } from './acts/PersonSwitch.svelte';
 
+export { default as CalculatorList } from './calculators/CalculatorList.svelte';
+export { default as CalculatorSheet } from './calculators/CalculatorSheet.svelte';
+export { default as CompareTable } from './calculators/CompareTable.svelte';
+export { default as SweepSheet } from './calculators/SweepSheet.svelte';
+export { findCalculators } from './calculators/find-calculators';
+
 export { default as ArchiveDrop } from './pages/ArchiveDrop.svelte';
-export { default as CalculatorForm } from './pages/CalculatorForm.svelte';
-export { inputsFrom, type CalculatorDraft } from './pages/calculator-draft';
 export { default as DeviationList } from './pages/DeviationList.svelte';
 export { default as LapsedPage } from './pages/LapsedPage.svelte';
 export { default as LogView } from './pages/LogView.svelte';

@@ -8,6 +8,7 @@ import { GATES } from './de/gates';
 import { NOTES } from './de/notes';
 import { PEOPLE } from './de/people';
 import { SCREEN_ACTS } from './de/screen-acts';
+import { SCREEN_CALCULATORS } from './de/screen-calculators';
 import { SCREEN_FRAME } from './de/screen-frame';
 import { SCREEN_LINE } from './de/screen-line';
 import { SCREEN_LOG } from './de/screen-log';
@@ -53,4 +54,5 @@ export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...SCREEN_NOW,
 	...SCREEN_PAGES,
 	...SETTINGS,
+	...SCREEN_CALCULATORS,
 };

@@ -9,6 +9,7 @@ import { NOTES } from './en/notes';
 import { PEOPLE } from './en/people';
 import { SCREEN_ACTS } from './en/screen-acts';
 import { SCREEN_FRAME } from './en/screen-frame';
+import { SCREEN_CALCULATORS } from './en/screen-calculators';
 import { SCREEN_LINE } from './en/screen-line';
 import { SCREEN_LOG } from './en/screen-log';
 import { SCREEN_NOW } from './en/screen-now';
@@ -39,4 +40,5 @@ export const EN = {
 	...SCREEN_NOW,
 	...SCREEN_PAGES,
 	...SETTINGS,
+	...SCREEN_CALCULATORS,
 } as const;

@@ -51,6 +51,8 @@ const FORMS: { readonly [form: string]: { readonly quantity: QuantityName; reado
 	m3n: { quantity: 'volume-normal', unit: 'm3(n)' },
 	degC: { quantity: 'temperature', unit: 'degC' },
 	K: { quantity: 'temperature-difference', unit: 'K' },
+	Pa: { quantity: 'pressure-difference', unit: 'Pa' },
+	mA: { quantity: 'current', unit: 'mA' },
 };
 
 function plainly(kind: string, facts: { readonly [name: string]: Json }, say: Say): string {

@@ -13,6 +13,7 @@ import { VENTURI_OUTPUTS, venturiValues } from './venturi-outputs';
 import { venturiPlot } from './venturi-plot';
 import { venturiScope } from './venturi-scope';
 import { workingPoint } from './working-point';
+import { VENTURI_PAGE } from './venturi-page';
 
 /**
  * What flows through a classical Venturi tube: mass, actual and normal flow, wet and dry, and the velocity in the duct.
@@ -43,6 +44,7 @@ export const venturiFlow = defineCalculator({
 	],
 	fields: VENTURI_INPUTS,
 	outputs: VENTURI_OUTPUTS,
+	page: VENTURI_PAGE,
 	compute,
 });
 

@@ -1,7 +1,7 @@
 import * as v from 'valibot';
 import { fail, ok, type Result } from '../../base';
 import type { InSi } from '../../quantity';
-import type { CalcNote, Refusal } from '../calculator';
+import type { CalcNote, InputPart, Refusal } from '../calculator';
 import { MOLAR_MASS, type Gas } from '../constants';
 import { all, readMeasure, typedMeasure } from '../read-inputs';
 
@@ -18,6 +18,28 @@ export const compositionSchema = v.strictObject(
 		[G in Gas]: v.OptionalSchema<typeof typedMeasure, undefined>;
 	},
 );
+
+const GAS_NAMES: { readonly [G in Gas]: string } = {
+	N2: 'Nitrogen',
+	O2: 'Oxygen',
+	CO2: 'Carbon dioxide',
+	CO: 'Carbon monoxide',
+	H2O: 'Water',
+	Ar: 'Argon',
+};
+
+export const COMPOSITION_PARTS: readonly InputPart[] = GASES.map((gas) => ({
+	...{
+		name: gas,
+		symbol: gas,
+		label: GAS_NAMES[gas],
+		means: `mole fraction of ${gas}`,
+		quantity: 'fraction',
+		unit: '1',
+		typedIn: '%',
+	},
+	...{ min: 0, max: 1, optional: true },
+}));
 
 /**
  * Reads a composition and refuses what cannot be one: a negative fraction, percent typed as fractions, a sum that is

@@ -9,6 +9,7 @@ export const pressureInputs = (place: string) => ({
 	pressure: optional(
 		measured({
 			symbol: 'p',
+			label: 'Pressure, absolute',
 			means: `absolute pressure ${place}`,
 			quantity: 'pressure-absolute',
 			min: 1e3,
@@ -19,6 +20,7 @@ export const pressureInputs = (place: string) => ({
 	pressureGauge: optional(
 		measured({
 			symbol: 'p_g',
+			label: 'Pressure, gauge',
 			means: `gauge pressure ${place}; needs the barometer`,
 			quantity: 'pressure-gauge',
 			from: 'reading',
@@ -27,6 +29,7 @@ export const pressureInputs = (place: string) => ({
 	barometer: optional(
 		measured({
 			symbol: 'p_b',
+			label: 'Barometer',
 			means: 'absolute pressure of the air outside, at this place and hour',
 			quantity: 'pressure-absolute',
 			min: 5e4,

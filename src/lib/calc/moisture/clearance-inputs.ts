@@ -51,10 +51,11 @@ function readSurfaces(
 const WALL = { quantity: 'temperature', min: 150, max: 900 } as const;
 const AGE = { quantity: 'time', min: 0 } as const;
 
-const moisture = (state: string) => ({
+const moisture = (state: string, when: string) => ({
 	wet: optional(
 		measured({
 			symbol: 'x_w',
+			label: `Moisture ${when}, wet`,
 			means: `moisture of the gas ${state}, as mole of water per mole of wet gas`,
 			quantity: 'water-vapour',
 			min: 0,
@@ -65,6 +66,7 @@ const moisture = (state: string) => ({
 	dry: optional(
 		measured({
 			symbol: 'w',
+			label: `Moisture ${when}, dry`,
 			means: `moisture ${state}, as mole of water per mole of dry gas`,
 			quantity: 'water-vapour-dry',
 			min: 0,
@@ -74,6 +76,7 @@ const moisture = (state: string) => ({
 	byMass: optional(
 		measured({
 			symbol: 'Y',
+			label: `Moisture ${when}, by mass`,
 			means: `moisture ${state}, as kilogram of water per kilogram of dry gas; needs dryMolarMass`,
 			quantity: 'humidity-ratio',
 			min: 0,
@@ -81,8 +84,8 @@ const moisture = (state: string) => ({
 		}),
 	),
 });
-const present = moisture('at present');
-const predicted = moisture('predicted with feed on');
+const present = moisture('at present', 'now');
+const predicted = moisture('predicted with feed on', 'with feed');
 
 /** Everything `dew-point-clearance@1` can be told. Each moisture is given in one of three ways. */
 export const CLEARANCE_INPUTS = {
@@ -90,9 +93,23 @@ export const CLEARANCE_INPUTS = {
 		v.pipe(v.array(surfaceSchema), v.minLength(1), v.maxLength(200)),
 		{
 			symbol: 'T_s',
+			label: 'Surfaces',
 			means:
 				'named surfaces the gas touches, each with its temperature and the age of that reading: hopper cone, unlagged duct, filter roof, cleaning-air header',
 			quantity: 'table of {name, temperature, age}',
+			repeats: true,
+			parts: [
+				{ name: 'name', label: 'Surface', means: 'what the surface is called on the plant', quantity: 'text' },
+				{ name: 'temperature', label: 'Temperature', means: 'its temperature', unit: 'K', ...WALL },
+				{
+					name: 'age',
+					label: 'Age of the reading',
+					means: 'how old the reading is',
+					unit: 's',
+					optional: true,
+					...AGE,
+				},
+			],
 			from: 'reading',
 		},
 		readSurfaces,
@@ -106,6 +123,7 @@ export const CLEARANCE_INPUTS = {
 	dryMolarMass: optional(
 		measured({
 			symbol: 'M_dry',
+			label: 'Molar mass of the dry gas',
 			means: 'molar mass of the dry gas; for air 0.02896, with much carbon dioxide more',
 			quantity: 'molar-mass',
 			min: 2e-3,
@@ -117,6 +135,7 @@ export const CLEARANCE_INPUTS = {
 	gasTemperature: optional(
 		measured({
 			symbol: 'T',
+			label: 'Gas temperature',
 			means: 'temperature of the gas: shows whether the moisture stated can be vapour at all',
 			quantity: 'temperature',
 			min: 150,
@@ -125,6 +144,7 @@ export const CLEARANCE_INPUTS = {
 		}),
 	),
 	margin: measured({
+		label: 'Clearance asked for',
 		means: 'clearance the site asks for above the dew point',
 		quantity: 'temperature-difference',
 		min: 0,
@@ -132,11 +152,18 @@ export const CLEARANCE_INPUTS = {
 		from: 'site',
 	}),
 	oldest: withDefault(
-		measured({ means: 'age from which a surface temperature is too old', quantity: 'time', min: 1, from: 'procedure' }),
+		measured({
+			label: 'Oldest reading',
+			means: 'age from which a surface temperature is too old',
+			quantity: 'time',
+			min: 1,
+			from: 'procedure',
+		}),
 		300,
 	),
 	filter: optional(
 		choice(['preheated', 'cold'], {
+			label: 'Filter',
 			means: 'whether the filter was warmed up before moist gas comes',
 			from: 'reading',
 		}),
@@ -144,6 +171,8 @@ export const CLEARANCE_INPUTS = {
 	sulphurTrioxide: optional(
 		measured({
 			symbol: 'SO3',
+			label: 'SO3 in the wet gas',
+			typedIn: 'ppm',
 			means: 'SO3 and H2SO4 together, as mole fraction of the wet gas; its acid dew point is a remark, never a proof',
 			quantity: 'fraction',
 			min: 0,
@@ -152,7 +181,7 @@ export const CLEARANCE_INPUTS = {
 		}),
 	),
 	sulphurTrioxideFrom: withDefault(
-		choice(['measured', 'estimated'], { means: 'where the SO3 is known from', from: 'typed' }),
+		choice(['measured', 'estimated'], { label: 'SO3 is', means: 'where the SO3 is known from', from: 'typed' }),
 		'estimated',
 	),
 };

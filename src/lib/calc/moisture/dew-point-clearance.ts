@@ -11,6 +11,7 @@ import { CLEARANCE_OUTPUTS, clearanceValues } from './clearance-outputs';
 import { clearancePlot } from './clearance-plot';
 import { clearanceVerdict } from './clearance-verdict';
 import { statedMoisture, type Moisture } from './stated-moisture';
+import { CLEARANCE_PAGE } from './clearance-page';
 
 /**
  * Whether the coldest metal stays dry: how far its temperature is above the dew point of the gas, as it is now and as it
@@ -42,6 +43,7 @@ export const dewPointClearance = defineCalculator({
 	],
 	fields: CLEARANCE_INPUTS,
 	outputs: CLEARANCE_OUTPUTS,
+	page: CLEARANCE_PAGE,
 	compute,
 });
 

@@ -10,6 +10,7 @@ import { judgePurge } from './judge-purge';
 import type { PurgeReason } from './notes';
 import type { PlaceReadings } from './place-judgement';
 import { readPlaces } from './place-readings';
+import { ADEQUACY_PAGE } from './adequacy-page';
 
 /**
  * Adequacy of a purge: whether the readings show that every enclosed volume was brought below the limit and stays there.
@@ -41,6 +42,7 @@ export const purgeAdequacy = defineCalculator({
 	],
 	outputs: adequacyOutputs,
 	fields: adequacyFields,
+	page: ADEQUACY_PAGE,
 	compute,
 });
 

@@ -1,7 +1,7 @@
 import * as v from 'valibot';
 import { fail, ok } from '../../base';
 import { QUANTITIES, type InSi, type QuantityName } from '../../quantity';
-import type { OutputSpec, Refusal } from '../calculator';
+import type { InputPart, OutputSpec, Refusal } from '../calculator';
 import { all, readMeasure, shaped, typedMeasure, type Field } from '../read-inputs';
 
 export type Volume = {
@@ -15,10 +15,20 @@ export type Volume = {
 /** Rows may carry more of the plant description (outline, sketch); only these four are used and kept. */
 const volumeSchema = v.object({ id: v.string(), title: v.string(), volume: typedMeasure, deadLeg: v.boolean() });
 
+const VOLUME_PARTS: readonly InputPart[] = [
+	{ name: 'id', label: 'Tag', means: 'its tag', quantity: 'text' },
+	{ name: 'title', label: 'Volume', means: 'what it is called', quantity: 'text' },
+	{ name: 'volume', label: 'Size', means: 'its size', quantity: 'volume', unit: 'm3', min: 0 },
+	{ name: 'deadLeg', label: 'Dead leg', means: 'whether the circuit gas does not sweep it', quantity: 'yes or no' },
+];
+
 export const volumesField = (means: string): Field<readonly Volume[]> =>
 	shaped(
 		v.pipe(v.array(volumeSchema), v.minLength(1)),
-		{ quantity: 'table of volumes', symbol: 'V_i', means, from: 'plant' },
+		{
+			...{ quantity: 'table of volumes', symbol: 'V_i', label: 'Volumes', means, from: 'plant' },
+			...{ repeats: true, parts: VOLUME_PARTS },
+		},
 		(rows, at) => {
 			const read = all(
 				rows.map((row, i) => {
@@ -35,6 +45,14 @@ export const volumesField = (means: string): Field<readonly Volume[]> =>
 			return twice.length > 0 ? fail(twice) : read;
 		},
 	);
+
+export const METER_PARTS: readonly InputPart[] = [
+	{ name: 'tag', label: 'Tag of the meter', means: 'its tag', quantity: 'text' },
+	{
+		...{ name: 'medium', label: 'What it meters', means: 'its medium', quantity: 'text' },
+		choices: ['inert gas', 'circuit gas', 'air'],
+	},
+];
 
 export const meterSchema = v.object({ tag: v.string(), medium: v.string() });
 

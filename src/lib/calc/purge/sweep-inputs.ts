@@ -4,7 +4,7 @@ import type { InSi } from '../../quantity';
 import type { Refusal } from '../calculator';
 import { OXYGEN_IN_AIR } from '../constants';
 import { choice, measured, optional, readMeasure, shaped, typedMeasure, withDefault, type Given } from '../read-inputs';
-import { meterSchema, output, OXYGEN_RANGE, volumesField } from './shared-inputs';
+import { METER_PARTS, meterSchema, output, OXYGEN_RANGE, volumesField } from './shared-inputs';
 
 export type Leak = { readonly flow: InSi<'volume-flow-normal-wet'>; readonly suction: number | undefined };
 
@@ -13,7 +13,18 @@ const leak = shaped(
 	{
 		quantity: 'in-leakage',
 		symbol: 'Q_L',
+		label: 'In-leakage',
 		means: 'air that leaks in, and the suction at which it was found',
+		parts: [
+			{
+				...{ name: 'flow', label: 'Air that leaks in', means: 'normal flow of the air that leaks in' },
+				...{ quantity: 'volume-flow-normal-wet', unit: 'm3(n)/s', min: 0 },
+			},
+			{
+				...{ name: 'suction', label: 'Found at a suction of', means: 'suction at which it was found' },
+				...{ quantity: 'pressure-difference', unit: 'Pa', min: 0, optional: true },
+			},
+		],
 		from: 'reading',
 	},
 	(typed, at): Result<Leak, readonly Refusal[]> => {
@@ -30,6 +41,7 @@ export const sweepFields = {
 	volumes: volumesField('every volume that is connected while the purge runs, dead legs too'),
 	outletRead: withDefault(
 		choice(['not every volume', 'every volume'], {
+			label: 'Outlets read',
 			means: 'of which volumes the outlet is read: with all of them one volume change is the least, else three',
 			from: 'plant',
 		}),
@@ -37,84 +49,115 @@ export const sweepFields = {
 	),
 	temperature: measured({
 		...{ quantity: 'temperature', symbol: 'T', from: 'reading' },
+		label: 'Temperature in the circuit',
 		means: 'temperature of the gas in the circuit',
 	}),
 	pressure: measured({
 		...{ quantity: 'pressure-absolute', symbol: 'p', from: 'reading' },
+		label: 'Pressure in the circuit',
 		means: 'pressure of the gas in the circuit',
 	}),
 	inertFlow: measured({
 		...{ quantity: 'volume-flow-normal-wet', symbol: 'Q_I', from: 'reading' },
+		label: 'Inert gas flow',
 		means: 'inert gas that enters, by its own meter; never the flow that circulates',
 	}),
 	meter: shaped(meterSchema, {
 		...{ quantity: 'tag and medium', from: 'plant' },
+		label: 'Its meter',
 		means: 'the meter that reads this flow; its medium has to be "inert gas"',
+		parts: METER_PARTS,
 	}),
-	outlet: shaped(v.string(), { quantity: 'text', means: 'where the gas leaves', from: 'plant' }),
+	outlet: shaped(v.string(), { quantity: 'text', label: 'Outlet', means: 'where the gas leaves', from: 'plant' }),
 	gas: withDefault(
-		choice(['nitrogen', 'carbon dioxide', 'other'], { means: 'the inert gas', from: 'plant' }),
+		choice(['nitrogen', 'carbon dioxide', 'other'], { label: 'Inert gas', means: 'the inert gas', from: 'plant' }),
 		'nitrogen',
 	),
 	inertOxygen: measured({
 		...{ quantity: 'oxygen-wet', symbol: 'Ci', from: 'plant', ...OXYGEN_RANGE },
+		label: 'Oxygen in the inert gas',
 		means: 'oxygen in the inert gas; an inert gas generator is no pure nitrogen',
 	}),
 	startOxygen: withDefault(
 		measured({
 			...{ quantity: 'oxygen-wet', symbol: 'C0', from: 'reading', ...OXYGEN_RANGE },
+			label: 'Oxygen at the start',
 			means: 'oxygen in the circuit at the start',
 		}),
 		OXYGEN_IN_AIR,
 	),
 	target: measured({
 		...{ quantity: 'oxygen-wet', symbol: 'Ct', from: 'procedure', ...OXYGEN_RANGE },
+		label: 'Oxygen limit',
 		means: 'limit that every place has to be below',
 	}),
 	guard: withDefault(
 		measured({
 			...{ quantity: 'fraction', from: 'procedure', ...OXYGEN_RANGE },
+			label: 'Guard',
+			typedIn: '%',
 			means: 'kept between the readings and the limit',
 		}),
 		0,
 	),
 	mixing: measured({
 		...{ quantity: 'fraction', symbol: 'K', from: 'site', min: 0, max: 1 },
+		label: 'Mixing factor',
 		means: 'mixing factor, applied once: the part of the inert gas that takes part in the exchange',
 	}),
 	mixingFrom: withDefault(
-		choice(['assumed', 'measured fit'], { means: 'where the mixing factor comes from', from: 'site' }),
+		choice(['assumed', 'measured fit'], {
+			label: 'Mixing factor from',
+			means: 'where the mixing factor comes from',
+			from: 'site',
+		}),
 		'assumed',
 	),
 	leak: optional(leak),
 	suction: optional(
 		measured({
 			...{ quantity: 'pressure-difference', from: 'reading', min: 0 },
+			label: 'Suction in this purge',
 			means: 'suction in the circuit during this purge, below the atmosphere',
 		}),
 	),
 	minimumVolumeChanges: optional(
-		measured({ quantity: 'number', means: 'least volume changes, whatever the formula says', from: 'site', min: 0 }),
+		measured({
+			quantity: 'number',
+			label: 'Least volume changes',
+			means: 'least volume changes, whatever the formula says',
+			from: 'site',
+			min: 0,
+		}),
 	),
 	stock: optional(
 		measured({
 			...{ quantity: 'volume-normal', from: 'reading', min: 0 },
+			label: 'Usable stock',
 			means: 'usable inert gas in stock, on the low side',
 		}),
 	),
 	reserve: withDefault(
-		measured({ quantity: 'volume-normal', means: 'emergency reserve, counted apart', from: 'site', min: 0 }),
+		measured({
+			quantity: 'volume-normal',
+			label: 'Emergency reserve',
+			means: 'emergency reserve, counted apart',
+			from: 'site',
+			min: 0,
+		}),
 		0,
 	),
 	limitingOxygen: optional(
 		measured({
 			...{ quantity: 'oxygen-wet', symbol: 'LOC', from: 'plant', ...OXYGEN_RANGE },
+			label: 'Limiting oxygen',
 			means: 'limiting oxygen concentration of this fuel with this inert gas, by test',
 		}),
 	),
 	oxygenTrip: withDefault(
 		choice(['not proved', 'proved'], {
 			...{ from: 'procedure' },
+			label: 'Oxygen trip',
 			means: 'whether oxygen is monitored continuously with a proved trip',
 		}),
 		'not proved',
@@ -122,6 +165,8 @@ export const sweepFields = {
 	unburntGas: optional(
 		measured({
 			...{ quantity: 'fraction', from: 'reading', min: 0, max: 1 },
+			label: 'Unburnt gas',
+			typedIn: '%',
 			means: 'CO, H2 and CH4 together that can be in the circuit',
 		}),
 	),

@@ -12,6 +12,7 @@ import { refuseMeter } from './shared-inputs';
 import { sweepFields, sweepOutputs, type SweepInputs } from './sweep-inputs';
 import { sweepPlan, type SweepPlan } from './sweep-plan';
 import { sweepWarnings } from './sweep-warnings';
+import { SWEEP_PAGE } from './sweep-page';
 
 /**
  * Planning twin of the purge: how long, with how much inert gas, and whether at all.
@@ -39,6 +40,7 @@ export const sweepPurge = defineCalculator({
 	],
 	outputs: sweepOutputs,
 	fields: sweepFields,
+	page: SWEEP_PAGE,
 	compute,
 });
 

@@ -56,6 +56,7 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'app.origin.entries': '{n} Werte',
 	'app.today': 'Heute',
 	'app.start-ups': 'Anfahren',
+	'app.calculators': 'Rechner',
 	'app.people': 'Personen',
 	'app.archive': 'Archiv',
 	'app.saved': 'Auf diesem Tablet gespeichert {at}',

@@ -1,7 +1,10 @@
+import { CALCULATOR_NOTES } from './calculator-notes';
+
 import type { NOTES as EN } from '../en/notes';
 
 /** Hinweise der Rechner als Sätze; Platzhalter wie im Englischen. */
 export const NOTES: { readonly [key in keyof typeof EN]: string } = {
+	...CALCULATOR_NOTES,
 	'note.not-covered': '{volume} {title} ist nicht abgedeckt.',
 	'note.covered-by-unknown-place':
 		'{volume} {title} soll durch {place} abgedeckt sein; diese Stelle gehört nicht zu den Messstellen.',

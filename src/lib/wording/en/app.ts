@@ -47,6 +47,7 @@ export const APP = {
 	'app.origin.entries': '{n} values',
 	'app.today': 'Today',
 	'app.start-ups': 'Start-ups',
+	'app.calculators': 'Calculators',
 	'app.people': 'People',
 	'app.archive': 'Archive',
 	'app.saved': 'Saved on this tablet {at}',

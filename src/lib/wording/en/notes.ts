@@ -1,9 +1,12 @@
+import { CALCULATOR_NOTES } from './calculator-notes';
+
 /**
  * What calculators note, as sentences. A placeholder may say how its fact is shown: `{last:%}` a fraction as percent,
  * `{t:clock}` a moment of the series, `{held:time}` a duration, `{leak:flow}` m3(n)/h, `{gas:m3n}` m3(n), `{T:degC}`, `{p:mbar}`.
  * A note without a sentence here is said as its name and facts.
  */
 export const NOTES = {
+	...CALCULATOR_NOTES,
 	'note.not-covered': '{volume} {title} is not covered.',
 	'note.covered-by-unknown-place': '{volume} {title} is said to be covered by {place}, which is not among the places.',
 	'note.place-reads-another-volume': '{place} reads {reads}, not {volume} {title}.',
