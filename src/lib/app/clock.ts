@@ -18,3 +18,6 @@ export const systemClock: Clock = {
 		return () => clearTimeout(timer);
 	},
 };
+
+/** Minutes east of UTC that this machine keeps at a moment. */
+export const localOffset = (at: number): number => -new Date(at).getTimezoneOffset();

@@ -11,6 +11,13 @@ export type Problem =
 	| SeriesError
 	| TrendError
 	| ResumeCodeError
+	/** What was typed about a new site is not complete. */
+	| { readonly kind: 'site-incomplete'; readonly n: number }
+	/** The identity room refused a key or a certificate of a new site. */
+	| { readonly kind: 'site-refused'; readonly because: string }
+	| { readonly kind: 'no-right'; readonly person: string; readonly roles: readonly string[] }
+	| { readonly kind: 'no-plant' }
+	| { readonly kind: 'plant-refused'; readonly at: string }
 	/** The tablet holds no site and no people yet. */
 	| { readonly kind: 'no-site' }
 	| { readonly kind: 'nobody-chosen' }

@@ -14,6 +14,7 @@ export function sayProblem(problem: Problem, say: Say): string {
 		case 'no-gate-key':
 		case 'destroyed':
 		case 'no-site':
+		case 'no-plant':
 		case 'nobody-chosen':
 		case 'sheet-changed':
 		case 'weak-wrap':
@@ -70,6 +71,14 @@ export function sayProblem(problem: Problem, say: Say): string {
 			return say('problem.start-up-unreadable', { startUp: problem.startUp, what: problem.what });
 		case 'refused-act':
 			return say('problem.refused-act', { because: problem.because.join('; ') });
+		case 'site-incomplete':
+			return say('problem.site-incomplete', { n: problem.n });
+		case 'site-refused':
+			return say('problem.site-refused', { because: problem.because });
+		case 'no-right':
+			return say('problem.no-right', { person: problem.person, roles: problem.roles.join(', ') });
+		case 'plant-refused':
+			return say('problem.plant-refused', { at: problem.at });
 		case 'demonstration-stopped':
 			return say('problem.demonstration-stopped', { because: problem.because });
 		default:

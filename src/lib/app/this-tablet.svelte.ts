@@ -6,30 +6,39 @@ import { playDemonstration, type ReadFile } from './demonstration';
 import { OpenStartUp } from './open-start-up.svelte';
 import type { Problem } from './problem';
 import { Tablet } from './tablet.svelte';
+import { OWN_SITE, shownStorage } from './which-storage';
 
 /** The app as it runs in this tab: the storage, the tablet once it has a site, and the start-ups that are open. */
 export class ThisTablet {
 	readonly store: Store;
 	readonly clock: Clock;
+	/** Whether what is shown is the tablet's own site, and no demonstration. */
+	readonly isOwn: boolean;
 	#tablet = $state.raw<Tablet>();
 	#startUps = $state.raw<readonly StartUp[]>([]);
 	#closed = $state.raw(false);
 	readonly #open: Record<string, Promise<Result<OpenStartUp, Problem>>> = {};
 
-	private constructor(store: Store, clock: Clock) {
+	private constructor(store: Store, clock: Clock, isOwn: boolean) {
+		this.isOwn = isOwn;
 		this.store = store;
 		this.clock = clock;
 		store.onClosed(() => (this.#closed = true));
 	}
 
-	static async open(clock: Clock): Promise<Result<ThisTablet, StorageError>> {
-		const store = await openStore('gatehold', { now: printInstant(clock.now(), 0) });
-		return store.ok ? ok(await ThisTablet.on(store.value, clock)) : store;
+	/** @param memory remembers which of a tablet's storages is shown: the demonstration's, or that of a site of its own */
+	static async open(
+		clock: Clock,
+		memory: Pick<Storage, 'getItem' | 'setItem'>,
+	): Promise<Result<ThisTablet, StorageError>> {
+		const storage = shownStorage(memory);
+		const store = await openStore(storage, { now: printInstant(clock.now(), 0) });
+		return store.ok ? ok(await ThisTablet.on(store.value, clock, storage === OWN_SITE)) : store;
 	}
 
 	/** On a storage that is open. */
-	static async on(store: Store, clock: Clock): Promise<ThisTablet> {
-		const here = new ThisTablet(store, clock);
+	static async on(store: Store, clock: Clock, isOwn = false): Promise<ThisTablet> {
+		const here = new ThisTablet(store, clock, isOwn);
 		await here.lookAgain();
 		return here;
 	}

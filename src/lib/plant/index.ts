@@ -19,3 +19,4 @@ export type { PlantFinding } from './finding';
 export { calibrationEnds, isInCalibration } from './calibration';
 export { differenceOf } from './difference';
 export { changedPoints, copyOf, itemsWithValues, replacedBy, type ValueList } from './copied';
+export { objectionToValue, valuesOf, withValues, type PlantValue, type ValueObjection } from './values';

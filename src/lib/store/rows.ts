@@ -1,5 +1,6 @@
 import type { Json } from '../base';
 import type { GateKey, ResumeCode, SignedTrustList, SigningKey, SiteRootFile, Tries } from '../identity';
+import type { Plant } from '../plant';
 
 /** A photo or trend file, named by its bytes; the shape in which events carry it. */
 export type Attachment = {
@@ -62,6 +63,10 @@ export type SiteValues = {
 	readonly 'root certificate': Uint8Array<ArrayBuffer>;
 	readonly 'trust list': SignedTrustList;
 	readonly tablet: Tablet;
+	/** The unit of this site as it was approved last; the record pins it by its hash. */
+	readonly plant: Plant;
+	/** The revision that is being approved: put in place of the other once its event is written. */
+	readonly 'next plant': Plant;
 	readonly settings: { readonly [name: string]: Json };
 	readonly 'last copy': Copy;
 	/** Made with the database; a database without it, on a tablet that remembers one, was erased. */

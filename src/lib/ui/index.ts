@@ -68,3 +68,6 @@ export { default as PurgeSheet } from './pages/PurgeSheet.svelte';
 export { default as StorageHealth } from './pages/StorageHealth.svelte';
 export type { StorageLine } from './pages/storage-line';
 export { default as VerifyReport } from './pages/VerifyReport.svelte';
+
+export { default as PersonForm } from './site/PersonForm.svelte';
+export { default as PlantItem } from './site/PlantItem.svelte';

@@ -1,4 +1,5 @@
 import { APP } from './de/app';
+import { BEGIN } from './de/begin';
 import { CHAPTERS } from './de/chapters';
 import { CLOSING } from './de/closing';
 import { COVER } from './de/cover';
@@ -7,6 +8,8 @@ import { FINDINGS } from './de/findings';
 import { GATES } from './de/gates';
 import { NOTES } from './de/notes';
 import { PEOPLE } from './de/people';
+import { OPEN } from './de/open';
+import { PLANT } from './de/plant';
 import { SCREEN_ACTS } from './de/screen-acts';
 import { SCREEN_CALCULATORS } from './de/screen-calculators';
 import { SCREEN_FRAME } from './de/screen-frame';
@@ -55,4 +58,7 @@ export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...SCREEN_PAGES,
 	...SETTINGS,
 	...SCREEN_CALCULATORS,
+	...BEGIN,
+	...OPEN,
+	...PLANT,
 };

@@ -1,4 +1,5 @@
 import { APP } from './en/app';
+import { BEGIN } from './en/begin';
 import { CHAPTERS } from './en/chapters';
 import { CLOSING } from './en/closing';
 import { COVER } from './en/cover';
@@ -7,6 +8,8 @@ import { FINDINGS } from './en/findings';
 import { GATES } from './en/gates';
 import { NOTES } from './en/notes';
 import { PEOPLE } from './en/people';
+import { OPEN } from './en/open';
+import { PLANT } from './en/plant';
 import { SCREEN_ACTS } from './en/screen-acts';
 import { SCREEN_FRAME } from './en/screen-frame';
 import { SCREEN_CALCULATORS } from './en/screen-calculators';
@@ -41,4 +44,7 @@ export const EN = {
 	...SCREEN_PAGES,
 	...SETTINGS,
 	...SCREEN_CALCULATORS,
+	...BEGIN,
+	...OPEN,
+	...PLANT,
 } as const;

@@ -25,6 +25,16 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 		'Der gespeicherte Schlüssel ist beschädigt und wurde nicht geöffnet. Sein Inhaber muss neu aufgenommen werden.',
 	'problem.wait': 'Zu viele falsche PINs. {time} warten; es bleiben {left} Versuche.',
 	'problem.wrong-pin': 'Diese PIN ist falsch. Es bleiben {left} Versuche. Es wurde nichts unterschrieben.',
+	'problem.no-plant':
+		'Dieses Tablet kennt noch keine Anlagenbeschreibung. Sehen Sie die Vorführung an oder beginnen Sie ein eigenes Werk.',
+	'problem.site-incomplete':
+		'Das Werk wurde nicht angelegt: {n} Angaben fehlen oder stimmen nicht. Es wurde nichts aufbewahrt.',
+	'problem.site-refused':
+		'Das Werk wurde nicht angelegt ({because}). Damit kann nichts unterschrieben worden sein; beginnen Sie neu.',
+	'problem.no-right':
+		'{person} darf das nicht unterschreiben. Gebraucht wird eine Rolle aus: {roles}. Es wurde nichts unterschrieben.',
+	'problem.plant-refused':
+		'Die Beschreibung wurde nicht genehmigt: {at} hat nicht die Form einer Anlagenbeschreibung. Was getippt war, ist noch da.',
 	'problem.no-site': 'Dieses Tablet gehört noch zu keinem Werk.',
 	'problem.nobody-chosen': 'Niemand hat dieses Tablet in der Hand. Erst sagen, wer es hat.',
 	'problem.not-enrolled-here': '{person} ist auf diesem Tablet nicht aufgenommen.',

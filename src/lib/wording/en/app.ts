@@ -20,6 +20,12 @@ export const APP = {
 	'problem.damaged-wrap': 'The stored key is damaged and was not opened. Its owner must be enrolled again.',
 	'problem.wait': 'Too many wrong PINs. Wait {time}; {left} tries are left.',
 	'problem.wrong-pin': 'That PIN is wrong. {left} tries are left. Nothing was signed.',
+	'problem.no-plant': 'This tablet knows no plant description yet. See the demonstration, or start your own site.',
+	'problem.site-incomplete': 'The site was not made: {n} things are still missing or wrong. Nothing was kept.',
+	'problem.site-refused': 'The site was not made ({because}). Nothing can have been signed with it; begin again.',
+	'problem.no-right': '{person} may not sign this. It needs one of: {roles}. Nothing was signed.',
+	'problem.plant-refused':
+		'The description was not approved: {at} has not the shape of a plant description. What was typed is kept.',
 	'problem.no-site': 'This tablet belongs to no site yet.',
 	'problem.nobody-chosen': 'Nobody holds this tablet. Say who you are first.',
 	'problem.not-enrolled-here': '{person} is not enrolled on this tablet.',
