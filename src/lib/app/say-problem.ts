@@ -1,5 +1,5 @@
 import { unreachable } from '../base';
-import { duration, sayRefusal, sayTrendError, type Say } from '../wording';
+import { duration, sayObjection, sayRefusal, sayTrendError, sayWords, type Say } from '../wording';
 import type { Problem } from './problem';
 
 /** What happened, what is safe, what to do: one sentence or two for every problem. */
@@ -70,13 +70,13 @@ export function sayProblem(problem: Problem, say: Say): string {
 		case 'start-up-unreadable':
 			return say('problem.start-up-unreadable', { startUp: problem.startUp, what: problem.what });
 		case 'refused-act':
-			return say('problem.refused-act', { because: problem.because.join('; ') });
+			return say('problem.refused-act', { because: problem.because.map((one) => sayObjection(one, say)).join('; ') });
 		case 'site-incomplete':
 			return say('problem.site-incomplete', { n: problem.n });
 		case 'site-refused':
 			return say('problem.site-refused', { because: problem.because });
 		case 'no-right':
-			return say('problem.no-right', { person: problem.person, roles: problem.roles.join(', ') });
+			return say('problem.no-right', { person: problem.person, roles: sayWords(problem.roles, say) });
 		case 'plant-refused':
 			return say('problem.plant-refused', { at: problem.at });
 		case 'demonstration-stopped':

@@ -1,6 +1,6 @@
-/** The three looks of every screen and the words that choose them: day, a dark control room, sun on the glass. */
-export const LOOKS = { day: 'Day', night: 'Night', glare: 'Glare' } as const;
+/** The three looks of every screen: day, a dark control room, sun on the glass. */
+export const LOOKS = ['day', 'night', 'glare'] as const;
 
-export type Look = keyof typeof LOOKS;
+export type Look = (typeof LOOKS)[number];
 
-export const isLook = (text: unknown): text is Look => typeof text === 'string' && Object.hasOwn(LOOKS, text);
+export const isLook = (text: unknown): text is Look => LOOKS.includes(text as Look);

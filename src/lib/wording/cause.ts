@@ -2,6 +2,7 @@ import { unreachable } from '../base';
 import type { Cause } from '../record';
 import type { Moments } from './moment';
 import type { Say } from './say';
+import { sayWord } from './word';
 
 /** What a sentence needs to know of the procedure and the plant, to name things as people do. */
 export type Names = {
@@ -36,11 +37,11 @@ export function sayCause(cause: Cause, say: Say, moments: Moments, names: Names)
 		case 'measuring point changed':
 			return say('cause.measuring point changed', { point: cause.point });
 		case 'outcome':
-			return say('cause.outcome', { outcome: cause.outcome });
+			return say('cause.outcome', { outcome: sayWord(cause.outcome, say) });
 		case 'rows missing':
 			return say('cause.rows missing', { rows: cause.rows.join(', ') });
 		case 'condition':
-			return say('cause.condition', { condition: names.permissive(cause.permissive), value: cause.value });
+			return say('cause.condition', { condition: names.permissive(cause.permissive), value: sayWord(cause.value, say) });
 		case 'not agreed':
 			return say('cause.not agreed');
 		case 'not proved':

@@ -21,6 +21,7 @@ import { SCREEN_STEPS } from './de/screen-steps';
 import { SETTINGS } from './de/settings';
 import { STATEMENTS } from './de/statements';
 import { STATES } from './de/states';
+import { WORDS } from './de/words';
 import type { EN } from './en';
 
 /**
@@ -61,4 +62,5 @@ export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...BEGIN,
 	...OPEN,
 	...PLANT,
+	...WORDS,
 };

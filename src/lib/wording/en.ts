@@ -21,6 +21,7 @@ import { SCREEN_STEPS } from './en/screen-steps';
 import { SETTINGS } from './en/settings';
 import { STATEMENTS } from './en/statements';
 import { STATES } from './en/states';
+import { WORDS } from './en/words';
 
 /** English. Every message under a key that says where it stands; another language has the same keys. */
 export const EN = {
@@ -47,4 +48,5 @@ export const EN = {
 	...BEGIN,
 	...OPEN,
 	...PLANT,
+	...WORDS,
 } as const;

@@ -17,6 +17,7 @@ export {
 	type Say,
 } from './say';
 export { duration, momentsAt, type Moments } from './moment';
+export { sayObjection, sayWord, sayWords } from './word';
 export { sayCause, type Names } from './cause';
 export { sayNote, sayNumber, withMark, type SeriesClock } from './note';
 export { purgeSentence } from './purge-sentence';

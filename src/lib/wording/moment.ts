@@ -30,7 +30,8 @@ export function momentsAt(utcOffsetMinutes: number, say: Say): Moments {
 
 function dayOf(local: string, say: Say, form: 'short' | 'long'): string {
 	const month = say(`month.${local.slice(5, 7)}` as Key);
-	return `${Number(local.slice(8, 10))}\u00a0${form === 'short' ? Array.from(month).slice(0, 3).join('') : month}`;
+	const day = Number(local.slice(8, 10));
+	return say('moment.day', { day, month: form === 'short' ? Array.from(month).slice(0, 3).join('') : month });
 }
 
 /** "6 min 40 s", "2 h 5 min": two units at most, none of them zero unless all are. */

@@ -2,6 +2,7 @@ import type { Json } from '../base';
 import type { CalcNote } from '../calc';
 import { fromSi, shownUnit, type QuantityName } from '../quantity';
 import { duration, type Moments } from './moment';
+import { sayWord } from './word';
 import { capitalised, isKey, LANGUAGES, type Say } from './say';
 import { printInstant, millis } from '../record';
 
@@ -65,7 +66,7 @@ function plainly(kind: string, facts: { readonly [name: string]: Json }, say: Sa
 
 function sayFact(value: Json, say: Say): string {
 	if (typeof value === 'number') return sayNumber(value, say);
-	if (typeof value === 'string') return value;
+	if (typeof value === 'string') return sayWord(value, say);
 	if (typeof value === 'boolean' || value === null) return String(value);
 	if (Array.isArray(value)) return value.map((part: Json) => sayFact(part, say)).join(', ');
 	return Object.entries(value)

@@ -5,18 +5,19 @@ import type { ConditionFinding, ProcedureFinding } from '../procedure';
 import type { NumberError, QuantityError } from '../quantity';
 import type { EventError, TrendError } from '../record';
 import { sayNote } from './note';
+import { sayWord } from './word';
 import { asksFor, isKey, type Facts, type Key, type Say } from './say';
 
 /** Each says what is wrong and where, as the end of a sentence: app and command line put it where they need it. */
 export const sayJsonError = (error: JsonError, say: Say): string => say(`json.${error.kind}`, factsOf(error));
 
 export const sayShapeError = (error: ShapeError, say: Say): string =>
-	say(`shape.${error.kind}`, { ...factsOf(error), path: error.path === '' ? 'the document' : error.path });
+	say(`shape.${error.kind}`, { ...factsOf(error), path: error.path === '' ? say('word.the document') : error.path });
 
 export const sayEventError = (error: EventError, say: Say): string =>
 	say(`event.${error.kind}`, {
 		...factsOf(error),
-		...(error.kind === 'not-an-event' && error.path === '' ? { path: 'the whole of it' } : {}),
+		...(error.kind === 'not-an-event' && error.path === '' ? { path: say('word.the whole of it') } : {}),
 	});
 
 export const sayTrendError = (error: TrendError, say: Say): string => say(`trend.${error.kind}`, factsOf(error));
@@ -33,7 +34,7 @@ export function sayPlantFinding(finding: PlantFinding, say: Say): string {
 }
 
 export function sayProcedureFinding(finding: ProcedureFinding, say: Say): string {
-	const place = finding.step === undefined ? finding.path : `${finding.path} (step ${finding.step})`;
+	const place = finding.step === undefined ? finding.path : `${finding.path} (${say('problem.of step', { step: finding.step })})`;
 	return `${place}: ${sayWhat(finding, say)}`;
 }
 
@@ -54,7 +55,7 @@ function sayWhat(finding: ProcedureFinding, say: Say): string {
 	}
 	if (!('name' in finding) || !finding.kind.startsWith('unknown-'))
 		return say(`procedure.${finding.kind}` as Key, factsOf(finding));
-	const facts = { ...factsOf(finding), thing: finding.kind.slice('unknown-'.length).replace('-', ' ') };
+	const facts = { ...factsOf(finding), thing: sayWord(finding.kind.slice('unknown-'.length).replace('-', ' '), say) };
 	return say('known' in finding ? 'procedure.unknown-name' : 'procedure.unknown-name alone', facts);
 }
 
@@ -66,15 +67,15 @@ export function sayRefusal(refusal: Refusal, say: Say): string {
 	const { kind, input, ...facts } = refusal;
 	const at = input === undefined ? '' : `${input}: `;
 	const key = [`refusal.${kind}`, `quantity.${kind}`].find(isKey);
-	const known = { ...factsOf(facts), range: rangeOf(refusal) };
+	const known = { ...factsOf(facts), range: rangeOf(refusal, say) };
 	if (key !== undefined && asksFor(key).every((name) => Object.hasOwn(known, name))) return at + say(key, known);
 	return at + sayNote({ kind, level: 'reason', ...definedFacts(facts) }, say);
 }
 
-function rangeOf({ min, max, unit }: Refusal): string {
+function rangeOf({ min, max, unit }: Refusal, say: Say): string {
 	const bound = (word: string, value: unknown): readonly string[] =>
 		typeof value === 'number' ? [`${word} ${value} ${typeof unit === 'string' ? unit : ''}`.trimEnd()] : [];
-	return [...bound('at least', min), ...bound('at most', max)].join(', ');
+	return [...bound(say('word.at least'), min), ...bound(say('word.at most'), max)].join(', ');
 }
 
 const definedFacts = (facts: Omit<Refusal, 'kind'>): { readonly [fact: string]: NonNullable<Refusal[string]> } =>

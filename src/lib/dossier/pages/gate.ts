@@ -5,7 +5,7 @@ import { facts } from '../layout/facts';
 import { STYLES, type Flow } from '../layout/flow';
 import { table } from '../layout/table';
 import { wrap } from '../layout/wrap';
-import { capitalised } from '../../wording';
+import { capitalised, sayWords } from '../../wording';
 import { linesOf } from '../story/act-lines';
 import { releasesOf } from '../story/releases';
 import type { Act, Story } from '../story/story';
@@ -40,7 +40,7 @@ function actOf(flow: Flow, story: Story, act: Act): void {
 	);
 	facts(flow, [
 		{ label: say('gate.person'), value: names.person(event.person) },
-		{ label: say('gate.role'), value: names.roles(event.person).join(', ') },
+		{ label: say('gate.role'), value: sayWords(names.roles(event.person), say) },
 		{
 			label: say('gate.meaning'),
 			value: event.body.meaning ?? (isRelease ? say('gate.meaning.released') : say('gate.meaning.refused')),

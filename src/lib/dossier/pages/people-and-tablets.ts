@@ -1,5 +1,6 @@
 import { allOf, headCode, headsOf } from '../../record';
 import { STYLES, type Flow } from '../layout/flow';
+import { sayWords } from '../../wording';
 import { table } from '../layout/table';
 import type { Story } from '../story/story';
 
@@ -29,7 +30,7 @@ function people(flow: Flow, { say, names, opened, events }: Story): void {
 			cells: [
 				names.person(person),
 				person,
-				roles.join(', '),
+				sayWords(roles, say),
 				String(events.filter((event) => event.person === person).length),
 			],
 		})),

@@ -1,5 +1,6 @@
 import { lettering } from '../../drawing';
 import { STYLES, type Flow } from '../layout/flow';
+import { sayWord, sayWords } from '../../wording';
 import { table } from '../layout/table';
 import type { Story } from '../story/story';
 import type { Manifest } from '../manifest';
@@ -10,7 +11,7 @@ export function signatures(flow: Flow, story: Story, manifest: Manifest): void {
 	flow.newSheet(say('sign.sheet'));
 	flow.head(say('sign.caption'), say('sign.sheet'));
 	for (const { field, meaning, roles } of input.signatures) {
-		const title = say('sign.field', { meaning: say(`meaning.${meaning}`), roles: roles.join(` ${say('or')} `) });
+		const title = say('sign.field', { meaning: say(`meaning.${meaning}`), roles: roles.map((role) => sayWord(role, say)).join(` ${say('or')} `) });
 		flow.block(FIELD + 24, ({ x, y, width }) => {
 			flow.addField({ name: field, title, box: { x, y: y + 16, width, height: FIELD } });
 			return [lettering(title, { x, y: y + 11 }, { size: 9.4, voice: 'strong' })];
@@ -35,9 +36,9 @@ export function signatures(flow: Flow, story: Story, manifest: Manifest): void {
 				String(event.body.gate),
 				event.kind === 'gate refused'
 					? say('gate.meaning.refused')
-					: (event.body.meaning ?? say('gate.meaning.released')),
+					: sayWord(event.body.meaning ?? 'released', say),
 				story.names.person(event.person),
-				story.names.roles(event.person).join(', '),
+				sayWords(story.names.roles(event.person), say),
 				story.moments.short(event.observed ?? event.entered),
 				event.body.statement?.code ?? '–',
 			],

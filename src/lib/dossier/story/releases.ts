@@ -1,3 +1,4 @@
+import { sayWords } from '../../wording';
 import type { Story } from './story';
 
 /** How each gate was released last, for the ladder and the list of hold points. */
@@ -29,10 +30,10 @@ export function releasesOf(story: Story): readonly Release[] {
 			.map(({ event }) => ({
 				person: names.person(event.person),
 				roles:
-					names
-						.roles(event.person)
-						.filter((role) => wanted.includes(role))
-						.join(', ') || names.roles(event.person).join(', '),
+					sayWords(
+						names.roles(event.person).filter((role) => wanted.includes(role)),
+						say,
+					) || sayWords(names.roles(event.person), say),
 				device: event.device,
 				at: event.observed ?? event.entered,
 				code: event.body.statement?.code,

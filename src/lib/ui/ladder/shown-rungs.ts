@@ -1,7 +1,7 @@
 import { rungsOf, type Contact, type Rung } from '../../drawing';
 import type { Procedure, Step } from '../../procedure';
 import type { GateStanding, Standing, StepStanding } from '../../record';
-import type { Moments, Say } from '../../wording';
+import { sayWord, type Moments, type Say } from '../../wording';
 import { passes, type CoilState, type ContactState } from './states';
 
 export type ShownContact = {
@@ -65,7 +65,7 @@ type Around = {
 };
 
 function wordOf(contact: Contact, state: ContactState, { steps, standing, say, moments }: Around): string {
-	if (contact.of === 'permissive') return contact.word === 'unknown' ? say('ui.undecided') : contact.word;
+	if (contact.of === 'permissive') return contact.word === 'unknown' ? say('ui.undecided') : sayWord(contact.word, say);
 	if (contact.of === 'gate') return say(`ui.coil.${contact.word as CoilState}`);
 	if (state === 'blocks') return say('ui.blocks');
 	if (state === 'failed') return say('state.failed');
@@ -120,7 +120,7 @@ export function stopsAt(unit: string, rungs: readonly ShownRung[], say: Say): st
 	const open = rung.contacts.find(({ state }) => !passes(state));
 	if (open === undefined) return say('ui.stops.gate', { unit, gate: rung.gate });
 	if (open.of === 'deviation') return say('ui.stops.deviation', { unit, gate: rung.gate, what: open.label });
-	return say('ui.stops', { unit, gate: rung.gate, what: lowered(open.label) });
+	return say('ui.stops', { unit, gate: rung.gate, what: say.language === 'en' ? lowered(open.label) : open.label });
 }
 
 /** In the middle of a sentence; a word in capitals, such as a tag, keeps them. */

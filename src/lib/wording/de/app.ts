@@ -107,6 +107,9 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'app.disposition reason': 'Was getan und gesehen wurde',
 	'app.disposition does': 'Entscheidung unterschreiben',
 	'app.nothing': 'nichts',
+	'app.nothing here': 'Unter dieser Adresse ist nichts',
+	'app.not shown': 'Diese Seite konnte nicht gezeigt werden',
+	'app.to first page': 'zur ersten Seite',
 	'app.hand-over': 'die Übergabe',
 	'app.storage closed':
 		'Der Speicher wurde unter diesem Tab geschlossen. Das Gespeicherte ist sicher; die Seite neu laden.',

@@ -75,6 +75,7 @@ export const STATES: { readonly [key in keyof typeof EN]: string } = {
 	'cause.condition': 'Bedingung „{condition}“ war {value}',
 	'cause.not agreed': 'entfällt, und keine freigebende Rolle hat zugestimmt',
 	'cause.not proved': 'niemand hatte ihn nachgewiesen',
+	'moment.day': '{day}.\u00a0{month}',
 	'month.01': 'Januar',
 	'month.02': 'Februar',
 	'month.03': 'März',

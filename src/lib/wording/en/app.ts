@@ -94,6 +94,9 @@ export const APP = {
 	'app.disposition reason': 'What was done and seen',
 	'app.disposition does': 'Sign the disposition',
 	'app.nothing': 'nothing',
+	'app.nothing here': 'There is nothing at this address',
+	'app.not shown': 'This page could not be shown',
+	'app.to first page': 'to the first page',
 	'app.hand-over': 'the hand-over',
 	'app.storage closed': 'The storage was closed under this tab. What was saved is safe; load the page again.',
 } as const;

@@ -73,6 +73,7 @@ export const STATES = {
 	'cause.condition': 'condition "{condition}" was {value}',
 	'cause.not agreed': 'not applicable, and no releasing role has agreed',
 	'cause.not proved': 'nobody had proved it',
+	'moment.day': '{day}\u00a0{month}',
 	'month.01': 'January',
 	'month.02': 'February',
 	'month.03': 'March',
