@@ -31,9 +31,14 @@ const isMade = (key: string): boolean =>
 		return isWord(hole) || /^\d\d$/.test(hole);
 	});
 
+/** What the rules object is made in the record, in English, and found again by its message: the parts between its facts. */
+const isKept = (key: Key): boolean =>
+	key.startsWith('objection.') &&
+	LANGUAGES.en[key].split(/\{\w+\}/).every((part) => part.length < 3 || source.includes(part));
+
 describe('every message', () => {
 	test('is said somewhere', () => {
-		expect(KEYS.filter((key) => !isWord(key) && !isMade(key))).toEqual([]);
+		expect(KEYS.filter((key) => !isWord(key) && !isMade(key) && !isKept(key))).toEqual([]);
 	});
 
 	test('that the program says is in the catalogue', () => {

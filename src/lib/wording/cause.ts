@@ -41,7 +41,10 @@ export function sayCause(cause: Cause, say: Say, moments: Moments, names: Names)
 		case 'rows missing':
 			return say('cause.rows missing', { rows: cause.rows.join(', ') });
 		case 'condition':
-			return say('cause.condition', { condition: names.permissive(cause.permissive), value: sayWord(cause.value, say) });
+			return say('cause.condition', {
+				condition: names.permissive(cause.permissive),
+				value: sayWord(cause.value, say),
+			});
 		case 'not agreed':
 			return say('cause.not agreed');
 		case 'not proved':

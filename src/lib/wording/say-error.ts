@@ -34,7 +34,8 @@ export function sayPlantFinding(finding: PlantFinding, say: Say): string {
 }
 
 export function sayProcedureFinding(finding: ProcedureFinding, say: Say): string {
-	const place = finding.step === undefined ? finding.path : `${finding.path} (${say('problem.of step', { step: finding.step })})`;
+	const place =
+		finding.step === undefined ? finding.path : `${finding.path} (${say('problem.of step', { step: finding.step })})`;
 	return `${place}: ${sayWhat(finding, say)}`;
 }
 

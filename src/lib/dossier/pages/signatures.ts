@@ -11,7 +11,10 @@ export function signatures(flow: Flow, story: Story, manifest: Manifest): void {
 	flow.newSheet(say('sign.sheet'));
 	flow.head(say('sign.caption'), say('sign.sheet'));
 	for (const { field, meaning, roles } of input.signatures) {
-		const title = say('sign.field', { meaning: say(`meaning.${meaning}`), roles: roles.map((role) => sayWord(role, say)).join(` ${say('or')} `) });
+		const title = say('sign.field', {
+			meaning: say(`meaning.${meaning}`),
+			roles: roles.map((role) => sayWord(role, say)).join(` ${say('or')} `),
+		});
 		flow.block(FIELD + 24, ({ x, y, width }) => {
 			flow.addField({ name: field, title, box: { x, y: y + 16, width, height: FIELD } });
 			return [lettering(title, { x, y: y + 11 }, { size: 9.4, voice: 'strong' })];
@@ -34,9 +37,7 @@ export function signatures(flow: Flow, story: Story, manifest: Manifest): void {
 			...(judged?.counted === false ? { superseded: true as const } : {}),
 			cells: [
 				String(event.body.gate),
-				event.kind === 'gate refused'
-					? say('gate.meaning.refused')
-					: sayWord(event.body.meaning ?? 'released', say),
+				event.kind === 'gate refused' ? say('gate.meaning.refused') : sayWord(event.body.meaning ?? 'released', say),
 				story.names.person(event.person),
 				sayWords(story.names.roles(event.person), say),
 				story.moments.short(event.observed ?? event.entered),
