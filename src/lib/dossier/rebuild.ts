@@ -5,6 +5,7 @@ import type { DossierInput } from './input';
 import { parsePlant } from '../plant';
 import { parseProcedure } from '../procedure';
 import { allOf, parseEventLine } from '../record';
+import { isLanguage } from '../wording';
 
 type Bytes = Uint8Array<ArrayBuffer>;
 type Files = readonly { readonly name: string; readonly mediaType: string | undefined; readonly bytes: Bytes }[];
@@ -24,7 +25,7 @@ export async function rebuildDossier(files: Files): Promise<Bytes | undefined> {
 
 /** The part of the table of contents that a writer needs. */
 const ManifestSchema = v.object({
-	language: v.literal('en'),
+	language: v.pipe(v.string(), v.guard(isLanguage)),
 	writer: v.string(),
 	signatures: v.array(
 		v.strictObject({
