@@ -7,6 +7,8 @@ import {
 	beginShift,
 	calculate,
 	enter,
+	findingImpact,
+	handOverShift,
 	OpenStartUp,
 	playDemonstration,
 	recordPlantEvent,
@@ -15,6 +17,8 @@ import {
 	sheetOf,
 	suppliedTrend,
 	Tablet,
+	temporaryStates,
+	unconfirmedImpact,
 } from '../../src/lib/app';
 import { printInstant } from '../../src/lib/record';
 import { openStore, type Store } from '../../src/lib/store';
@@ -109,6 +113,46 @@ describe('the demonstration, taken up in the middle of its purge', () => {
 		const read = value(await store.events.readLog(id)).events.filter(({ device }) => device === 'T-1');
 		expect(read).toHaveLength(before + 2);
 		expect(new Set(read.map(({ number }) => number)).size).toBe(read.length);
+	});
+
+	test('before an instrument is signed as bad, the sheet says what falls with it and since when it was last good', async () => {
+		const startUp = await inShift('TechA');
+		const asFound = { error: '-0.6', unit: '%', tolerance: '0.2' };
+		const { impact, lastGood, values } = findingImpact(startUp, { instrument: 'AT-213', asFound }, clock.now());
+		const fallen = impact.steps.map(({ step }) => step);
+		expect(fallen).toContain('2.3');
+		expect(fallen).not.toContain('2.2');
+		const checked = startUp.log.find((event) => event.kind === 'entry' && event.body.step === '2.3');
+		expect(lastGood).toBe(checked?.observed ?? checked?.entered);
+		// 7.9 read by an analyser that reads 0.6 low was 8.5.
+		expect([...values.values()].flat()).toContainEqual(expect.objectContaining({ typed: '7,9', corrected: '8.5' }));
+		expect(stateOf(startUp, '2.3')).toBe('stands');
+	});
+
+	test('a shift is handed over by two PINs: both sign the same words, and who comes goes on without another PIN', async () => {
+		const startUp = await inShift('TechA');
+		const before = startUp.log.length;
+		const how = { comes: 'TechB', from: ['TechA'], to: ['TechB'], confirmed: true, summary: 'Purge goes on.' };
+		const pins = { goes: DEMONSTRATION_PIN, comes: '11223345' };
+		expect(await handOverShift(startUp, { ...how, pins })).toMatchObject({
+			error: { whose: 'comes', problem: { kind: 'wrong-pin' } },
+		});
+		expect(startUp.log).toHaveLength(before);
+		value(await handOverShift(startUp, { ...how, pins: { ...pins, comes: DEMONSTRATION_PIN } }));
+		const signed = startUp.log.flatMap((event) => (event.kind === 'shift hand-over' ? [event] : []));
+		expect(signed.map(({ person, body }) => [person, body.summary])).toEqual([
+			['TechA', 'Purge goes on.'],
+			['TechB', 'Purge goes on.'],
+		]);
+		expect(startUp.tablet.person?.person).toBe('TechB');
+		expect(startUp.entrySigner().ok).toBe(true);
+		expect(startUp.tablet.shifts.stateOf('TechA', id)).toBe('none');
+	});
+
+	test('a hand-over without confirming the temporary states would lapse the step that holds them', async () => {
+		const startUp = await inShift('TechA');
+		expect(temporaryStates(startUp).map((state) => state.id)).toEqual(['0.8']);
+		expect(unconfirmedImpact(startUp).steps.map(({ step }) => step)).toEqual(['0.8']);
 	});
 
 	test('with the supplied trend the purge is adequate, and Gate 2 is released by who performed none of its steps', async () => {

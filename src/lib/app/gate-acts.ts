@@ -99,19 +99,6 @@ export async function recordFinding(
 	return written.ok ? ok('signed') : written;
 }
 
-export async function handOver(
-	startUp: OpenStartUp,
-	how: { readonly pin: string } & BodyOf<'shift hand-over'>,
-): Promise<Result<'signed', Problem>> {
-	const { pin, ...body } = how;
-	const key = await openKey(startUp, pin);
-	if (!key.ok) return key;
-	const head = await signHead(startUp, 'hand-over', key.value);
-	if (!head.ok) return head;
-	const written = await startUp.write('shift hand-over', body, { key: key.value });
-	return written.ok ? ok('signed') : written;
-}
-
 export async function seal(startUp: OpenStartUp, pin: string, say: Say): Promise<Result<'signed', Problem>> {
 	const key = await openKey(startUp, pin);
 	if (!key.ok) return key;
@@ -139,7 +126,7 @@ export async function beginShift(startUp: OpenStartUp, pin: string, code?: strin
 	return key.ok ? beginShiftWith(startUp, key.value, resume?.value) : key;
 }
 
-async function beginShiftWith(
+export async function beginShiftWith(
 	startUp: OpenStartUp,
 	key: SigningKey,
 	chosen?: ResumeCode,
@@ -239,7 +226,7 @@ async function openKey(startUp: OpenStartUp, pin: string): Promise<Result<Signin
 }
 
 /** The tablet countersigns how far its chain has got, so that a cut tail is seen. */
-async function signHead(
+export async function signHead(
 	startUp: OpenStartUp,
 	why: BodyOf<'chain head'>['why'],
 	key: SigningKey,

@@ -33,7 +33,6 @@ export {
 	beginShift,
 	disposeDeviation,
 	goOn,
-	handOver,
 	newestCopy,
 	noteCopy,
 	recordFinding,
@@ -44,6 +43,9 @@ export {
 	type CopySaid,
 	type ShownSheet,
 } from './gate-acts';
+export { handOverShift, temporaryStates, unconfirmedImpact, type HandOver, type HandOverProblem } from './hand-over';
+export { findingImpact, type FindingImpact } from './finding';
+export { SheetDraft } from './sheet-draft.svelte';
 export { DEMONSTRATION_PIN, playDemonstration, suppliedTrend, type ReadFile } from './demonstration';
 export { shiftTimes } from './shift-times';
 export { nextStep, StepDesk, type TypedSoFar } from './step-desk.svelte';

@@ -47,6 +47,8 @@ export { default as RefusalAnswer } from './acts/RefusalAnswer.svelte';
 export { default as SigningSheet } from './acts/SigningSheet.svelte';
 export { default as DeviationSheet } from './acts/DeviationSheet.svelte';
 export { default as HappenedSheet } from './acts/HappenedSheet.svelte';
+export { default as FindingSheet } from './acts/FindingSheet.svelte';
+export { default as HandOverSheet } from './acts/HandOverSheet.svelte';
 export { default as PersonSwitch } from './acts/PersonSwitch.svelte';
 
 export { default as CalculatorList } from './calculators/CalculatorList.svelte';

@@ -6,6 +6,7 @@ import { COVER } from './de/cover';
 import { ERRORS } from './de/errors';
 import { FINDINGS } from './de/findings';
 import { GATES } from './de/gates';
+import { HAND_OVER } from './de/hand-over';
 import { NOTES } from './de/notes';
 import { PEOPLE } from './de/people';
 import { OPEN } from './de/open';
@@ -52,6 +53,7 @@ export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...SCREEN_FRAME,
 	...SCREEN_LINE,
 	...SCREEN_STEPS,
+	...HAND_OVER,
 	...PEOPLE,
 	...SCREEN_ACTS,
 	...SCREEN_LOG,

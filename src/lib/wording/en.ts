@@ -6,6 +6,7 @@ import { COVER } from './en/cover';
 import { ERRORS } from './en/errors';
 import { FINDINGS } from './en/findings';
 import { GATES } from './en/gates';
+import { HAND_OVER } from './en/hand-over';
 import { NOTES } from './en/notes';
 import { PEOPLE } from './en/people';
 import { OPEN } from './en/open';
@@ -38,6 +39,7 @@ export const EN = {
 	...SCREEN_FRAME,
 	...SCREEN_LINE,
 	...SCREEN_STEPS,
+	...HAND_OVER,
 	...PEOPLE,
 	...SCREEN_ACTS,
 	...SCREEN_LOG,

@@ -20,6 +20,7 @@ export { duration, momentsAt, type Moments } from './moment';
 export { sayObjection, sayWord, sayWords } from './word';
 export { sayCause, type Names } from './cause';
 export { sayNote, sayNumber, withMark, type SeriesClock } from './note';
+export { handOverSummary, type TemporaryState } from './hand-over';
 export { purgeSentence } from './purge-sentence';
 export {
 	sayConditionFinding,

@@ -1,8 +1,8 @@
 import * as v from 'valibot';
 import type { CalcResult } from '../../calc';
 import { MeasureSchema, type Measure } from '../../plant';
-import { fromSi, parseNumber, quantitiesIn, shownUnit, toSi } from '../../quantity';
-import { allOf, type Cause, type EventOf } from '../../record';
+import { fromSi, shownUnit } from '../../quantity';
+import { allOf, withErrorOff, type AsFoundError, type Cause, type EventOf } from '../../record';
 import { calculationOf } from './calculations';
 import { boundsOf } from './print';
 import type { Story } from './story';
@@ -20,12 +20,10 @@ export function rejudged(entryId: string, finding: Finding, story: Story): reado
 	return [...typedValues(entry, finding, found, story), ...calculatedValue(entry, finding, found, story)];
 }
 
-type AsFound = { readonly error: string; readonly unit: string };
-
 function typedValues(
 	{ body }: EventOf<'entry'>,
 	{ instrument }: Finding,
-	found: AsFound,
+	found: AsFoundError,
 	story: Story,
 ): readonly string[] {
 	const step = story.names.step(body.step);
@@ -43,7 +41,7 @@ function typedValues(
 function calculatedValue(
 	entry: EventOf<'entry'>,
 	{ instrument }: Finding,
-	found: AsFound,
+	found: AsFoundError,
 	story: Story,
 ): readonly string[] {
 	const result = calculationOf(entry);
@@ -61,7 +59,12 @@ function limitOf({ inputs }: CalcResult): Measure | undefined {
 
 type Rested = { readonly typed: string; readonly unit: string; readonly limit: Measure | undefined };
 
-function told({ typed, unit, limit }: Rested, instrument: string, found: AsFound, { say }: Story): readonly string[] {
+function told(
+	{ typed, unit, limit }: Rested,
+	instrument: string,
+	found: AsFoundError,
+	{ say }: Story,
+): readonly string[] {
 	const corrected = withErrorOff(typed, unit, found);
 	if (corrected === undefined) return [];
 	const facts = { typed, corrected, unit: shownUnit(unit), instrument };
@@ -71,24 +74,3 @@ function told({ typed, unit, limit }: Rested, instrument: string, found: AsFound
 			: say('gate.rejudged against', { ...facts, limit: String(limit.value) }),
 	];
 }
-
-function withErrorOff(typed: string, unit: string, { error, unit: errorUnit }: AsFound): string | undefined {
-	const [value, off] = [parseNumber(typed), parseNumber(error)];
-	if (!value.ok || !off.ok) return undefined;
-	const same = unit === errorUnit ? off.value : inUnit(error, errorUnit, unit);
-	if (same === undefined) return undefined;
-	const decimals = Math.max(decimalsOf(typed), decimalsOf(error));
-	return (value.value - same).toFixed(decimals).replace('-', '−');
-}
-
-/** An error in another unit of the same quantity. */
-function inUnit(value: string, from: string, to: string): number | undefined {
-	for (const quantity of quantitiesIn(from)) {
-		const si = toSi({ value, unit: from }, quantity);
-		const shown = si.ok ? fromSi(si.value.value, quantity, to) : si;
-		if (shown.ok) return shown.value;
-	}
-	return undefined;
-}
-
-const decimalsOf = (typed: string): number => /[.,](\d+)/.exec(typed)?.[1]?.length ?? 0;

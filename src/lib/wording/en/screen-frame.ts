@@ -6,6 +6,7 @@ export const SCREEN_FRAME = {
 	'ui.frame.lapsed': 'Lapsed',
 	'ui.frame.deviations': 'Deviations',
 	'ui.frame.log': 'Log',
+	'ui.frame.hand-over': 'Hand-over',
 	'ui.frame.happened': 'Something happened',
 	'ui.frame.about': 'About Gatehold',
 } as const;
