@@ -1,14 +1,22 @@
-import type { Page } from 'playwright-core';
+import type { Locator, Page } from 'playwright-core';
 import { DEMONSTRATION_PIN } from '../../src/lib/app';
 
 /** What people do on the app's screens, for every test that plays it in a browser. */
 
 const LOOKS_LONG = 120_000;
 
+const touched = new WeakSet<Page>();
+
+/** From now on this page is worked with a finger. */
+export const byTouch = (page: Page): void => void touched.add(page);
+
+/** One press of a button, with the mouse or with a finger. */
+export const press = (button: Locator): Promise<void> => (touched.has(button.page()) ? button.tap() : button.click());
+
 /** First open, one tap: the demonstration is played on this tablet and its line is shown. */
 export async function demonstration(page: Page, address: string): Promise<void> {
 	if (!page.url().startsWith(address)) await page.goto(address);
-	await page.getByRole('button', { name: 'Show the demonstration' }).click();
+	await press(page.getByRole('button', { name: 'Show the demonstration' }));
 	await page.getByRole('heading', { name: /stops at/ }).waitFor({ timeout: LOOKS_LONG });
 }
 
@@ -21,7 +29,7 @@ export async function go(page: Page, path: string): Promise<void> {
 		link.click();
 		link.remove();
 	}, path);
-	await page.waitForURL((url) => url.pathname === path);
+	await page.waitForURL((url) => url.pathname === path, { timeout: 5_000 });
 }
 
 /** The address of the start-up that the page shows. */
@@ -38,30 +46,29 @@ export async function toStep(page: Page, step: string): Promise<void> {
 
 export const toLine = (page: Page): Promise<void> => go(page, startUpOf(page));
 
-/** Two taps: the tablet changes hands; the page that was shown comes back. */
+/** Two taps: the tablet changes hands, on whatever page. */
 export async function takeTablet(page: Page, name: string): Promise<void> {
-	const { pathname } = new URL(page.url());
-	await go(page, '/people');
-	const take = page.getByRole('button', { name: `Take the tablet: ${name}` });
-	await page.getByRole('heading', { level: 1 }).waitFor();
-	if ((await take.count()) > 0) {
-		await take.click();
-		// The offer is gone once that person holds it; "holds the tablet" alone could be said of the one before.
-		await take.waitFor({ state: 'detached' });
-	}
-	await go(page, pathname);
+	const header = page.locator('header').first();
+	const holder = header.locator('.person:visible, .owner button:visible');
+	if ((await holder.count()) === 0) await press(header.getByRole('button', { name: 'Places' }));
+	const holds = holder.filter({ hasText: name });
+	if ((await holds.count()) > 0) return;
+	await press(holder);
+	await press(page.getByRole('region', { name: 'Who holds the tablet?' }).getByRole('button', { name }));
+	await header.getByText(name).first().waitFor({ state: 'attached' });
 }
 
 export async function beginShift(page: Page, pin: string = DEMONSTRATION_PIN): Promise<void> {
 	await page.getByLabel('PIN').first().fill(pin);
-	await page.getByRole('button', { name: 'Begin shift' }).click();
+	await press(page.getByRole('button', { name: 'Begin shift' }));
 }
 
-/** Begins the shift of whoever holds the tablet, where the page asks for it. */
+/** Begins the shift of whoever holds the tablet, or goes on with it, where the page asks for it. */
 export async function shiftIfAsked(page: Page): Promise<void> {
-	const begin = page.getByRole('button', { name: 'Begin shift' });
+	const begin = page.getByRole('button', { name: /^(Begin shift|Go on)$/ });
 	if (!(await begin.isVisible())) return;
-	await beginShift(page);
+	await page.getByLabel('PIN').first().fill(DEMONSTRATION_PIN);
+	await press(begin);
 	await begin.waitFor({ state: 'detached' });
 }
 
@@ -89,23 +96,23 @@ export async function onStep(page: Page, step: string, types: () => Promise<unkn
 
 export const confirmAll = async (page: Page): Promise<void> => {
 	const open = page.getByRole('checkbox', { checked: false });
-	for (let left = await open.count(); left > 0; left--) await open.first().click();
+	for (let left = await open.count(); left > 0; left--) await press(open.first());
 	await pressSave(page);
 };
 
 /** The one filled act of a step's sheet; what can still be taken back has a "Save now" of its own. */
 export const pressSave = (page: Page): Promise<void> =>
-	page.getByRole('article').getByRole('button', { name: /^Save/ }).click();
+	press(page.getByRole('article').getByRole('button', { name: /^Save/ }));
 
 /** The hold point's sheet, ready for a signature: without a copy, for a reason, and declared. */
 export async function declareWithoutCopy(page: Page, reason: string): Promise<void> {
-	await page.getByRole('button', { name: 'Release without' }).click();
+	await press(page.getByRole('button', { name: 'Release without' }));
 	await page.getByLabel('Why without a copy?').fill(reason);
-	await page.getByRole('button', { name: 'Go on without a copy' }).click();
+	await press(page.getByRole('button', { name: 'Go on without a copy' }));
 	await page.getByRole('checkbox').check();
 }
 
 export async function release(page: Page, gate: number, pin: string = DEMONSTRATION_PIN): Promise<void> {
 	await page.getByLabel('PIN').last().fill(pin);
-	await page.getByRole('button', { name: `Release Gate ${gate}` }).click();
+	await press(page.getByRole('button', { name: `Release Gate ${gate}` }));
 }
