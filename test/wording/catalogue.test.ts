@@ -41,6 +41,14 @@ describe('every message', () => {
 		expect(KEYS.filter((key) => !isWord(key) && !isMade(key) && !isKept(key))).toEqual([]);
 	});
 
+	test('stands in one file only: a key said twice would silently take the other one\u2019s words', () => {
+		const keys = [...readTree('src/lib/wording/en').values()].flatMap((file) =>
+			[...file.matchAll(/^\t(?:'([^']+)'|(\w+)):/gm)].map(([, quoted, bare]) => quoted ?? bare),
+		);
+		expect(keys.length).toBe(KEYS.length);
+		expect(keys.filter((key, i) => keys.indexOf(key) !== i)).toEqual([]);
+	});
+
 	test('that the program says is in the catalogue', () => {
 		const said = [...source.matchAll(/\bsay\(\s*'([^']+)'(?! in )/g)].map(([, key = '']) => key);
 		expect(said.length).toBeGreaterThan(200);

@@ -36,7 +36,7 @@ export const PEOPLE = {
 	'person.certificate later': 'Zertifikat beginnt {from}',
 	'person.take': 'Tablet übernehmen',
 	'person.all': 'Personen und Zertifikate',
-	'people.title': '{n} Personen unterschreiben auf diesem Tablet',
+	'people.sign here': '{n} Personen unterschreiben auf diesem Tablet',
 	'people.wrong pin':
 		'Nach drei falschen PINs hintereinander lässt das Tablet warten, jedes Mal länger; die zehnte vernichtet den Schlüssel. Sein Besitzer wird dann neu aufgenommen, persönlich. Was vorher unterschrieben wurde, bleibt.',
 	'people.none': 'Auf diesem Tablet ist niemand aufgenommen',

@@ -35,7 +35,7 @@ export const PEOPLE = {
 	'person.certificate later': 'certificate begins {from}',
 	'person.take': 'Take the tablet',
 	'person.all': 'People and certificates',
-	'people.title': '{n} people sign on this tablet',
+	'people.sign here': '{n} people sign on this tablet',
 	'people.wrong pin':
 		'Three wrong PINs in a row make the tablet wait, longer each time; the tenth destroys the key. Its owner is then enrolled again, in person. What was signed before stays.',
 	'people.none': 'Nobody is enrolled on this tablet',
