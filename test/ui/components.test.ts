@@ -40,6 +40,18 @@ test('what is no number cannot be saved', async () => {
 	expect(await told()).toEqual([]);
 });
 
+test('a step that does not apply is said so with its reason, and as nothing else', async () => {
+	const { page, show, told } = gallery;
+	await show('reading', 'tablet');
+	await page.getByRole('button', { name: 'Not applicable' }).click();
+	await page.getByRole('button', { name: 'Not fitted on this unit' }).click();
+	await page.getByRole('button', { name: 'Ask for agreement: not applicable' }).click();
+	await page.getByRole('button', { name: 'Cannot do' }).click();
+	await page.getByRole('button', { name: 'No access' }).click();
+	await page.getByRole('button', { name: 'Save: cannot do' }).click();
+	expect(await told()).toEqual(['not applicable: Not fitted on this unit', 'cannot do: No access']);
+});
+
 test('a line-up row is kept by one touch, the next row follows, and no choice is marked before', async () => {
 	const { page, show, told } = gallery;
 	await show('line-up', 'tablet');

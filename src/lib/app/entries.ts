@@ -1,4 +1,4 @@
-import { fail, fromUtf8, ok, type Result } from '../base';
+import { fail, fromUtf8, type Result } from '../base';
 import {
 	calculatedBody,
 	enteredBody,
@@ -67,15 +67,6 @@ export async function attachSeries(startUp: OpenStartUp, step: string, file: Tre
 	const typed: Typed = { series: [attached.value.id], from, ...(note === undefined ? {} : { note }) };
 	const now = startUp.instant(tablet.clock.now());
 	return enter(startUp, step, typed, millis(to) < millis(now) ? { observed: to } : {});
-}
-
-export async function withdrawEntry(startUp: OpenStartUp, entry: string, reason: string, pin: string): Saved {
-	const { person } = startUp.tablet;
-	if (person === undefined) return fail({ kind: 'nobody-chosen' });
-	const key = await startUp.tablet.openKey(person.person, pin);
-	if (!key.ok) return key;
-	const written = await startUp.write('entry withdrawn', { entry, reason }, { key: key.value });
-	return written.ok ? ok('saved') : written;
 }
 
 /** Something happened to the plant: at least when it began. Nobody is asked for more before it is kept. */

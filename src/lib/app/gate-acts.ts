@@ -15,7 +15,7 @@ import {
 } from '../record';
 import { declarationOf, releaseStatement, sealStatement, statementVersion, writtenHour, type Say } from '../wording';
 import { BUILD } from '../demo';
-import type { OpenStartUp } from './open-start-up.svelte';
+import type { OpenStartUp, Seen } from './open-start-up.svelte';
 import type { Problem } from './problem';
 
 /** What a hold point's sheet shows, and the very words that a signature would cover. */
@@ -197,26 +197,27 @@ async function actOnGate<K extends EventKind>(
 }
 
 /** What the rules do not allow becomes a refused act: it is kept, says why, and changes nothing. */
-async function judgedAct<K extends EventKind>(
+export async function judgedAct<K extends EventKind>(
 	startUp: OpenStartUp,
 	key: SigningKey,
 	act: Refusable,
 	kind: K,
 	body: BodyOf<K>,
+	seen: Seen = {},
 ): Promise<Result<'signed', Problem>> {
-	const draft = startUp.draft(kind, body);
+	const draft = startUp.draft(kind, body, seen);
 	if (!draft.ok) return draft;
 	const because = objectionsTo(startUp.procedure, draft.value, startUp.log, startUp.siteLog);
 	if (because.length > 0) {
 		const gate = 'gate' in body && typeof body.gate === 'number' ? { gate: body.gate } : {};
-		const refused = await startUp.write('refused act', { act, ...gate, because: because.join('; ') }, { key });
+		const refused = await startUp.write('refused act', { act, ...gate, because: because.join('; ') }, { key }, seen);
 		return refused.ok ? fail({ kind: 'refused-act', because }) : refused;
 	}
 	if (kind === 'gate released') {
 		const head = await signHead(startUp, 'gate act', key);
 		if (!head.ok) return head;
 	}
-	const written = await startUp.write(kind, body, { key });
+	const written = await startUp.write(kind, body, { key }, seen);
 	return written.ok ? ok('signed') : written;
 }
 

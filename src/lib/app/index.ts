@@ -25,7 +25,6 @@ export {
 	note,
 	raiseDeviation,
 	recordPlantEvent,
-	withdrawEntry,
 	type TrendFile,
 } from './entries';
 export {
@@ -46,6 +45,18 @@ export {
 export { handOverShift, temporaryStates, unconfirmedImpact, type HandOver, type HandOverProblem } from './hand-over';
 export { findingImpact, type FindingImpact } from './finding';
 export { SheetDraft } from './sheet-draft.svelte';
+export {
+	agreeNotApplicable,
+	inviteWitness,
+	mayAgree,
+	noticeHasRunOut,
+	witnessAttended,
+	witnessWaived,
+	withdrawEntry,
+	type StepSigner,
+} from './step-acts';
+export { PhotoUrls } from './photo-urls.svelte';
+export { enteredBefore, invitationOf, waitsForAgreement, type EnteredBefore, type Invitation } from './step-history';
 export { DEMONSTRATION_PIN, playDemonstration, suppliedTrend, type ReadFile } from './demonstration';
 export { shiftTimes } from './shift-times';
 export { nextStep, StepDesk, type TypedSoFar } from './step-desk.svelte';

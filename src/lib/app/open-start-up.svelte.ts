@@ -18,13 +18,17 @@ import type { Draft as KeptDraft } from '../store';
 import type { ShiftState } from './shifts.svelte';
 import { signOn, writeEvent, type Signer } from './logbook';
 import type { Problem } from './problem';
-import { SITE_LOG, type Tablet } from './tablet.svelte';
+import { SITE_LOG, type Tablet, type TabletPerson } from './tablet.svelte';
 import { NO_TRENDS, trendsOf, type Trends } from './trend-files';
 
 /** Written durably and shown as saved, but for a few seconds still to be taken back. */
 export type Held = { readonly event: RecordEvent; readonly until: number };
 
-export type Seen = { readonly observed?: string };
+export type Seen = {
+	readonly observed?: string;
+	/** Who signs, when it is not who holds the tablet. */
+	readonly by?: TabletPerson;
+};
 
 const TAKE_BACK = 10_000;
 const TICK = 10_000;
@@ -44,6 +48,7 @@ export class OpenStartUp {
 	#saved = $state.raw<string>();
 	#stops: (() => void)[] = [];
 	#letGo: (() => void) | undefined;
+	#keeping: Promise<Result<'kept', Problem>> | undefined;
 
 	/** Everything that this tablet knows of the start-up, what may still be taken back included. */
 	readonly events: readonly RecordEvent[] = $derived(
@@ -153,7 +158,8 @@ export class OpenStartUp {
 	}
 
 	draft<K extends EventKind>(kind: K, body: BodyOf<K>, seen: Seen = {}): Result<Draft<K>, Problem> {
-		const { person, device, clock } = this.tablet;
+		const { device, clock } = this.tablet;
+		const person = seen.by ?? this.tablet.person;
 		if (person === undefined) return fail({ kind: 'nobody-chosen' });
 		const entered = this.instant(clock.now());
 		const { observed } = seen;
@@ -214,7 +220,13 @@ export class OpenStartUp {
 	}
 
 	/** What could still be taken back becomes part of the record. */
-	async keepHeld(): Promise<Result<'kept', Problem>> {
+	keepHeld(): Promise<Result<'kept', Problem>> {
+		// The ten seconds may run out while something else is saved: both wait for the one writing.
+		this.#keeping ??= this.#writeHeld().finally(() => (this.#keeping = undefined));
+		return this.#keeping;
+	}
+
+	async #writeHeld(): Promise<Result<'kept', Problem>> {
 		const held = this.#held;
 		if (held === undefined) return ok('kept');
 		this.#letGo?.();

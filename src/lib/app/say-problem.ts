@@ -69,6 +69,8 @@ export function sayProblem(problem: Problem, say: Say): string {
 			return say(`problem.${problem.kind}`, { startUp: problem.startUp });
 		case 'start-up-unreadable':
 			return say('problem.start-up-unreadable', { startUp: problem.startUp, what: problem.what });
+		case 'not-a-picture':
+			return say('problem.not-a-picture', { name: problem.name });
 		case 'refused-act':
 			return say('problem.refused-act', { because: problem.because.map((one) => sayObjection(one, say)).join('; ') });
 		case 'site-incomplete':

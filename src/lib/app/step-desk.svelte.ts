@@ -93,10 +93,25 @@ export class StepDesk {
 
 	/** A photo is kept before the entry that names it. */
 	async addPhoto(photo: Blob, name: string): Promise<void> {
-		const { bytes, name: drawn } = await redrawnPhoto(photo, name);
-		const kept = await this.startUp.tablet.store.attachments.save(bytes, { name: drawn, mediaType: 'image/jpeg' });
+		if (this.#busy) return;
+		this.#busy = true;
+		const drawn = await redrawnPhoto(photo, name);
+		const kept = drawn.ok
+			? await this.startUp.tablet.store.attachments.save(drawn.value.bytes, {
+					name: drawn.value.name,
+					mediaType: 'image/jpeg',
+				})
+			: drawn;
+		this.#busy = false;
 		if (!kept.ok) this.#problem = kept.error;
-		else this.type({ ...this.#draft, photos: [...(this.#draft.photos ?? []), kept.value] });
+		else if (this.#draft.photos?.some(({ hash }) => hash === kept.value.hash) !== true)
+			this.type({ ...this.#draft, photos: [...(this.#draft.photos ?? []), kept.value] });
+	}
+
+	/** A photo that is not meant: the entry will not name it. */
+	leavePhotoOut(hash: string): void {
+		const photos = (this.#draft.photos ?? []).filter((photo) => photo.hash !== hash);
+		this.type({ ...this.#draft, photos });
 	}
 
 	/** @returns whether it was saved; else `problem` says why, and what was typed stays */
@@ -106,7 +121,7 @@ export class StepDesk {
 			const { note, inputs, photos } = this.#draft;
 			const said = {
 				...(note === undefined || note.trim() === '' ? {} : { note }),
-				...(photos === undefined ? {} : { attachments: photos }),
+				...(photos === undefined || photos.length === 0 ? {} : { attachments: photos }),
 			};
 			if (step.kind === 'calculation')
 				return calculate(startUp, step.id, { ...said, ...(inputs === undefined ? {} : { typed: inputs }) });

@@ -39,6 +39,9 @@ export { default as ReadingBody } from './step/ReadingBody.svelte';
 export { default as ReviewBody } from './step/ReviewBody.svelte';
 export { default as SeriesBody } from './step/SeriesBody.svelte';
 export { default as TimedHoldBody } from './step/TimedHoldBody.svelte';
+export { default as EarlierEntries, type EarlierEntry } from './step/EarlierEntries.svelte';
+export { default as SignedAct, type Signed, type Signer } from './step/SignedAct.svelte';
+export type { ShownPhoto } from './step/shown-photo';
 export { default as WatchBody } from './step/WatchBody.svelte';
 export { default as WitnessBody } from './step/WitnessBody.svelte';
 

@@ -13,6 +13,7 @@ import { OPEN } from './de/open';
 import { PLANT } from './de/plant';
 import { SCREEN_ACTS } from './de/screen-acts';
 import { SCREEN_CALCULATORS } from './de/screen-calculators';
+import { SCREEN_ENTRIES } from './de/screen-entries';
 import { SCREEN_FRAME } from './de/screen-frame';
 import { SCREEN_LINE } from './de/screen-line';
 import { SCREEN_LOG } from './de/screen-log';
@@ -55,6 +56,7 @@ export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...SCREEN_STEPS,
 	...HAND_OVER,
 	...PEOPLE,
+	...SCREEN_ENTRIES,
 	...SCREEN_ACTS,
 	...SCREEN_LOG,
 	...SCREEN_NOW,

@@ -12,6 +12,7 @@ import { PEOPLE } from './en/people';
 import { OPEN } from './en/open';
 import { PLANT } from './en/plant';
 import { SCREEN_ACTS } from './en/screen-acts';
+import { SCREEN_ENTRIES } from './en/screen-entries';
 import { SCREEN_FRAME } from './en/screen-frame';
 import { SCREEN_CALCULATORS } from './en/screen-calculators';
 import { SCREEN_LINE } from './en/screen-line';
@@ -41,6 +42,7 @@ export const EN = {
 	...SCREEN_STEPS,
 	...HAND_OVER,
 	...PEOPLE,
+	...SCREEN_ENTRIES,
 	...SCREEN_ACTS,
 	...SCREEN_LOG,
 	...SCREEN_NOW,

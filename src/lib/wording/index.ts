@@ -18,6 +18,7 @@ export {
 } from './say';
 export { duration, momentsAt, type Moments } from './moment';
 export { sayObjection, sayWord, sayWords } from './word';
+export { sayEntry } from './entry';
 export { sayCause, type Names } from './cause';
 export { sayNote, sayNumber, withMark, type SeriesClock } from './note';
 export { handOverSummary, type TemporaryState } from './hand-over';

@@ -89,7 +89,6 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'app.mode.back-purge': 'Rückspülung',
 	'app.mode.calibration': 'Kalibrierung',
 	'app.mode.fault': 'Störung',
-	'app.no body': 'Ein Schritt der Art „{kind}“ wird auf diesem Bild noch nicht eingetragen.',
 	'app.mode': 'Analysatoren, wie sie sich selbst melden',
 	'app.blank title': 'Das Bild war verdeckt',
 	'app.blank text': 'Fünf Minuten lang hat es niemand berührt. Getipptes ist behalten.',

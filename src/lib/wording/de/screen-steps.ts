@@ -132,13 +132,4 @@ export const SCREEN_STEPS: { readonly [key in keyof typeof EN]: string } = {
 	'ui.photo.take': 'Foto aufnehmen',
 	'ui.photo.another': 'Noch eines aufnehmen',
 	'ui.photo.place': 'Den Ort, den eine Kamera in ein Bild schreibt, entfernt die App vor dem Behalten.',
-	'ui.witness.party': 'Partei',
-	'ui.witness.notice': 'Vorlauf',
-	'ui.witness.invited': 'Eingeladen',
-	'ui.witness.not yet': 'noch nicht',
-	'ui.witness.invite': 'Den Zeugen jetzt einladen',
-	'ui.witness.name': 'Name des Zeugen, oder wer verzichtet',
-	'ui.witness.reason': 'Grund, wenn verzichtet wird',
-	'ui.witness.attended': 'Anwesend',
-	'ui.witness.waived': 'Verzichtet',
 };

@@ -76,7 +76,6 @@ export const APP = {
 	'app.mode.back-purge': 'back-purge',
 	'app.mode.calibration': 'calibration',
 	'app.mode.fault': 'fault',
-	'app.no body': 'A step of the kind "{kind}" is not entered on this screen yet.',
 	'app.mode': 'Analysers, as they say of themselves',
 	'app.blank title': 'The screen was covered',
 	'app.blank text': 'Nobody touched it for five minutes. What was typed is kept.',

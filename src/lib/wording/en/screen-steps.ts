@@ -130,13 +130,4 @@ export const SCREEN_STEPS = {
 	'ui.photo.take': 'Take the photo',
 	'ui.photo.another': 'Take another',
 	'ui.photo.place': 'The place that a camera writes into a picture is taken out before it is kept.',
-	'ui.witness.party': 'Party',
-	'ui.witness.notice': 'Notice',
-	'ui.witness.invited': 'Invited',
-	'ui.witness.not yet': 'not yet',
-	'ui.witness.invite': 'Invite the witness now',
-	'ui.witness.name': 'Name of the witness, or of who waives',
-	'ui.witness.reason': 'Reason, when it is waived',
-	'ui.witness.attended': 'Attended',
-	'ui.witness.waived': 'Waived',
 } as const;
