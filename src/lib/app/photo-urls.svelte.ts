@@ -15,11 +15,15 @@ export class PhotoUrls {
 	/** Reads what is not yet shown; what this tablet does not hold stays away. */
 	async show(attachments: readonly Attachment[]): Promise<void> {
 		for (const { hash, mediaType } of attachments) {
-			if (!mediaType.startsWith('image/') || this.#urls[hash] !== undefined) continue;
+			if (!mediaType.startsWith('image/') || !this.#isNew(hash)) continue;
 			const kept = await this.#store.attachments.read(hash);
-			if (!kept.ok || kept.value === undefined || this.#closed || this.#urls[hash] !== undefined) continue;
+			if (!kept.ok || kept.value === undefined || this.#closed || !this.#isNew(hash)) continue;
 			this.#urls = { ...this.#urls, [hash]: URL.createObjectURL(kept.value.blob) };
 		}
+	}
+
+	#isNew(hash: string): boolean {
+		return this.#urls[hash] === undefined;
 	}
 
 	of(attachments: readonly Attachment[]): readonly ShownPhoto[] {
