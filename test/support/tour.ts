@@ -109,7 +109,8 @@ export async function finishGate2(page: Page): Promise<void> {
 	});
 	await onStep(page, '2.23', () => confirmAll(page));
 	await onStep(page, '2.21', async () => {
-		await press(page.getByRole('button', { name: 'Use the trend supplied with the demonstration' }));
+		await press(page.getByRole('button', { name: 'Trends supplied with the demonstration' }));
+		await press(page.getByRole('button', { name: 'purge-1.csv' }));
 		await press(page.getByRole('button', { name: 'Keep this series' }));
 	});
 	for (const calculation of ['2.25', '2.27']) await onStep(page, calculation, () => pressSave(page));

@@ -1,9 +1,11 @@
 import { fail, fromUtf8, ok, utf8, type Result } from '../base';
 import { DemoStopped, playStartUp, PlayFileSchema, type PlayedStartUp } from '../demo';
 import * as v from 'valibot';
+import { millis, parseTrend } from '../record';
 import type { Store } from '../store';
 import type { Clock } from './clock';
 import type { TrendFile } from './entries';
+import type { OpenStartUp } from './open-start-up.svelte';
 import type { Problem } from './problem';
 import { shiftTimes } from './shift-times';
 import { settingsOf, writeSettings } from './tablet.svelte';
@@ -60,6 +62,38 @@ export async function suppliedTrend(store: Store, read: ReadFile, name: string):
 	const text = fromUtf8(await read(`trends/${name}`));
 	return ok({ name, bytes: utf8(shiftTimes(text, settings.value.demonstrationShift ?? 0)) });
 }
+
+/** A trend that is offered, and the time that it is of. */
+export type SuppliedTrend = { readonly file: TrendFile; readonly from: string; readonly to: string };
+
+/**
+ * The trends of the demonstration that can be used now, the newest first: the first purge where the story had it, and a
+ * second one, for after a fan stop, moved so that it has just ended.
+ */
+export async function suppliedTrends(startUp: OpenStartUp, read: ReadFile): Promise<readonly SuppliedTrend[]> {
+	const { plant, tablet } = startUp;
+	const offered: SuppliedTrend[] = [];
+	for (const name of SUPPLIED) {
+		const supplied = await suppliedTrend(tablet.store, read, name);
+		const file = supplied.ok && name === AFTER_A_STOP ? justEnded(supplied.value, startUp) : supplied;
+		const trend = file.ok ? parseTrend(fromUtf8(file.value.bytes), plant.utcOffsetMinutes) : undefined;
+		const [from, to] = trend?.ok === true ? [trend.value.times[0], trend.value.times.at(-1)] : [];
+		if (!file.ok || from === undefined || to === undefined || to > tablet.clock.now()) continue;
+		offered.push({ file: file.value, from: startUp.instant(from), to: startUp.instant(to) });
+	}
+	return offered.sort((a, b) => millis(b.to) - millis(a.to));
+}
+
+function justEnded({ name, bytes }: TrendFile, { plant, tablet }: OpenStartUp): Result<TrendFile, Problem> {
+	const text = fromUtf8(bytes);
+	const trend = parseTrend(text, plant.utcOffsetMinutes);
+	if (!trend.ok) return trend;
+	const late = tablet.clock.now() - (trend.value.times.at(-1) ?? 0);
+	return ok({ name, bytes: utf8(shiftTimes(text, Math.floor(late / MINUTE) * MINUTE)) });
+}
+
+const AFTER_A_STOP = 'purge-2.csv';
+const SUPPLIED = ['purge-1.csv', 'purge-1-decimal-comma.csv', 'purge-1-not-yet.csv', AFTER_A_STOP] as const;
 
 export class FileMissing extends Error {}
 

@@ -47,7 +47,12 @@ export type TrendFile = { readonly name: string; readonly bytes: Uint8Array<Arra
  * A trend file becomes a series of the measuring points that its columns name, and the entry of the series step that rests on
  * it. Observed is its last sample: what the plant showed, not when somebody copied it.
  */
-export async function attachSeries(startUp: OpenStartUp, step: string, file: TrendFile, note?: string): Saved {
+export async function attachSeries(
+	startUp: OpenStartUp,
+	step: string,
+	file: TrendFile,
+	said: Parameters<typeof seriesBody>[3] = {},
+): Saved {
 	const found = startUp.stepOf(step);
 	if (!found.ok) return found;
 	const signer = startUp.entrySigner();
@@ -55,16 +60,18 @@ export async function attachSeries(startUp: OpenStartUp, step: string, file: Tre
 	const { plant, tablet } = startUp;
 	const text = textOf(file.bytes);
 	const trend =
-		text === undefined ? fail({ kind: 'no-table', lines: 0 } as const) : parseTrend(text, plant.utcOffsetMinutes);
+		text === undefined
+			? fail({ kind: 'not-utf8', name: file.name } as const)
+			: parseTrend(text, plant.utcOffsetMinutes, said.reading);
 	if (!trend.ok) return trend;
 	const kept = await tablet.store.attachments.save(file.bytes, { name: file.name, mediaType: 'text/csv' });
 	if (!kept.ok) return kept;
-	const series = seriesBody(trend.value, kept.value, plant, note);
+	const series = seriesBody(trend.value, kept.value, plant, said);
 	if (!series.ok) return series;
 	const attached = await startUp.write('series attached', series.value, signer.value);
 	if (!attached.ok) return attached;
 	const { from, to } = series.value;
-	const typed: Typed = { series: [attached.value.id], from, ...(note === undefined ? {} : { note }) };
+	const typed: Typed = { series: [attached.value.id], from, ...(said.note === undefined ? {} : { note: said.note }) };
 	const now = startUp.instant(tablet.clock.now());
 	return enter(startUp, step, typed, millis(to) < millis(now) ? { observed: to } : {});
 }
@@ -93,7 +100,8 @@ const newestEntry = (startUp: OpenStartUp, step: string): RecordEvent | undefine
 const sameMoment = (newest: RecordEvent, startUp: OpenStartUp, seen?: Seen): boolean =>
 	newest.observedAt === millis(seen?.observed ?? startUp.instant(startUp.tablet.clock.now()));
 
-function textOf(bytes: Uint8Array): string | undefined {
+/** Nothing, where the bytes are no UTF-8 text. */
+export function textOf(bytes: Uint8Array): string | undefined {
 	try {
 		return fromUtf8(bytes);
 	} catch {

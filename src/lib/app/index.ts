@@ -57,7 +57,14 @@ export {
 } from './step-acts';
 export { PhotoUrls } from './photo-urls.svelte';
 export { enteredBefore, invitationOf, waitsForAgreement, type EnteredBefore, type Invitation } from './step-history';
-export { DEMONSTRATION_PIN, playDemonstration, suppliedTrend, type ReadFile } from './demonstration';
+export {
+	DEMONSTRATION_PIN,
+	playDemonstration,
+	suppliedTrend,
+	suppliedTrends,
+	type ReadFile,
+	type SuppliedTrend,
+} from './demonstration';
 export { shiftTimes } from './shift-times';
 export { nextStep, StepDesk, type TypedSoFar } from './step-desk.svelte';
 export { previewCalculation, type CalculationPreview } from './calculation-preview';

@@ -31,7 +31,7 @@ export type Problem =
 	| { readonly kind: 'code-used-up' }
 	| { readonly kind: 'no-such-start-up'; readonly startUp: string }
 	| { readonly kind: 'start-up-unreadable'; readonly startUp: string; readonly what: string }
-	| { readonly kind: 'not-a-picture'; readonly name: string }
+	| { readonly kind: 'not-a-picture' | 'not-utf8'; readonly name: string }
 	| { readonly kind: 'no-such-step'; readonly step: string }
 	| { readonly kind: 'sealed'; readonly startUp: string }
 	/** What the rules do not allow: kept as a refused act. */

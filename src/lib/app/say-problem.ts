@@ -53,12 +53,19 @@ export function sayProblem(problem: Problem, say: Say): string {
 			return say('problem.no-such-point', { column: problem.column });
 		case 'other-basis':
 			return say('problem.other-basis', { column: problem.column, found: problem.found, point: problem.point });
+		case 'no-such-column':
+			return say('problem.no-such-column', { column: problem.column });
+		case 'point-twice':
+			return say('problem.point-twice', { point: problem.point });
+		case 'other-unit':
+			return say('problem.other-unit', { column: problem.column, found: problem.found, point: problem.point });
 		case 'no-table':
 		case 'ragged-line':
 		case 'not-a-time':
 		case 'time-runs-back':
 		case 'not-a-number':
 		case 'column-twice':
+		case 'no-time-column':
 			return say('problem.trend', { because: sayTrendError(problem, say) });
 		case 'not-enrolled-here':
 		case 'no-shift':
@@ -70,7 +77,8 @@ export function sayProblem(problem: Problem, say: Say): string {
 		case 'start-up-unreadable':
 			return say('problem.start-up-unreadable', { startUp: problem.startUp, what: problem.what });
 		case 'not-a-picture':
-			return say('problem.not-a-picture', { name: problem.name });
+		case 'not-utf8':
+			return say(`problem.${problem.kind}`, { name: problem.name });
 		case 'refused-act':
 			return say('problem.refused-act', { because: problem.because.map((one) => sayObjection(one, say)).join('; ') });
 		case 'site-incomplete':

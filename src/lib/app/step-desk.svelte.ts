@@ -1,8 +1,19 @@
-import { fromUtf8, ok, type Json, type Result } from '../base';
+import { fail, ok, type Json, type Result } from '../base';
 import type { Attachment, DraftKey } from '../store';
 import type { Step } from '../procedure';
-import { parseTrend, type Trend, type Typed, type TypedRow, type TypedValue } from '../record';
-import { attachSeries, calculate, enter, type TrendFile } from './entries';
+import {
+	guessedColumns,
+	parseTrend,
+	tableOf,
+	type SeriesColumn,
+	type Trend,
+	type TrendReading,
+	type TrendTable,
+	type Typed,
+	type TypedRow,
+	type TypedValue,
+} from '../record';
+import { attachSeries, calculate, enter, textOf, type TrendFile } from './entries';
 import type { OpenStartUp } from './open-start-up.svelte';
 import { redrawnPhoto } from './photo';
 import type { Problem } from './problem';
@@ -21,6 +32,12 @@ export type TypedSoFar = {
 	/** Photos already kept, by their hash. */
 	readonly photos?: readonly Attachment[];
 	readonly mode?: NonNullable<TypedValue['analyserMode']>;
+	/** A trend that is being read in: its file, and what was corrected of what was found in it. */
+	readonly series?: {
+		readonly file: Attachment;
+		readonly reading?: TrendReading;
+		readonly columns?: readonly SeriesColumn[];
+	};
 };
 
 /** One step as it lies open before a person: what is typed so far, and its saving. */
@@ -35,24 +52,36 @@ export class StepDesk {
 	#busy = $state.raw(false);
 	#saving: Promise<unknown> = Promise.resolve();
 
-	private constructor(startUp: OpenStartUp, step: Step, key: DraftKey, draft: TypedSoFar) {
+	private constructor(startUp: OpenStartUp, step: Step, key: DraftKey, draft: TypedSoFar, file: TrendFile | undefined) {
 		this.startUp = startUp;
 		this.step = step;
 		this.#key = key;
 		this.#draft = draft;
+		this.#file = file;
 	}
 
 	static async open(startUp: OpenStartUp, id: string): Promise<Result<StepDesk, Problem>> {
 		const step = startUp.stepOf(id);
 		if (!step.ok) return step;
 		const key = { startUp: startUp.id, step: id, person: startUp.tablet.person?.person ?? '' };
-		const kept = await startUp.tablet.store.drafts.read(key);
+		const { store } = startUp.tablet;
+		const kept = await store.drafts.read(key);
 		if (!kept.ok) return kept;
-		return ok(new StepDesk(startUp, step.value, key, (kept.value?.typed ?? {}) as TypedSoFar));
+		const draft = (kept.value?.typed ?? {}) as TypedSoFar;
+		const file = draft.series === undefined ? undefined : await store.attachments.read(draft.series.file.hash);
+		if (file?.ok === false) return file;
+		const trend = file?.value;
+		const bytes = trend === undefined ? undefined : new Uint8Array(await trend.blob.arrayBuffer());
+		return ok(new StepDesk(startUp, step.value, key, draft, bytes && { name: draft.series?.file.name ?? '', bytes }));
 	}
 
 	get draft(): TypedSoFar {
 		return this.#draft;
+	}
+
+	/** Whose draft this is: another person at the tablet has one of their own. */
+	get person(): string {
+		return this.#key.person;
 	}
 
 	/** The trend that was chosen or pasted, before it is attached. */
@@ -60,9 +89,24 @@ export class StepDesk {
 		return this.#file;
 	}
 
+	readonly #text: string | undefined = $derived(this.#file === undefined ? undefined : textOf(this.#file.bytes));
+
+	/** The cells as they stand in the file. */
+	readonly table: TrendTable | undefined = $derived(
+		this.#text === undefined ? undefined : tableOf(this.#text, this.#draft.series?.reading?.separator),
+	);
+
 	readonly trend: Result<Trend, Problem> | undefined = $derived.by(() => {
 		if (this.#file === undefined) return undefined;
-		return parseTrend(fromUtf8(this.#file.bytes), this.startUp.plant.utcOffsetMinutes);
+		if (this.#text === undefined) return fail({ kind: 'not-utf8', name: this.#file.name });
+		return parseTrend(this.#text, this.startUp.plant.utcOffsetMinutes, this.#draft.series?.reading);
+	});
+
+	/** Which column is which measuring point: as it was said, else as it was found. */
+	readonly columns: readonly SeriesColumn[] = $derived.by(() => {
+		const said = this.#draft.series?.columns;
+		if (said !== undefined || this.trend?.ok !== true) return said ?? [];
+		return guessedColumns(this.trend.value, this.startUp.plant);
 	});
 
 	get problem(): Problem | undefined {
@@ -86,9 +130,29 @@ export class StepDesk {
 			});
 	}
 
-	choose(file: TrendFile | undefined): void {
-		this.#file = file;
-		this.#problem = undefined;
+	/** The file is kept before anything is read from it: a reload finds it again. */
+	async choose(file: TrendFile): Promise<void> {
+		const as = { name: file.name, mediaType: 'text/csv' };
+		const kept = await this.startUp.tablet.store.attachments.save(file.bytes, as);
+		this.#file = kept.ok ? file : undefined;
+		if (kept.ok) this.type({ ...this.#draft, series: { file: { ...kept.value, name: file.name } } });
+		else this.#problem = kept.error;
+	}
+
+	/** A correction of what was found in the file. Other headings than before: the columns are looked for anew. */
+	readAs(change: TrendReading): void {
+		const { series } = this.#draft;
+		if (series === undefined) return;
+		const { columns: _found, ...rest } = series;
+		const reading = Object.fromEntries(
+			Object.entries({ ...series.reading, ...change }).filter(([, value]) => (value as unknown) !== undefined),
+		);
+		this.type({ ...this.#draft, series: { ...rest, reading } });
+	}
+
+	useColumns(columns: readonly SeriesColumn[]): void {
+		const { series } = this.#draft;
+		if (series !== undefined) this.type({ ...this.#draft, series: { ...series, columns } });
 	}
 
 	/** A photo is kept before the entry that names it. */
@@ -125,7 +189,12 @@ export class StepDesk {
 			};
 			if (step.kind === 'calculation')
 				return calculate(startUp, step.id, { ...said, ...(inputs === undefined ? {} : { typed: inputs }) });
-			if (step.kind === 'series' && this.#file !== undefined) return attachSeries(startUp, step.id, this.#file, note);
+			if (step.kind === 'series' && this.#file !== undefined)
+				return attachSeries(startUp, step.id, this.#file, {
+					...(note === undefined ? {} : { note }),
+					reading: this.#draft.series?.reading,
+					columns: this.columns,
+				});
 			return enter(startUp, step.id, { ...typedOf(this.#draft), ...said });
 		});
 	}

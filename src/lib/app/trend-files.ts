@@ -1,7 +1,7 @@
-import { allOf, parseTrend, type RecordEvent, type Trend } from '../record';
+import { allOf, parseTrend, trendKey, type RecordEvent, type Trend } from '../record';
 import type { Store } from '../store';
 
-/** Trends already read, by the hash of their file. */
+/** Trends already read, by `trendKey`. */
 export type Trends = ReadonlyMap<string, Trend>;
 
 export const NO_TRENDS: Trends = new Map();
@@ -13,15 +13,15 @@ export async function trendsOf(
 	around: { readonly store: Store; readonly utcOffsetMinutes: number },
 ): Promise<Trends> {
 	const missing = allOf(events, 'series attached')
-		.map(({ body }) => body.attachment.hash)
-		.filter((hash) => !known.has(hash));
+		.map(({ body }) => body)
+		.filter((body) => !known.has(trendKey(body)));
 	if (missing.length === 0) return known;
 	const trends = new Map(known);
-	for (const hash of missing) {
-		const kept = await around.store.attachments.read(hash);
+	for (const body of missing) {
+		const kept = await around.store.attachments.read(body.attachment.hash);
 		if (!kept.ok || kept.value === undefined) continue;
-		const trend = parseTrend(await kept.value.blob.text(), around.utcOffsetMinutes);
-		if (trend.ok) trends.set(hash, trend.value);
+		const trend = parseTrend(await kept.value.blob.text(), around.utcOffsetMinutes, body.reading);
+		if (trend.ok) trends.set(trendKey(body), trend.value);
 	}
 	return trends;
 }

@@ -362,7 +362,7 @@ async function attachSeries(
 	const kept = attachment(act.file, around.files);
 	const trend: Trend = must(parseTrend(fromUtf8(around.files.read(act.file)), plant.utcOffsetMinutes), act.file);
 	(trends as Map<string, Trend>).set(kept.hash, trend);
-	const attached = must(seriesBody(trend, kept, plant, act.note), act.file);
+	const attached = must(seriesBody(trend, kept, plant, { note: act.note }), act.file);
 	const series = await tablets.say('series attached', attached, said);
 	const step = stepOf(procedure, act.step);
 	const enter = { ...act, do: 'enter' as const, photo: undefined, file: undefined };

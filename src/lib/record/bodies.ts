@@ -176,6 +176,15 @@ export const START_UP_BODIES = {
 		to: InstantSchema,
 		samples: Count,
 		attachment: AttachmentSchema,
+		/** How the file is to be read, where a person corrected what would be found in it. */
+		reading: v.exactOptional(
+			v.strictObject({
+				separator: v.exactOptional(v.picklist([';', ',', '\t'])),
+				decimalMark: v.exactOptional(v.picklist([',', '.'])),
+				timeColumn: v.exactOptional(Text),
+				time: v.exactOptional(v.picklist(['year first', 'day first', 'month first'])),
+			}),
+		),
 		note: v.exactOptional(Text),
 	}),
 	'deviation raised': v.strictObject({

@@ -24,7 +24,16 @@ export { SITE_BODIES, START_UP_BODIES, type SiteKind, type StartUpKind } from '.
 export { nextEnvelope, textOf, unsignedEvent, type Draft } from './write';
 export { checkChains, headCode, headsOf, type ChainFinding } from './chain';
 export { headText, keyFor, rightFor, type KeyNeeded } from './signing-rules';
-export { parseTrend, type Trend, type TrendColumn, type TrendError } from './trend';
+export {
+	columnName,
+	parseTrend,
+	tableOf,
+	type Trend,
+	type TrendColumn,
+	type TrendError,
+	type TrendReading,
+	type TrendTable,
+} from './trend';
 export { judgeEntry, type EntryFault } from './judge-entry';
 export {
 	calculatedBody,
@@ -34,7 +43,7 @@ export {
 	type TypedRow,
 	type TypedValue,
 } from './compose-entry';
-export { seriesBody, type SeriesError } from './compose-series';
+export { guessedColumns, seriesBody, trendKey, type SeriesColumn, type SeriesError } from './compose-series';
 export { signedEvent } from './sign-event';
 export { gateSheet, headline, otherTablets, statementOf, type GateSheet, type Statement } from './gate-sheet';
 export { lookupIn } from './lookup';

@@ -2,6 +2,7 @@ import * as v from 'valibot';
 import type { CalcResult } from '../calc';
 import type { BoundReading, BoundSeries, Lookup } from '../procedure';
 import type { Standing } from './answer';
+import { trendKey } from './compose-series';
 import { allOf, type EventOf, type RecordEvent } from './event';
 import { millis, type Millis } from './instants';
 import type { Trend } from './trend';
@@ -10,7 +11,7 @@ import type { Trend } from './trend';
 export function lookupIn(record: {
 	readonly events: readonly RecordEvent[];
 	readonly standing: Standing;
-	/** Trend files already read, by the hash of the attachment. */
+	/** Trend files already read, by `trendKey`. */
 	readonly trends: ReadonlyMap<string, Trend>;
 	/** Values typed into the calculation itself, by the path of its input. */
 	readonly typed: { readonly [input: string]: unknown };
@@ -33,7 +34,7 @@ export function lookupIn(record: {
 			const ids = entryOf(step)?.body.series ?? [];
 			const attached = ids.map((id) => byId.get(id)).find((event) => event?.kind === 'series attached');
 			if (attached?.kind !== 'series attached') return undefined;
-			const trend = record.trends.get(attached.body.attachment.hash);
+			const trend = record.trends.get(trendKey(attached.body));
 			return trend && seriesOf(attached, trend);
 		},
 		rows: (step) => {

@@ -11,7 +11,9 @@ import {
 	standing,
 	type EventOf,
 	type RecordEvent,
+	trendKey,
 	type Trend,
+	type TrendReading,
 } from '../record';
 import { aboutEvent, nameOf, offences } from './about-event';
 import type { Replayed } from './check-gates';
@@ -41,7 +43,7 @@ export function checkBindings(
 	});
 	if (plant === undefined)
 		return calculated.length === 0 ? [] : [undecided(NAME, 'The record holds no plant description that can be read.')];
-	const trends = trendsIn(files, plant.utcOffsetMinutes);
+	const trends = trendsIn(startUp, files, plant.utcOffsetMinutes);
 	const knowledge = new Knowledge([...startUp, ...site]);
 	const bad = calculated.flatMap(({ event, step, inputs }) => {
 		const past = knowledge.past(event);
@@ -123,20 +125,27 @@ function byPath(value: Json, path: string): { readonly [path: string]: Json } {
 	return Object.assign({ [path]: value }, ...inner) as { readonly [path: string]: Json };
 }
 
-function trendsIn(files: readonly { readonly bytes: Bytes }[], utcOffsetMinutes: number): ReadonlyMap<string, Trend> {
-	const trends = files.flatMap(({ bytes }) => {
-		const trend = trendOf(bytes, utcOffsetMinutes);
-		return trend === undefined ? [] : [[sha256Hex(bytes), trend] as const];
+/** Every attached series, read as its event says. */
+function trendsIn(
+	startUp: readonly RecordEvent[],
+	files: readonly { readonly bytes: Bytes }[],
+	utcOffsetMinutes: number,
+): ReadonlyMap<string, Trend> {
+	const byHash = new Map(files.map(({ bytes }) => [sha256Hex(bytes), bytes] as const));
+	const trends = allOf(startUp, 'series attached').flatMap(({ body }) => {
+		const bytes = byHash.get(body.attachment.hash);
+		const trend = bytes === undefined ? undefined : trendOf(bytes, utcOffsetMinutes, body.reading);
+		return trend === undefined ? [] : [[trendKey(body), trend] as const];
 	});
 	return new Map(trends);
 }
 
-function trendOf(bytes: Bytes, utcOffsetMinutes: number): Trend | undefined {
+function trendOf(bytes: Bytes, utcOffsetMinutes: number, reading: TrendReading | undefined): Trend | undefined {
 	try {
-		const trend = parseTrend(fromUtf8(bytes), utcOffsetMinutes);
+		const trend = parseTrend(fromUtf8(bytes), utcOffsetMinutes, reading);
 		return trend.ok ? trend.value : undefined;
 	} catch {
-		// A photo is no text.
+		// Not every file is text.
 		return undefined;
 	}
 }

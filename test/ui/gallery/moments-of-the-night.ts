@@ -9,10 +9,12 @@ import {
 	allOf,
 	gateSheet,
 	parseTrend,
+	tableOf,
 	standing,
 	type GateSheet,
 	type Standing,
 	type Trend,
+	type TrendTable,
 } from '../../../src/lib/record';
 
 const FOLDER = join(import.meta.dirname, '../../../static/demo');
@@ -29,6 +31,7 @@ export type GalleryData = {
 	readonly venturi: CalcResult;
 	readonly zero: string;
 	readonly trend: Trend;
+	readonly table: TrendTable | undefined;
 };
 
 export const MOMENTS = {
@@ -61,10 +64,8 @@ export async function galleryData(): Promise<GalleryData> {
 	const judged = (calc: string, word?: string): CalcResult =>
 		results.find((result) => result.calc.startsWith(calc) && (word === undefined || result.verdict?.word === word))!;
 	const purge = judged('purge-adequacy', 'adequate');
-	const trend = parseTrend(
-		fromUtf8(new Uint8Array(readFileSync(join(FOLDER, 'trends/purge-1-decimal-comma.csv')))),
-		60,
-	);
+	const text = fromUtf8(new Uint8Array(readFileSync(join(FOLDER, 'trends/purge-1-decimal-comma.csv'))));
+	const trend = parseTrend(text, 60);
 	return {
 		procedure,
 		plant,
@@ -76,5 +77,6 @@ export async function galleryData(): Promise<GalleryData> {
 		venturi: judged('venturi-flow'),
 		zero: String((purge.inputs as { zero?: string }).zero),
 		trend: trend.ok ? trend.value : (undefined as never),
+		table: tableOf(text),
 	};
 }

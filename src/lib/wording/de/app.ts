@@ -52,6 +52,12 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 		'Der Trend wurde nicht übernommen: seine Spalte {column} nennt keine Messstelle dieser Anlage.',
 	'problem.other-basis':
 		'Der Trend wurde nicht übernommen: Spalte {column} sagt {found}, die Messstelle misst {point}.',
+	'problem.no-such-column': 'Der Trend wurde nicht übernommen: er hat keine Spalte {column}.',
+	'problem.point-twice': 'Der Trend wurde nicht übernommen: zwei Spalten sollen {point} sein. Eine weglassen.',
+	'problem.other-unit':
+		'Der Trend wurde nicht übernommen: {found} ist keine Einheit von {point}; für Spalte {column} eine andere wählen.',
+	'problem.not-utf8':
+		'Der Trend wurde nicht übernommen: {name} ist kein Text in UTF-8. Als Text (CSV, UTF-8) ausgeben oder seine Zeilen kopieren und einfügen.',
 	'problem.trend': 'Der Trend wurde nicht übernommen: {because}.',
 	'problem.sheet-changed':
 		'Die Aufzeichnung ging weiter, während dieses Blatt offen war. Es wurde nichts unterschrieben: das Blatt noch einmal lesen, es ist neu.',
@@ -83,7 +89,8 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'app.taken back': '{what} gespeichert.',
 	'app.held entry': 'Schritt {step}',
 	'app.held other': 'Dies',
-	'app.use supplied': 'Den Trend verwenden, der der Vorführung beiliegt',
+	'app.use supplied': 'Mit der Vorführung gelieferte Trends',
+	'app.supplied of': '{from} bis {to}',
 	'app.mode.measuring': 'misst',
 	'app.mode.hold': 'hält den Wert',
 	'app.mode.back-purge': 'Rückspülung',

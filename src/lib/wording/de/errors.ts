@@ -23,6 +23,7 @@ export const ERRORS: { readonly [key in keyof typeof EN]: string } = {
 	'trend.not-a-time': 'Zeile {line}: „{found}“ ist keine Zeit; eine Zeit lautet {expected}',
 	'trend.time-runs-back': 'Zeile {line}: {found} kommt nicht nach {before}',
 	'trend.not-a-number': 'Zeile {line}, Spalte {column}: „{found}“ statt {expected}',
+	'trend.no-time-column': 'Es gibt keine Spalte „{column}“ für die Zeiten',
 	'trend.column-twice': 'Die Spalte „{column}“ steht zweimal da',
 
 	'quantity.empty-number': 'es steht keine Zahl da',

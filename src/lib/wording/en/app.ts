@@ -40,6 +40,11 @@ export const APP = {
 	'problem.calculation-refused': 'It was not calculated: {because}.',
 	'problem.no-such-point': 'The trend was not taken: its column {column} names no measuring point of this plant.',
 	'problem.other-basis': 'The trend was not taken: column {column} says {found}, the measuring point is read {point}.',
+	'problem.no-such-column': 'The trend was not taken: it has no column {column}.',
+	'problem.point-twice': 'The trend was not taken: two columns are said to be {point}. Leave one out.',
+	'problem.other-unit': 'The trend was not taken: {found} is no unit of {point}; choose another for column {column}.',
+	'problem.not-utf8':
+		'The trend was not taken: {name} is not text in UTF-8. Export it as text (CSV, UTF-8), or copy its lines and paste them.',
 	'problem.trend': 'The trend was not taken: {because}.',
 	'problem.sheet-changed':
 		'The record went on while this sheet was open. Nothing was signed: read the sheet again, it is new.',
@@ -70,7 +75,8 @@ export const APP = {
 	'app.taken back': '{what} saved.',
 	'app.held entry': 'Step {step}',
 	'app.held other': 'This',
-	'app.use supplied': 'Use the trend supplied with the demonstration',
+	'app.use supplied': 'Trends supplied with the demonstration',
+	'app.supplied of': '{from} to {to}',
 	'app.mode.measuring': 'measuring',
 	'app.mode.hold': 'hold',
 	'app.mode.back-purge': 'back-purge',

@@ -19,6 +19,7 @@ export const ERRORS = {
 	'trend.not-a-time': 'Line {line}: "{found}" is no time; a time reads {expected}',
 	'trend.time-runs-back': 'Line {line}: {found} does not come after {before}',
 	'trend.not-a-number': 'Line {line}, column {column}: "{found}" is not {expected}',
+	'trend.no-time-column': 'There is no column "{column}" for the times',
 	'trend.column-twice': 'The column "{column}" stands twice',
 
 	'quantity.empty-number': 'there is no number',
