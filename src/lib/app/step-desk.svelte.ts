@@ -79,11 +79,6 @@ export class StepDesk {
 		return this.#draft;
 	}
 
-	/** Whose draft this is: another person at the tablet has one of their own. */
-	get person(): string {
-		return this.#key.person;
-	}
-
 	/** The trend that was chosen or pasted, before it is attached. */
 	get file(): TrendFile | undefined {
 		return this.#file;
