@@ -55,6 +55,7 @@ export {
 	withdrawEntry,
 	type StepSigner,
 } from './step-acts';
+export { coverageFor, judgesPurge } from './purge-view';
 export { PhotoUrls } from './photo-urls.svelte';
 export { enteredBefore, invitationOf, waitsForAgreement, type EnteredBefore, type Invitation } from './step-history';
 export {

@@ -29,6 +29,7 @@ export { leaderNotes, namesOf } from './ladder/leader-notes';
 export type { StepDraft } from './step/step-draft';
 export { default as StepSheet } from './step/StepSheet.svelte';
 export { default as CalculationBody } from './step/CalculationBody.svelte';
+export { default as CalculationInputs } from './step/CalculationInputs.svelte';
 export { default as ChoiceBody } from './step/ChoiceBody.svelte';
 export { default as ConfirmBody } from './step/ConfirmBody.svelte';
 export { default as CoverageBody } from './step/CoverageBody.svelte';

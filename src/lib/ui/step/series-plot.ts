@@ -2,7 +2,7 @@ import type { Plot, PlotCurve } from '../../calc';
 import { shownUnit } from '../../quantity';
 import type { SeriesColumn, Trend } from '../../record';
 
-/** The columns that will be kept, one picture for every unit: what is missing in the file is missing in the picture. */
+/** The columns that will be kept, one picture for every unit: what is missing in the file breaks the line. */
 export function seriesPlots(trend: Trend, columns: readonly SeriesColumn[], gap: string): readonly Plot[] {
 	const zero = trend.times[0] ?? 0;
 	const seconds = trend.times.map((time) => (time - zero) / 1000);
@@ -25,33 +25,13 @@ export function seriesPlots(trend: Trend, columns: readonly SeriesColumn[], gap:
 		y: { label: '', unit: shownUnit(unit) },
 		curves: used
 			.filter((one) => one.unit === unit)
-			.flatMap(({ point, values }) =>
-				pieces(values, trend.times, ends).map((piece): PlotCurve => ({
-					id: point,
-					label: point,
-					kind: 'line',
-					x: piece.map((i) => seconds[i] ?? 0),
-					y: piece.map((i) => values[i] ?? 0),
-				})),
-			),
+			.map(({ point, values }): PlotCurve => {
+				const samples = values.flatMap((value, i) => [
+					[seconds[i] ?? 0, value ?? NaN] as const,
+					...(ends.has(trend.times[i] ?? 0) ? [[seconds[i] ?? 0, NaN] as const] : []),
+				]);
+				return { id: point, label: point, kind: 'line', x: samples.map(([x]) => x), y: samples.map(([, y]) => y) };
+			}),
 		marks,
 	}));
-}
-
-/** Runs of samples without an empty cell or a gap in time between them. */
-function pieces(
-	values: readonly (number | undefined)[],
-	times: readonly number[],
-	ends: ReadonlySet<number>,
-): readonly (readonly number[])[] {
-	const found: number[][] = [];
-	let run: number[] = [];
-	for (const [i, value] of values.entries()) {
-		if (value !== undefined) run.push(i);
-		if (value === undefined || ends.has(times[i] ?? 0)) {
-			found.push(run);
-			run = [];
-		}
-	}
-	return [...found, run].filter(({ length }) => length > 0);
 }
