@@ -34,7 +34,7 @@ test('an entry that the screen said was saved is there after a reload, and a wro
 			await saved(page, '2.26');
 			await page.reload();
 			await toStep(page, '2.26');
-			await page.getByText(/The next reading is due in/).waitFor();
+			await page.getByText(/next reading in/).waitFor();
 			expect(complaints).toEqual([]);
 		}),
 	);

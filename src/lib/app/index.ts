@@ -55,6 +55,9 @@ export {
 	withdrawEntry,
 	type StepSigner,
 } from './step-acts';
+export { ReadingTimer } from './reading-timer.svelte';
+export { SecondHand } from './second-hand.svelte';
+export { tone } from './tone';
 export { coverageFor, judgesPurge } from './purge-view';
 export { PhotoUrls } from './photo-urls.svelte';
 export { enteredBefore, invitationOf, waitsForAgreement, type EnteredBefore, type Invitation } from './step-history';

@@ -39,7 +39,7 @@ export function drawPlot(
 		width: Math.max(size, width - left - right),
 		height: Math.max(size, height - size * (x?.clock === undefined ? 5.4 : 4.2)),
 	};
-	const frame = frameOf(plot, box, { ...(x === undefined ? {} : { x }), ...(y === undefined ? {} : { y }) });
+	const frame = frameOf(plot, box, { ...(x === undefined ? {} : { x }), ...(y === undefined ? {} : { y }) }, size);
 	const marks = plot.marks.map((mark) => widened(mark, plot.marks));
 	const curves = [...plot.curves].sort((a, b) => layer(a) - layer(b));
 	const shapes = [

@@ -19,14 +19,30 @@ export type AxisLook = {
 	readonly clock?: { readonly zero: number; readonly utcOffsetMinutes: number };
 };
 
-/** The axes of a plot, wide enough for every finite number of its curves and marks. */
-export function frameOf(plot: Plot, box: Box, look: { readonly x?: AxisLook; readonly y?: AxisLook }): Frame {
+/** The axes of a plot, wide enough for every finite number of its curves and marks; no two labels of an axis meet. */
+export function frameOf(
+	plot: Plot,
+	box: Box,
+	look: { readonly x?: AxisLook; readonly y?: AxisLook },
+	lettering: number,
+): Frame {
+	const room = (length: number, letters: number): number => Math.max(2, Math.floor(length / (lettering * letters)));
 	const xs = [...plot.curves.flatMap(({ x }) => x), ...marksOn(plot, 'x')];
 	const ys = [...groundOf(plot), ...plot.curves.flatMap(heights), ...marksOn(plot, 'y')];
 	return {
 		box,
-		x: scaleOf(xs, plot.x, look.x ?? {}, { start: box.x, length: box.width, count: 7, margin: 0 }),
-		y: scaleOf(ys, plot.y, look.y ?? {}, { start: box.y + box.height, length: -box.height, count: 8, margin: 0.04 }),
+		x: scaleOf(xs, plot.x, look.x ?? {}, {
+			start: box.x,
+			length: box.width,
+			count: Math.min(7, room(box.width, 4)),
+			margin: 0,
+		}),
+		y: scaleOf(ys, plot.y, look.y ?? {}, {
+			start: box.y + box.height,
+			length: -box.height,
+			count: Math.min(8, room(box.height, 1.9)),
+			margin: 0.04,
+		}),
 	};
 }
 

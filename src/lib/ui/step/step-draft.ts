@@ -10,11 +10,16 @@ export type StepOf<K extends StepKind> = Extract<Step, { readonly kind: K }>;
 export type StepDraft = Pick<Typed, 'confirmed' | 'choice' | 'flow' | 'note'> & {
 	readonly values?: { readonly [field: string]: TypedValue };
 	readonly rows?: { readonly [row: string]: TypedRow };
+	/** What the analysers say of themselves. */
+	readonly mode?: (typeof ANALYSER_MODES)[number];
 	/** When a timed hold began. */
 	readonly begun?: string;
 	/** Typed inputs of a calculation. */
 	readonly inputs?: { readonly [input: string]: string };
 };
+
+export const ANALYSER_MODES = ['measuring', 'hold', 'back-purge', 'calibration', 'fault'] as const;
+export const FLOWS = ['unbroken', 'broken', 'not looked at'] as const;
 
 export const withValue = (draft: StepDraft, field: string, typed: string): StepDraft => ({
 	...draft,
