@@ -37,6 +37,7 @@ export const SCREEN_STEPS: { readonly [key in keyof typeof EN]: string } = {
 	'ui.still': 'Noch offen: {n}',
 	'ui.choose': 'Eines wählen',
 	'ui.type it': 'Wert tippen',
+	'ui.inside limit': 'Im Grenzwert.',
 	'ui.inside': 'Im Grenzwert:',
 	'ui.under': '{value} ist nicht über {limit}',
 	'ui.over': '{value} ist nicht unter {limit}',

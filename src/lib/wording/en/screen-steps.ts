@@ -35,6 +35,7 @@ export const SCREEN_STEPS = {
 	'ui.still': 'Still open: {n}',
 	'ui.choose': 'Choose one',
 	'ui.type it': 'Type the value',
+	'ui.inside limit': 'Inside the limit.',
 	'ui.inside': 'Inside the limit:',
 	'ui.under': '{value} is not over {limit}',
 	'ui.over': '{value} is not under {limit}',
