@@ -71,11 +71,11 @@ const TOKEN = /\p{L}+|\d+(?:\.\d+)?|\s+|./gu;
  * in stored results; here they become ε, ρ with the index 1, q with the index n,dry.
  */
 export function symbolNotation(symbol: string): string {
-	const greek = symbol.replace(GREEK_WORD, (word) => GREEK[word] ?? word);
+	const greek = symbol.replace(GREEK_WORD, (word) => GREEK[word] ?? word).replace(/^dp(?=_|$)/, 'Δp');
 	const known = INDEXED[greek];
 	if (known !== undefined) return known;
 	const [, base = greek, digits] = /^(\D+?)_?(\d+)$/.exec(greek) ?? [];
-	if (digits !== undefined) return `${base}_${digits}`;
+	if (digits !== undefined && !base.includes('_')) return `${base}_${digits}`;
 	const [first = '', ...rest] = greek.split('_');
 	return rest.length === 0 ? first : `${first}_{${rest.join('_').replaceAll(',', ', ')}}`;
 }
@@ -100,7 +100,6 @@ const INDEXED: { readonly [symbol: string]: string } = {
 	C0: 'C_0',
 	Ci: 'C_i',
 	Ct: 'C_t',
-	dp: 'Δp',
 	dw: 'Δω',
 	dw_min: 'Δω_min',
 	dw_max: 'Δω_max',

@@ -76,4 +76,45 @@ export const CALCULATOR_NOTES = {
 	'note.totaliser-ran-backwards': 'Der Zähler ging von {before} auf {value} zurück.',
 	'note.basis-needs-moisture':
 		'{tag} misst {basis:basis}, der Grenzwert ist {limitBasis:basis}: nachgewiesene Feuchte ist nötig.',
+	'note.oxygen-not-below-air':
+		'Sauerstoff {oxygen:%} liegt nicht unter dem der Luft, {air:%}: daraus lässt sich nichts ablesen.',
+	'note.oxygen-falls-along':
+		'Der Sauerstoff fällt entlang des Wegs: Analysatoren oder Zeitpunkte passen nicht zusammen. Das ist keine Falschluft von null.',
+	'note.leak-not-told-from-zero':
+		'Falschluft {r:%} mit einer Unsicherheit von {U:%} ist von null nicht zu unterscheiden; das ist keine Dichtheit.',
+	'note.temperature-swing':
+		'Die Temperatur änderte sich um {swing:K}; über {most:K} ist die Prüfung ungültig: ein Fühler ist nicht das ganze Gas.',
+	'note.pressure-rose':
+		'Ohne den Anteil der Temperatur stieg der Druck um mehr als seine Unsicherheit: die Temperatur ist nicht die des Gases. Ungültig, nicht bestanden.',
+	'note.walls-flexible': 'Nachgiebige Wände ändern das Volumen: der Druck verrät dann kein Leck.',
+	'note.pressure-changed-much':
+		'Der Druck änderte sich um {part:%}; über {most:%} gehört das Leck nicht mehr zum Prüfdruck.',
+	'note.temperature-moved': 'Die Temperatur wanderte um {swing:K}: warten, bis sie ruht, oder den Kanal beschatten.',
+	'note.drop-inside-uncertainty':
+		'Der Abfall von {drop:Pa} ist mit einer Unsicherheit von {U:Pa} kaum von null zu unterscheiden: länger prüfen.',
+	'note.leak-without-uncertainty': 'Ein Leck von {leak:flow} ohne Unsicherheit zeigt nichts gegen {allowed:flow}.',
+	'note.leak-within': 'Leck {leak:flow} und Unsicherheit {U:flow} liegen in den erlaubten {allowed:flow}.',
+	'note.leak-inside-guard':
+		'Leck {leak:flow} liegt unter den erlaubten {allowed:flow}, mit der Unsicherheit {U:flow} aber nicht.',
+	'note.leak-beyond': 'Leck {leak:flow}, U {U:flow}, ist mehr als die erlaubten {allowed:flow}.',
+	'note.no-swing': 'Der obere Druck muss über dem unteren liegen.',
+	'note.inert-gas-above-target':
+		'Das Inertgas enthält selbst {inert:%} Sauerstoff; {target:%} werden damit nie erreicht.',
+	'note.swing-held':
+		'm = 1 gilt nur, wo jeder Wechsel gehalten und nachgefüllt wird, bis seine Temperatur sich gesetzt hat.',
+	'note.branches-not-swept':
+		'Ein toter Zweig nimmt bei jedem Wechsel sein eigenes Gas zurück: Sauerstoff an seinem Ende messen oder ihn durchspülen.',
+	'note.one-swing-more':
+		'Nach diesen Wechseln liegen {after:%} mit einer Unsicherheit von {U:%} nicht sicher unter {line:%}: einen Wechsel mehr planen.',
+	'note.swings-rounded-up': 'Die Formel ergibt {needed}; nötig sind {swings} ganze Wechsel.',
+	'note.too-few-points': '{count} Punkte sind zu wenige: verlangt sind mindestens {least}.',
+	'note.no-points-downwards': 'Kein Punkt wurde aufwärts und abwärts angefahren: die Hysterese ist nicht gezeigt.',
+	'note.error-over-half': 'Die größte Abweichung {error:%} der Spanne ist mehr als die Hälfte des Erlaubten.',
+	'note.display-seen': 'Was angezeigt wird, sieht aus wie: {seen}, von dem, was aufgegeben wurde.',
+	'note.loop-error-within':
+		'Größte Abweichung {error:%} der Spanne bei {applied:%}, U {U:%}: in den erlaubten {allowed:%}.',
+	'note.loop-error-beyond':
+		'Größte Abweichung {error:%} der Spanne bei {applied:%}, U {U:%}: nicht in den erlaubten {allowed:%}.',
+	'note.acid-dew-point-no-proof': 'Ein Säuretaupunkt ist ein Grund, nach dem Metall zu sehen, kein Nachweis.',
+	'note.correlations-apart': 'Die beiden Gleichungen liegen {apart:K} auseinander.',
 } as const;

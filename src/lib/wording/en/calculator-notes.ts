@@ -72,4 +72,42 @@ export const CALCULATOR_NOTES = {
 	'note.judged-before-it-began': 'It is judged before the purge began.',
 	'note.totaliser-ran-backwards': 'The totaliser went back from {before} to {value}.',
 	'note.basis-needs-moisture': '{tag} reads {basis:basis}, the limit is {limitBasis:basis}: proved moisture is needed.',
+	'note.oxygen-not-below-air':
+		'Oxygen of {oxygen:%} is not below that of the air, {air:%}: nothing can be told from it.',
+	'note.oxygen-falls-along':
+		'The oxygen falls along the way: the analysers or the moments disagree. That is no leak of zero.',
+	'note.leak-not-told-from-zero':
+		'False air {r:%} with an uncertainty of {U:%} cannot be told from zero; that is not tightness.',
+	'note.temperature-swing':
+		'The temperature changed by {swing:K}; more than {most:K} makes the test void: one thermometer is not all the gas.',
+	'note.pressure-rose':
+		'With the temperature taken out the pressure rose by more than its uncertainty: the temperature is not that of the gas. Void, not passed.',
+	'note.walls-flexible': 'Walls that give way change the volume: the pressure tells no leak.',
+	'note.pressure-changed-much':
+		'The pressure changed by {part:%}; beyond {most:%} the leak is no longer that of the test pressure.',
+	'note.temperature-moved': 'The temperature moved by {swing:K}: wait until it rests, or shade the duct.',
+	'note.drop-inside-uncertainty':
+		'The drop of {drop:Pa} with an uncertainty of {U:Pa} is hardly told from zero: test longer.',
+	'note.leak-without-uncertainty': 'A leak of {leak:flow} without an uncertainty shows nothing against {allowed:flow}.',
+	'note.leak-within': 'Leak {leak:flow} and its uncertainty {U:flow} are within the allowed {allowed:flow}.',
+	'note.leak-inside-guard':
+		'Leak {leak:flow} is below the allowed {allowed:flow}, but not with its uncertainty of {U:flow}.',
+	'note.leak-beyond': 'Leak {leak:flow}, U {U:flow}, is more than the allowed {allowed:flow}.',
+	'note.no-swing': 'The upper pressure has to be above the lower one.',
+	'note.inert-gas-above-target': 'The inert gas itself holds {inert:%} of oxygen; {target:%} is never reached with it.',
+	'note.swing-held': 'm = 1 holds only where each swing is held and topped up until its temperature has settled.',
+	'note.branches-not-swept':
+		'A dead-ended branch takes its own gas back at every swing: read the oxygen at its end, or sweep it.',
+	'note.one-swing-more':
+		'After these swings {after:%} with an uncertainty of {U:%} is not surely below {line:%}: plan one swing more.',
+	'note.swings-rounded-up': 'The formula gives {needed}; {swings} whole swings are needed.',
+	'note.too-few-points': '{count} points are too few: at least {least} are asked for.',
+	'note.no-points-downwards': 'No point was taken both upwards and downwards: hysteresis is not shown.',
+	'note.error-over-half': 'The largest error {error:%} of span is more than half of what is allowed.',
+	'note.display-seen': 'What is shown looks like: {seen}, of what was applied.',
+	'note.loop-error-within': 'Largest error {error:%} of span at {applied:%}, U {U:%}: within the allowed {allowed:%}.',
+	'note.loop-error-beyond':
+		'Largest error {error:%} of span at {applied:%}, U {U:%}: not within the allowed {allowed:%}.',
+	'note.acid-dew-point-no-proof': 'An acid dew point is a reason to look at the metal, and no proof.',
+	'note.correlations-apart': 'The two correlations are {apart:K} apart.',
 } as const;
