@@ -8,6 +8,7 @@ const RELEASED = [
 	'acid-dew-points@1',
 	'dew-point-clearance@1',
 	'false-air@1',
+	'inert-stock@1',
 	'loop-check@1',
 	'pressure-decay@1',
 	'purge-adequacy@1',

@@ -7,6 +7,7 @@ import { dewPointClearance } from './moisture/dew-point-clearance';
 import { purgeAdequacy } from './purge/purge-adequacy';
 import { sweepPurge } from './purge/sweep-purge';
 import { swingPurge } from './purge/swing-purge';
+import { inertStock } from './stock/inert-stock';
 import { falseAir } from './tightness/false-air';
 import { pressureDecay } from './tightness/pressure-decay';
 
@@ -15,6 +16,7 @@ export const CATALOGUE: { readonly [idAtVersion: string]: Calculator } = {
 	'acid-dew-points@1': acidDewPoints,
 	'dew-point-clearance@1': dewPointClearance,
 	'false-air@1': falseAir,
+	'inert-stock@1': inertStock,
 	'loop-check@1': loopCheck,
 	'pressure-decay@1': pressureDecay,
 	'purge-adequacy@1': purgeAdequacy,

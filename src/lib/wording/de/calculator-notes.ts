@@ -85,7 +85,7 @@ export const CALCULATOR_NOTES = {
 	'note.temperature-swing':
 		'Die Temperatur änderte sich um {swing:K}; über {most:K} ist die Prüfung ungültig: ein Fühler ist nicht das ganze Gas.',
 	'note.pressure-rose':
-		'Ohne den Anteil der Temperatur stieg der Druck um mehr als seine Unsicherheit: die Temperatur ist nicht die des Gases. Ungültig, nicht bestanden.',
+		'Ohne den Anteil der Temperatur stieg der Druck um mehr als seine Unsicherheit: die Temperatur ist nicht die des Gases. Die Prüfung ist ungültig.',
 	'note.walls-flexible': 'Nachgiebige Wände ändern das Volumen: der Druck verrät dann kein Leck.',
 	'note.pressure-changed-much':
 		'Der Druck änderte sich um {part:%}; über {most:%} gehört das Leck nicht mehr zum Prüfdruck.',
@@ -117,4 +117,9 @@ export const CALCULATOR_NOTES = {
 		'Größte Abweichung {error:%} der Spanne bei {applied:%}, U {U:%}: nicht in den erlaubten {allowed:%}.',
 	'note.acid-dew-point-no-proof': 'Ein Säuretaupunkt ist ein Grund, nach dem Metall zu sehen, kein Nachweis.',
 	'note.correlations-apart': 'Die beiden Gleichungen liegen {apart:K} auseinander.',
+	'note.carbon-dioxide-by-weight':
+		'Kohlendioxid ist in der Flasche flüssig: sein Druck sagt nichts. Wiegen und das Nettogewicht angeben.',
+	'note.stop-above-pressure': 'Der Druck, bei dem Schluss ist, liegt über dem jetzigen: nichts ist nutzbar.',
+	'note.bottles-at-rest':
+		'Gilt für Flaschen in Ruhe: eben entnommen sind sie kalt und zeigen zu wenig, in der Sonne zeigen sie zu viel.',
 } as const;

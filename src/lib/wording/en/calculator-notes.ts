@@ -81,7 +81,7 @@ export const CALCULATOR_NOTES = {
 	'note.temperature-swing':
 		'The temperature changed by {swing:K}; more than {most:K} makes the test void: one thermometer is not all the gas.',
 	'note.pressure-rose':
-		'With the temperature taken out the pressure rose by more than its uncertainty: the temperature is not that of the gas. Void, not passed.',
+		'With the temperature taken out the pressure rose by more than its uncertainty: the temperature is not that of the gas. The test is void.',
 	'note.walls-flexible': 'Walls that give way change the volume: the pressure tells no leak.',
 	'note.pressure-changed-much':
 		'The pressure changed by {part:%}; beyond {most:%} the leak is no longer that of the test pressure.',
@@ -110,4 +110,9 @@ export const CALCULATOR_NOTES = {
 		'Largest error {error:%} of span at {applied:%}, U {U:%}: not within the allowed {allowed:%}.',
 	'note.acid-dew-point-no-proof': 'An acid dew point is a reason to look at the metal, and no proof.',
 	'note.correlations-apart': 'The two correlations are {apart:K} apart.',
+	'note.carbon-dioxide-by-weight':
+		'Carbon dioxide is liquid in the bottle: its pressure tells nothing. Weigh it, and give the net weight.',
+	'note.stop-above-pressure': 'The pressure to stop at is above the one that is there: nothing is usable.',
+	'note.bottles-at-rest':
+		'Holds for bottles at rest: drawn from just now they are cold and read low, in the sun they read high.',
 } as const;
