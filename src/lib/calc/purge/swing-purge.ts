@@ -60,7 +60,7 @@ function compute(given: SwingGiven): Result<Omit<CalcResult, 'calc' | 'constants
 		oxygenAfter: oxygenAfter(swings, values, exponent),
 		inertGas: swings * gasOfOne(values),
 	});
-	const values = { swings, ...model(at) };
+	const values: Numbers = { swings, ...model(at) };
 	const { U, budget, unstated } = propagate(model, inputs);
 	return ok({
 		values: answered(SWING_OUTPUTS, values, U),
