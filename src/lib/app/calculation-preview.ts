@@ -1,7 +1,7 @@
 import { CATALOGUE, runCalculator, type CalcResult, type Calculator } from '../calc';
 import { bindInputs, type Binding, type Step } from '../procedure';
 import { lookupIn } from '../record';
-import { sayRefusal, type Say } from '../wording';
+import { sayRefusal, shownText, type Say } from '../wording';
 import type { OpenStartUp } from './open-start-up.svelte';
 
 /** A calculation as it would come out now: its inputs with their origin, what is missing, its result. Nothing is written. */
@@ -55,7 +55,7 @@ export function previewCalculation(
 		result: result?.ok === true ? result.value : undefined,
 		zero: series !== undefined && 'step' in series ? lookup.series(series.step)?.zero : undefined,
 		typed: Object.entries(step.bind).flatMap(([name, binding]) =>
-			binding.from === 'typed' ? [{ name, title: binding.title }] : [],
+			binding.from === 'typed' ? [{ name, title: shownText(binding.title, say) }] : [],
 		),
 	};
 }
@@ -66,7 +66,7 @@ function originOf(binding: Binding, say: Say): string {
 		case 'limit':
 			return say('app.origin.plant');
 		case 'procedure':
-			return binding.why ?? say('app.origin.procedure');
+			return binding.why === undefined ? say('app.origin.procedure') : shownText(binding.why, say);
 		case 'calibration':
 			return say('app.origin.instrument', { instrument: binding.instrument });
 		case 'typed':

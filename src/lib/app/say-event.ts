@@ -1,12 +1,14 @@
 import { shownUnit } from '../quantity';
 import type { BodyOf, RecordEvent } from '../record';
-import type { Say } from '../wording';
+import { shownText, type Say } from '../wording';
 import { nameOf, type OpenRecord } from './record-words';
 
 /** What an event says, in one line. */
 export function sayEvent(event: RecordEvent, told: OpenRecord, say: Say): string {
-	const titleOf = (id: string): string => told.procedure.steps.find((step) => step.id === id)?.title ?? id;
-	const happened = (what: string): string => told.procedure.plantEvents.find(({ id }) => id === what)?.title ?? what;
+	const titleOf = (id: string): string =>
+		shownText(told.procedure.steps.find((step) => step.id === id)?.title ?? id, say);
+	const happened = (what: string): string =>
+		shownText(told.procedure.plantEvents.find(({ id }) => id === what)?.title ?? what, say);
 	const people = (ids: readonly string[]): string => ids.map((id) => nameOf(told, id)).join(', ');
 	switch (event.kind) {
 		case 'entry': {

@@ -38,3 +38,4 @@ export { bindInputs, type Around, type MissingInput } from './bind-inputs';
 export type { BoundReading, BoundRow, BoundSeries, Lookup } from './lookup';
 export { atPlantPath } from './plant-path';
 export { LIBRARY, libraryFor } from './library';
+export { GERMAN } from './library/inert-start-up/german';

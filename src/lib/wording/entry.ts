@@ -2,6 +2,7 @@ import type { Step } from '../procedure';
 import { shownUnit } from '../quantity';
 import type { BodyOf } from '../record';
 import { counted, isKey, type Say } from './say';
+import { shownText } from './shown-in';
 
 type Entry = BodyOf<'entry'>;
 
@@ -19,7 +20,7 @@ export function sayEntry(body: Entry, step: Step | undefined, say: Say): string 
 		shown.join(', '),
 		...tableOf(body, say),
 		...confirmsOf(body, step, say),
-		choiceOf(body, step),
+		choiceOf(body, step, say),
 	];
 	const beside = [
 		...(body.series === undefined ? [] : [say('entry.series')]),
@@ -54,5 +55,5 @@ function confirmsOf({ confirmed }: Entry, step: Step | undefined, say: Say): rea
 	return [say('entry.confirmed', { n: confirmed.length, all })];
 }
 
-const choiceOf = ({ choice = '' }: Entry, step: Step | undefined): string =>
-	(step?.kind === 'choice' ? step.options.find(({ id }) => id === choice)?.title : undefined) ?? choice;
+const choiceOf = ({ choice = '' }: Entry, step: Step | undefined, say: Say): string =>
+	shownText((step?.kind === 'choice' ? step.options.find(({ id }) => id === choice)?.title : undefined) ?? choice, say);

@@ -19,6 +19,7 @@ export {
 export { duration, momentsAt, type Moments } from './moment';
 export { sayObjection, sayWord, sayWords } from './word';
 export { sayEntry } from './entry';
+export { shownIn, shownText } from './shown-in';
 export { sayCause, type Names } from './cause';
 export { sayNote, sayNumber, withMark, type SeriesClock } from './note';
 export { handOverSummary, type TemporaryState } from './hand-over';

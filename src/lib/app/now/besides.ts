@@ -1,5 +1,5 @@
 import { allOf, headCode, headsOf, millis, otherTablets } from '../../record';
-import type { Moments, Say } from '../../wording';
+import { shownText, type Moments, type Say } from '../../wording';
 import { nameOf, type OpenRecord } from '../record-words';
 
 /** Temporary states, people, refusals and deviations, other tablets: a line each, and "not recorded" where nobody said. */
@@ -27,7 +27,7 @@ function temporary({ siteLog, standing, procedure }: OpenRecord, say: Say, momen
 	const going = standing.plantEvents
 		.filter(({ end, withdrawn }) => end === null && withdrawn !== true)
 		.map(({ what, begin }) => {
-			const title = procedure.plantEvents.find(({ id }) => id === what)?.title ?? what;
+			const title = shownText(procedure.plantEvents.find(({ id }) => id === what)?.title ?? what, say);
 			return say('cause.plant event goes on', { what: title, begin: moments.clock(begin) });
 		});
 	const all = [...states, ...going];

@@ -1,5 +1,5 @@
 import { MINUTE, millis } from '../../record';
-import { duration, type Moments, type Say } from '../../wording';
+import { duration, shownText, type Moments, type Say } from '../../wording';
 import type { OpenRecord } from '../record-words';
 
 /** Proofs that run out by their age, the next one first. */
@@ -19,7 +19,7 @@ export function nextToLapse(
 		.sort((a, b) => a.end - b.end)
 		.map(({ step, title, begin, end, until }) => ({
 			step,
-			title: `${step} ${title}`,
+			title: `${step} ${shownText(title, say)}`,
 			said: say('now.stands for', { time: duration(end - begin) }),
 			when:
 				end - now < 2 * 60 * MINUTE

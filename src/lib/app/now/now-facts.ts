@@ -1,6 +1,6 @@
 import { shownUnit } from '../../quantity';
 import { MINUTE, millis } from '../../record';
-import { sayNumber, type Moments, type Say } from '../../wording';
+import { sayNumber, sayWord, shownText, type Moments, type Say } from '../../wording';
 import { ageOf, nameOf, type OpenRecord } from '../record-words';
 import { besides } from './besides';
 import { inertLeft } from './inert-left';
@@ -99,7 +99,12 @@ function saidBlocking(blocks: Blocking, told: OpenRecord, say: Say, moments: Mom
 	switch (blocks.kind) {
 		case 'step': {
 			const { step, state, last } = blocks;
-			return { state, title: `${step.id} ${step.title}`, said: worked(last, 'now.worked'), step: step.id };
+			return {
+				state,
+				title: `${step.id} ${shownText(step.title, say)}`,
+				said: worked(last, 'now.worked'),
+				step: step.id,
+			};
 		}
 		case 'deviation':
 			return {
@@ -108,7 +113,12 @@ function saidBlocking(blocks: Blocking, told: OpenRecord, say: Say, moments: Mom
 				said: worked(blocks.raised, 'now.owned'),
 			};
 		case 'condition':
-			return { state: 'not yet' as const, title: blocks.title, said: blocks.value, gate: blocks.gate };
+			return {
+				state: 'not yet' as const,
+				title: shownText(blocks.title, say),
+				said: sayWord(blocks.value, say),
+				gate: blocks.gate,
+			};
 		case 'release': {
 			const roles = [...new Set(blocks.roles)].map((role) => role).join(', ');
 			return {

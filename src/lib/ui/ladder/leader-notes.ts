@@ -1,6 +1,6 @@
 import type { Procedure } from '../../procedure';
 import type { Cause, Standing } from '../../record';
-import { sayCause, type Moments, type Say } from '../../wording';
+import { sayCause, shownIn, shownText, type Moments, type Say } from '../../wording';
 import { statesOf, type ShownContact, type ShownRung, type Told } from './shown-rungs';
 
 /** A sentence led to its contact: "Lapsed suction, fan stop 09:14". */
@@ -68,14 +68,16 @@ function stepNote(
 	contact: ShownContact,
 	{ gate }: ShownRung,
 	word: string,
-	{ procedure, standing }: Around,
+	{ procedure, standing, say }: Around,
 	isMeant: (state: string) => boolean,
 ): readonly LeaderNote[] {
 	const found = ofGroup(contact, gate, procedure, standing).find(
 		({ state }) => state !== 'stands' && state !== 'not applicable' && isMeant(state),
 	);
 	const step = procedure.steps.find(({ id }) => id === found?.step);
-	return step === undefined ? [] : [{ contact: contact.id, word, text: `${step.id} ${step.title}`, step: step.id }];
+	return step === undefined
+		? []
+		: [{ contact: contact.id, word, text: `${step.id} ${shownText(step.title, say)}`, step: step.id }];
 }
 
 function lapseNote(contact: ShownContact, { gate }: ShownRung, around: Around): readonly LeaderNote[] {
@@ -83,7 +85,7 @@ function lapseNote(contact: ShownContact, { gate }: ShownRung, around: Around): 
 	const lapsed = ofGroup(contact, gate, procedure, standing).find(({ state }) => state === 'lapsed');
 	const cause = lapsed === undefined ? undefined : firstFact(lapsed.why);
 	if (lapsed === undefined || cause === undefined) return [];
-	const said = sayCause(cause, say, moments, namesOf(procedure));
+	const said = sayCause(cause, say, moments, namesOf(shownIn(procedure, say)));
 	return [{ contact: contact.id, word: say('ui.lead.lapsed'), subject: contact.label, text: said, step: lapsed.step }];
 }
 

@@ -1,7 +1,7 @@
 import { rungsOf, type Contact, type Rung } from '../../drawing';
 import type { Procedure, Step } from '../../procedure';
 import type { GateStanding, Standing, StepStanding } from '../../record';
-import { sayWord, type Moments, type Say } from '../../wording';
+import { sayWord, shownText, type Moments, type Say } from '../../wording';
 import { passes, type CoilState, type ContactState } from './states';
 
 export type ShownContact = {
@@ -36,13 +36,13 @@ export const shownRungs = ({ procedure, standing }: Told, say: Say, moments: Mom
 		const steps = procedure.steps.filter((step) => step.gate === rung.gate);
 		const contacts = rung.contacts.map((contact, i): ShownContact => {
 			const state = stateOf(contact, rung.reached && i === rung.passes && rung.coil !== 'released');
-			const label = contact.of === 'plant' ? say('ui.plant values') : contact.label;
+			const label = contact.of === 'plant' ? say('ui.plant values') : shownText(contact.label, say);
 			return { ...contact, label, state, word: wordOf(contact, state, { steps, standing, say, moments }) };
 		});
 		return {
 			gate: rung.gate,
-			title: rung.title,
-			holdPoint: gate?.holdPoint ?? '',
+			title: shownText(rung.title, say),
+			holdPoint: shownText(gate?.holdPoint ?? '', say),
 			contacts,
 			coil: rung.coil,
 			arrives: rung.reached && rung.passes === contacts.length,

@@ -1,6 +1,6 @@
 import type { Procedure } from '../../procedure';
 import type { Cause, Standing, StepStanding } from '../../record';
-import { sayCause, type Moments, type Say } from '../../wording';
+import { sayCause, shownIn, shownText, type Moments, type Say } from '../../wording';
 import { namesOf } from '../ladder/leader-notes';
 import type { CoilState, ContactState } from '../ladder/states';
 
@@ -32,7 +32,7 @@ function facts(told: Told): readonly ChainItem[] {
 	const seen = new Map<string, ChainItem>();
 	for (const cause of lapsedSteps(told).flatMap(({ why }) => why)) {
 		if (!isFact(cause)) continue;
-		const text = sayCause(cause, say, moments, namesOf(procedure));
+		const text = sayCause(cause, say, moments, namesOf(shownIn(procedure, say)));
 		const id = `${cause.kind} ${text}`;
 		const fact = cause.kind === 'plant event' ? 'red' : 'yellow';
 		if (!seen.has(id)) seen.set(id, { id, title: say('ui.fact', { text }), text: '', mark: { fact } });
@@ -53,11 +53,11 @@ function fallen(told: Told): readonly ChainItem[] {
 	return [...groups].map(([group, steps]): ChainItem => {
 		const [first] = steps;
 		const cause = first?.why[0];
-		const why = cause === undefined ? '' : sayCause(cause, say, moments, namesOf(procedure));
+		const why = cause === undefined ? '' : sayCause(cause, say, moments, namesOf(shownIn(procedure, say)));
 		const state = steps.some((each) => each.state === 'failed') ? 'failed' : 'lapsed';
 		return {
 			id: `group ${group}`,
-			title: group,
+			title: shownText(group, say),
 			text: `${say(`ui.contact.${state}`)}: ${steps.map(({ step }) => step).join(', ')}. ${why}`,
 			mark: { state },
 		};
@@ -69,7 +69,7 @@ const gates = ({ standing, procedure, say, moments }: Told): readonly ChainItem[
 		.filter(({ state }) => state === 'lapsed' || state === 'held' || state === 'refused')
 		.map(({ gate, state, releasedAt }) => ({
 			id: `gate ${gate}`,
-			title: `${say('ui.gate', { gate })} ${procedure.gates.find(({ number }) => number === gate)?.title ?? ''}`,
+			title: `${say('ui.gate', { gate })} ${shownText(procedure.gates.find(({ number }) => number === gate)?.title ?? '', say)}`,
 			text:
 				state === 'lapsed' && releasedAt !== undefined
 					? say('ui.gate.lapsed', { at: moments.clock(releasedAt) })
