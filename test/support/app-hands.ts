@@ -20,8 +20,11 @@ export async function demonstration(page: Page, address: string): Promise<void> 
 	await page.getByRole('heading', { name: /stops at/ }).waitFor({ timeout: LOOKS_LONG });
 }
 
-/** To another address of the app without loading it anew: shifts and what can be taken back live on, as for a person. */
-export async function go(page: Page, path: string): Promise<void> {
+/**
+ * To another address of the app without loading it anew: shifts and what can be taken back live on, as for a person. A touch
+ * that comes while the page is still changing hands is lost, and is made again.
+ */
+export async function go(page: Page, path: string, tries = 3): Promise<void> {
 	await page.evaluate((href) => {
 		const link = document.createElement('a');
 		link.href = href;
@@ -29,7 +32,8 @@ export async function go(page: Page, path: string): Promise<void> {
 		link.click();
 		link.remove();
 	}, path);
-	await page.waitForURL((url) => url.pathname === path, { timeout: 5_000 });
+	const arrives = page.waitForURL((url) => url.pathname === path, { timeout: 4_000 });
+	await (tries > 1 ? arrives.catch(() => go(page, path, tries - 1)) : arrives);
 }
 
 /** The address of the start-up that the page shows. */

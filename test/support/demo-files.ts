@@ -3,8 +3,9 @@ import { join } from 'node:path';
 import { parsePlant, type Plant } from '../../src/lib/plant';
 import { parseProcedure, type Procedure } from '../../src/lib/procedure';
 
-export const readDemo = (file: string): unknown =>
-	JSON.parse(readFileSync(join(import.meta.dirname, '../../static/demo', file), 'utf8'));
+export const DEMO = join(import.meta.dirname, '../../static/demo');
+
+export const readDemo = (file: string): unknown => JSON.parse(readFileSync(join(DEMO, file), 'utf8'));
 
 /** The demonstration unit FM-1; a test that cannot read it has nothing to test. */
 export function demoPlant(): Plant {

@@ -135,7 +135,7 @@ async function fanStop(page: Page, visit: Visit): Promise<void> {
 
 /** Whether an address leads to its page now: some lead elsewhere until the tablet has a site. */
 async function leadsTo(page: Page, path: string): Promise<boolean> {
-	await go(page, path).catch(() => undefined);
+	await go(page, path, 1).catch(() => undefined);
 	await settled(page);
 	return new URL(page.url()).pathname === path;
 }

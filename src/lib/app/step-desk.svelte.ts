@@ -3,6 +3,7 @@ import type { Attachment, DraftKey } from '../store';
 import type { Step } from '../procedure';
 import {
 	guessedColumns,
+	lastTimeAt,
 	parseTrend,
 	tableOf,
 	type SeriesColumn,
@@ -14,7 +15,7 @@ import {
 	type TypedValue,
 } from '../record';
 import { attachSeries, calculate, enter, textOf, type TrendFile } from './entries';
-import type { OpenStartUp } from './open-start-up.svelte';
+import type { OpenStartUp, Seen } from './open-start-up.svelte';
 import { redrawnPhoto } from './photo';
 import type { Problem } from './problem';
 
@@ -26,6 +27,8 @@ export type TypedSoFar = {
 	readonly choice?: string;
 	readonly flow?: 'unbroken' | 'broken' | 'not looked at';
 	readonly begun?: string;
+	/** "02:14": seen before it is typed, as the clock of the plant showed. */
+	readonly seen?: string;
 	readonly inputs?: { readonly [input: string]: string };
 	readonly party?: string;
 	readonly note?: string;
@@ -178,20 +181,28 @@ export class StepDesk {
 		return this.#keep(() => {
 			const { startUp, step } = this;
 			const { note, inputs, photos } = this.#draft;
+			const seen = this.#seen();
 			const said = {
 				...(note === undefined || note.trim() === '' ? {} : { note }),
 				...(photos === undefined || photos.length === 0 ? {} : { attachments: photos }),
 			};
 			if (step.kind === 'calculation')
-				return calculate(startUp, step.id, { ...said, ...(inputs === undefined ? {} : { typed: inputs }) });
+				return calculate(startUp, step.id, { ...said, ...(inputs === undefined ? {} : { typed: inputs }) }, seen);
 			if (step.kind === 'series' && this.#file !== undefined)
 				return attachSeries(startUp, step.id, this.#file, {
 					...(note === undefined ? {} : { note }),
 					reading: this.#draft.series?.reading,
 					columns: this.columns,
 				});
-			return enter(startUp, step.id, { ...typedOf(this.#draft), ...said });
+			return enter(startUp, step.id, { ...typedOf(this.#draft), ...said }, seen);
 		});
+	}
+
+	/** When it was seen, where that was before it is typed: the record keeps both times. */
+	#seen(): Seen {
+		const { startUp } = this;
+		const at = lastTimeAt(this.#draft.seen ?? '', startUp.tablet.clock.now(), startUp.plant.utcOffsetMinutes);
+		return at === undefined ? {} : { observed: startUp.instant(at) };
 	}
 
 	/** What no limit decides: it cannot be done now, or it does not apply here. */

@@ -52,3 +52,4 @@ export { withErrorOff, type AsFoundError } from './error-off';
 export { EnvelopeSchema, type Envelope } from './envelope';
 export { inOrder, Knowledge, merge } from './knowledge';
 export { MINUTE, millis, offsetMinutes, printInstant, type Millis } from './instants';
+export { lastTimeAt } from './last-time-at';

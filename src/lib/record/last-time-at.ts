@@ -1,4 +1,4 @@
-import { MINUTE } from '../../record';
+import { MINUTE } from './instants';
 
 /** The last instant, now or before, at which the clock of the plant showed "HH:MM". */
 export function lastTimeAt(clock: string, now: number, utcOffsetMinutes: number): number | undefined {

@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import { lastTimeAt } from '../../src/lib/ui/acts/last-time-at';
+import { lastTimeAt } from '../../src/lib/record';
 
 const now = Date.parse('2026-03-15T02:30:00+01:00');
 
