@@ -48,12 +48,12 @@ export function sweepCurve(calculator: Calculator, typed: TypedInputs, sweep: Sw
 		all: POINTS,
 		plot: {
 			id: 'sweep',
-			title: output.means,
+			title: calculator.title,
 			x: { label: input.label ?? input.means, unit: shownUnit(unit) },
 			y: { label: output.means, unit: shownUnit(shownIn) },
 			curves: [
 				{
-					...{ id: output.name, label: output.symbol ?? output.name, kind: 'line', decides: true },
+					...{ id: output.name, label: '', kind: 'line', decides: true },
 					x: known.map((point) => point.x),
 					y: known.map((point) => point.y),
 				},
@@ -74,7 +74,10 @@ export function sweepable(
 	calculator: Calculator,
 	typed: TypedInputs,
 ): readonly { readonly input: InputSpec; readonly from: string; readonly to: string }[] {
-	return calculator.inputs.flatMap((input) => {
+	const { inputs, page } = calculator;
+	const order = ({ name }: InputSpec): number => (page.first.includes(name) ? page.first.indexOf(name) : inputs.length);
+	const inOrder = [...inputs].sort((a, b) => order(a) - order(b));
+	return inOrder.flatMap((input) => {
 		const now = parseNumber(typed[input.name]?.text ?? '');
 		if (!isQuantityName(input.quantity) || !now.ok) return [];
 		const around = now.value === 0 ? 1 : Math.abs(now.value) / 2;
