@@ -1,4 +1,4 @@
-import { buildDossier, INKS, signIncrement, type RequiredSignature } from '../lib/dossier';
+import { buildDossier, CLOSING, INKS, signIncrement } from '../lib/dossier';
 import { sha256Hex, readableCode } from '../lib/base';
 import { openGateKey, sign } from '../lib/identity';
 import { inOrder, printEventLine } from '../lib/record';
@@ -6,13 +6,6 @@ import { BUILD, type PlayedStartUp } from '../lib/demo';
 import { must } from '../lib/demo';
 
 type Bytes = Uint8Array<ArrayBuffer>;
-
-/** Who must sign the closed file, in this order. After the last it takes no more. */
-export const CLOSING: readonly RequiredSignature[] = [
-	{ field: 'sig_performed', meaning: 'performed', roles: ['technician', 'shift supervisor', 'commissioning lead'] },
-	{ field: 'sig_reviewed', meaning: 'reviewed', roles: ['commissioning lead', 'process engineer'] },
-	{ field: 'sig_accepted', meaning: 'accepted', roles: ['shift supervisor', 'QA'] },
-];
 
 /** The dossier of a played start-up, closed by the signatures that its file tells of. */
 export async function closedDossier(played: PlayedStartUp): Promise<Bytes> {

@@ -59,7 +59,7 @@ describe('every message', () => {
 /** Messages of only facts and marks, and words that German trade has from English or Latin. */
 const ALIKE = [
 	/^[^a-z]*$/i,
-	/^(?:Name|Person|Tablet|Bytes|SHA-256|PIN|OK|minus|Linear|Code|April|August|September|November)$/,
+	/^(?:Name|Person|Tablet|Bytes|SHA-256|PIN|OK|minus|Linear|Code|Dossier|April|August|September|November)$/,
 	/^\{n\} min$/,
 	/^U \{value\} \{unit\} \(k = 2\)$/,
 ];

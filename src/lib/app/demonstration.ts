@@ -43,7 +43,7 @@ export async function playDemonstration(
 			pin: DEMONSTRATION_PIN,
 			progress: (done, of) => progress({ done, of }),
 		});
-		const kept = await keep(store, played);
+		const kept = await keepPlayed(store, played);
 		if (!kept.ok) return kept;
 		const said = { person: 'TechA', demonstrationPin: DEMONSTRATION_PIN, demonstrationShift: shift };
 		const settings = await writeSettings(store, said);
@@ -118,12 +118,15 @@ async function storyFiles(read: ReadFile, shift: number): Promise<{ readonly rea
 	};
 }
 
-/** The tablet's own row goes last: whoever is interrupted before it has no site yet and begins again. */
-async function keep(
+/**
+ * What one tablet of a played start-up holds becomes what this tablet holds. Its own row goes last: whoever is interrupted
+ * before it has no site yet and begins again.
+ */
+export async function keepPlayed(
 	store: Store,
 	{ site, tablets, play, attachedFiles }: PlayedStartUp,
+	device = play.tablets[0] ?? 'T-1',
 ): Promise<Result<'saved', Problem>> {
-	const [device = 'T-1'] = play.tablets;
 	const certificate = site.tabletCertificate(device);
 	if (certificate === undefined) throw new DemoStopped(`tablet ${device} is not enrolled`);
 	for (const { certificate, gateKey } of site.keysOn(device)) {

@@ -13,7 +13,7 @@ import {
 	type GateSheet,
 	type Statement,
 } from '../record';
-import { declarationOf, releaseStatement, sealStatement, statementVersion, writtenHour, type Say } from '../wording';
+import { declarationOf, releaseStatement, statementVersion, writtenHour, type Say } from '../wording';
 import { BUILD } from '../demo';
 import type { OpenStartUp, Seen } from './open-start-up.svelte';
 import type { Problem } from './problem';
@@ -97,25 +97,6 @@ export async function recordFinding(
 	const seen = observed === undefined ? {} : { observed };
 	const written = await startUp.write('instrument finding', body, { key: key.value }, seen);
 	return written.ok ? ok('signed') : written;
-}
-
-export async function seal(startUp: OpenStartUp, pin: string, say: Say): Promise<Result<'signed', Problem>> {
-	const key = await openKey(startUp, pin);
-	if (!key.ok) return key;
-	const head = await signHead(startUp, 'seal', key.value);
-	if (!head.ok) return head;
-	const heads = Object.fromEntries(
-		[...headsOf(startUp.log)].map(([device, { number, id }]) => [device, { number, id }]),
-	);
-	const { sheet } = sheetOf(startUp, startUp.procedure.gates.at(-1)?.number ?? 0, 'accepted', say);
-	const statement = statementOf(sheet, {
-		text: sealStatement(startUp.id, say),
-		language: say.language,
-		textVersion: statementVersion(say),
-		build: BUILD,
-		declaration: declarationOf(say),
-	});
-	return judgedAct(startUp, key.value, 'seal', 'sealed', { heads, statement });
 }
 
 /** The shift's entry key, delegated by the gate key: one PIN, and entries need no other until the shift is over. */
@@ -221,7 +202,7 @@ export async function judgedAct<K extends EventKind>(
 	return written.ok ? ok('signed') : written;
 }
 
-async function openKey(startUp: OpenStartUp, pin: string): Promise<Result<SigningKey, Problem>> {
+export async function openKey(startUp: OpenStartUp, pin: string): Promise<Result<SigningKey, Problem>> {
 	const { person } = startUp.tablet;
 	return person === undefined ? fail({ kind: 'nobody-chosen' }) : startUp.tablet.openKey(person.person, pin);
 }

@@ -37,7 +37,6 @@ export {
 	recordFinding,
 	refuse,
 	release,
-	seal,
 	sheetOf,
 	type CopySaid,
 	type ShownSheet,
@@ -74,7 +73,12 @@ export { nextStep, StepDesk, type TypedSoFar } from './step-desk.svelte';
 export { previewCalculation, type CalculationPreview } from './calculation-preview';
 export { objectionsNow } from './objections';
 export { copyFile } from './copy-file';
-export { Archive } from './archive.svelte';
+export { objectionsToSeal, seal, sealSheetOf, type ShownSeal } from './seal-act';
+export { leftOnTablet, stillOpen, type StillOpen } from './still-open';
+export { DossierDesk, type ClosingPlace } from './dossier-desk.svelte';
+export { outsideSeal } from './dossier-input';
+export { Archive, type TrustedRoot } from './archive.svelte';
+export { closedFile, sealedRecords, type SealedRecord } from './sealed-records';
 export { checkFile, type CheckedFile } from './check-file';
 export { nowFacts } from './now/now-facts';
 export { logHeads, logLines } from './log-lines';

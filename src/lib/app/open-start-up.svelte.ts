@@ -161,6 +161,7 @@ export class OpenStartUp {
 		const { device, clock } = this.tablet;
 		const person = seen.by ?? this.tablet.person;
 		if (person === undefined) return fail({ kind: 'nobody-chosen' });
+		if (this.isSealed && !MAY_FOLLOW_SEAL.has(kind)) return fail({ kind: 'sealed', startUp: this.id });
 		const entered = this.instant(clock.now());
 		const { observed } = seen;
 		return ok({
@@ -307,5 +308,14 @@ export class OpenStartUp {
 
 const wholeSecond = (at: number): number => Math.floor(at / 1000) * 1000;
 
+/** What changes nothing of what stood at the seal; a finding stands in the site's log. */
+const MAY_FOLLOW_SEAL: ReadonlySet<EventKind> = new Set([
+	'addendum',
+	'chain head',
+	'copy made',
+	'copy received',
+	'instrument finding',
+	'shift key',
+]);
 /** A finding is about the instrument, in every start-up. */
 const SITE_KINDS: ReadonlySet<EventKind> = new Set(['instrument finding']);

@@ -1,3 +1,4 @@
+import type { DossierError } from '../dossier';
 import type { ResumeCodeError } from '../identity';
 import type { ComposeError, SeriesError, TrendError } from '../record';
 import type { CannotOpen, ChainMovedOn, StorageError } from '../store';
@@ -38,4 +39,12 @@ export type Problem =
 	| { readonly kind: 'refused-act'; readonly because: readonly string[] }
 	/** The record went on after the sheet was made: it is shown anew before anybody signs. */
 	| { readonly kind: 'sheet-changed' }
+	/** The dossier is made of a sealed record alone. */
+	| { readonly kind: 'not-sealed-yet'; readonly startUp: string }
+	| { readonly kind: 'dossier-refused'; readonly error: DossierError }
+	| { readonly kind: 'signing-refused'; readonly because: string }
+	/** Has no role for it, gave another signature of this file, or has no key here. */
+	| { readonly kind: 'not-this-signature'; readonly person: string; readonly meaning: string }
+	| { readonly kind: 'no-root-in-file'; readonly name: string }
+	| { readonly kind: 'work-stopped'; readonly because: string }
 	| { readonly kind: 'demonstration-stopped'; readonly because: string };

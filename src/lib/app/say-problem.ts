@@ -1,5 +1,6 @@
 import { unreachable } from '../base';
-import { duration, sayObjection, sayRefusal, sayTrendError, sayWords, type Say } from '../wording';
+import type { DossierError } from '../dossier';
+import { duration, sayEventError, sayObjection, sayRefusal, sayTrendError, sayWords, type Say } from '../wording';
 import type { Problem } from './problem';
 
 /** What happened, what is safe, what to do: one sentence or two for every problem. */
@@ -71,7 +72,17 @@ export function sayProblem(problem: Problem, say: Say): string {
 		case 'no-shift':
 		case 'shift-covered':
 			return say(`problem.${problem.kind}`, { person: problem.person });
+		case 'work-stopped':
+		case 'signing-refused':
+			return say(`problem.${problem.kind}`, { because: problem.because });
+		case 'not-this-signature':
+			return say('problem.not-this-signature', { person: problem.person, meaning: problem.meaning });
+		case 'no-root-in-file':
+			return say('problem.no-root-in-file', { name: problem.name });
+		case 'dossier-refused':
+			return say('problem.dossier-refused', { because: sayDossierError(problem.error, say) });
 		case 'no-such-start-up':
+		case 'not-sealed-yet':
 		case 'sealed':
 			return say(`problem.${problem.kind}`, { startUp: problem.startUp });
 		case 'start-up-unreadable':
@@ -93,5 +104,22 @@ export function sayProblem(problem: Problem, say: Say): string {
 			return say('problem.demonstration-stopped', { because: problem.because });
 		default:
 			return unreachable(problem);
+	}
+}
+
+/** Why no dossier can be made of a record, as the end of a sentence. */
+function sayDossierError(error: DossierError, say: Say): string {
+	switch (error.kind) {
+		case 'after-the-seal':
+			return say('dossier.after-the-seal', { n: error.events.length });
+		case 'no-glyph':
+			return say('dossier.no-glyph', { code: error.codePoint, text: error.text });
+		case 'not-one-opening':
+			return say('dossier.not-one-opening', { found: error.found });
+		case 'not-sealed':
+		case 'no-signature-asked-for':
+			return say(`dossier.${error.kind}`);
+		default:
+			return sayEventError(error, say);
 	}
 }

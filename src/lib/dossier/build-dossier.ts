@@ -1,6 +1,6 @@
 import type { Result } from '../base';
 import { processSketch, type Drawing, type Timeline } from '../drawing';
-import type { DossierError, DossierInput } from './input';
+import type { DossierError, DossierInput, Progress } from './input';
 import { measure } from './fonts/faces';
 import { Flow } from './layout/flow';
 import { frameShapes } from './layout/title-block';
@@ -26,13 +26,17 @@ import { timelineOf } from './story/timeline';
  * The dossier of one sealed start-up, before anybody signed it: the base revision, to which each closing signature adds one
  * update. A function of its input alone: the same record makes the same bytes, in Node and in a browser (SPEC.md, D1).
  */
-export async function buildDossier(input: DossierInput): Promise<Result<Uint8Array<ArrayBuffer>, DossierError>> {
+export async function buildDossier(
+	input: DossierInput,
+	progress: Progress = () => undefined,
+): Promise<Result<Uint8Array<ArrayBuffer>, DossierError>> {
 	const told = storyOf(input);
 	if (!told.ok) return told;
 	const story = told.value;
 	const manifest = manifestOf(story);
-	const sheets = framed(layOut(story, manifest), story, manifest);
+	const sheets = framed(layOut(story, manifest, progress), story, manifest);
 	return writePdf({
+		progress,
 		sheets,
 		attachments: manifest.attachments,
 		metadata: {
@@ -56,37 +60,48 @@ function picturesOf(story: Story): Pictures {
 }
 
 /** Laid out until every pointer names the sheet that it means: twice, unless pointing moved something. */
-function layOut(story: Story, manifest: Manifest): readonly Sheet[] {
+function layOut(story: Story, manifest: Manifest, progress: Progress): readonly Sheet[] {
 	const pictures = picturesOf(story);
 	let anchors = new Anchors();
 	let flow = new Flow();
 	for (let round = 0; round < ROUNDS; round++) {
 		flow = new Flow();
 		const next = new Anchors(anchors.marked);
-		chapters(flow, story, { manifest, pictures, anchors: next });
+		chapters(flow, story, { manifest, pictures, anchors: next, progress: round === 0 ? progress : () => undefined });
 		if (next.settled) break;
 		anchors = next;
 	}
 	return flow.sheets;
 }
 
-type Beside = { readonly manifest: Manifest; readonly pictures: Pictures; readonly anchors: Anchors };
+type Beside = {
+	readonly manifest: Manifest;
+	readonly pictures: Pictures;
+	readonly anchors: Anchors;
+	readonly progress: Progress;
+};
 
-function chapters(flow: Flow, story: Story, { manifest, pictures, anchors }: Beside): void {
-	cover(flow, story);
-	holdPoints(flow, story, anchors, pictures.sketch);
-	timeline(flow, story, pictures.timeline);
-	for (const { number } of story.input.procedure.gates) {
-		const before = flow.sheets.length;
-		gatePages(flow, story, number);
-		anchors.mark(`gate ${number}`, before + 1);
+function chapters(flow: Flow, story: Story, { manifest, pictures, anchors, progress }: Beside): void {
+	const all: readonly (() => void)[] = [
+		() => cover(flow, story),
+		() => holdPoints(flow, story, anchors, pictures.sketch),
+		() => timeline(flow, story, pictures.timeline),
+		...story.input.procedure.gates.map(({ number }) => () => {
+			const before = flow.sheets.length;
+			gatePages(flow, story, number);
+			anchors.mark(`gate ${number}`, before + 1);
+		}),
+		() => calculations(flow, story, anchors),
+		() => happenings(flow, story),
+		() => refusals(flow, story),
+		() => peopleAndTablets(flow, story),
+		() => instruments(flow, story),
+		() => signatures(flow, story, manifest),
+	];
+	for (const [done, chapter] of all.entries()) {
+		progress('chapter', done, all.length);
+		chapter();
 	}
-	calculations(flow, story, anchors);
-	happenings(flow, story);
-	refusals(flow, story);
-	peopleAndTablets(flow, story);
-	instruments(flow, story);
-	signatures(flow, story, manifest);
 }
 
 const ROUNDS = 4;

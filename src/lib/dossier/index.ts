@@ -4,7 +4,8 @@
  * May import: every room below, never verify.
  */
 export { buildDossier } from './build-dossier';
-export type { DossierError, DossierInput, RequiredSignature } from './input';
+export { CLOSING } from './closing';
+export type { DossierError, DossierInput, Progress, RequiredSignature } from './input';
 export { INKS } from './fonts/inks';
 export type { Ink, Inks, NoGlyph } from './sign/ink';
 export type { Point } from './sign/appearance';

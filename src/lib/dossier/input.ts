@@ -35,6 +35,9 @@ export type RequiredSignature = {
 	readonly roles: readonly string[];
 };
 
+/** How far the writing of a dossier is: told to whoever waits for it, and no part of its bytes. */
+export type Progress = (part: 'chapter' | 'sheet' | 'file', done: number, of: number) => void;
+
 export type DossierError =
 	| (EventError & { readonly log: 'start-up' | 'site' })
 	| { readonly kind: 'not-one-opening'; readonly found: number }

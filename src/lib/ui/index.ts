@@ -16,6 +16,7 @@ export { default as UndoBar } from './parts/UndoBar.svelte';
 export { default as UprightContact } from './parts/UprightContact.svelte';
 export { default as UprightMark } from './parts/UprightMark.svelte';
 export { default as WarnLine } from './parts/WarnLine.svelte';
+export { default as WorkProgress } from './parts/WorkProgress.svelte';
 
 export { default as DrawingView } from './drawn/DrawingView.svelte';
 export { default as PlotView } from './drawn/PlotView.svelte';
@@ -47,6 +48,8 @@ export { default as WitnessBody } from './step/WitnessBody.svelte';
 
 export { default as PinField } from './acts/PinField.svelte';
 export { default as RefusalAnswer } from './acts/RefusalAnswer.svelte';
+export { default as ClosingSign } from './acts/ClosingSign.svelte';
+export { default as SealSheet } from './acts/SealSheet.svelte';
 export { default as SigningSheet } from './acts/SigningSheet.svelte';
 export { default as DeviationSheet } from './acts/DeviationSheet.svelte';
 export { default as HappenedSheet } from './acts/HappenedSheet.svelte';
@@ -61,7 +64,11 @@ export { default as SweepSheet } from './calculators/SweepSheet.svelte';
 export { findCalculators } from './calculators/find-calculators';
 
 export { default as ArchiveDrop } from './pages/ArchiveDrop.svelte';
+export { default as ArchiveFiles } from './pages/ArchiveFiles.svelte';
+export { default as SealedRecords } from './pages/SealedRecords.svelte';
+export { default as TrustRoot } from './pages/TrustRoot.svelte';
 export { default as DeviationList } from './pages/DeviationList.svelte';
+export { default as DossierSheet } from './pages/DossierSheet.svelte';
 export { default as LapsedPage } from './pages/LapsedPage.svelte';
 export { default as LogView } from './pages/LogView.svelte';
 export type { LogLine } from './pages/log-line';

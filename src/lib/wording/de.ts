@@ -13,6 +13,7 @@ import { OPEN } from './de/open';
 import { PLANT } from './de/plant';
 import { SCREEN_ACTS } from './de/screen-acts';
 import { SCREEN_CALCULATORS } from './de/screen-calculators';
+import { SCREEN_DOSSIER } from './de/screen-dossier';
 import { SCREEN_ENTRIES } from './de/screen-entries';
 import { SCREEN_FRAME } from './de/screen-frame';
 import { SCREEN_LINE } from './de/screen-line';
@@ -61,6 +62,7 @@ export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...SCREEN_LOG,
 	...SCREEN_NOW,
 	...SCREEN_PAGES,
+	...SCREEN_DOSSIER,
 	...SETTINGS,
 	...SCREEN_CALCULATORS,
 	...BEGIN,

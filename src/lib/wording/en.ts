@@ -15,6 +15,7 @@ import { SCREEN_ACTS } from './en/screen-acts';
 import { SCREEN_ENTRIES } from './en/screen-entries';
 import { SCREEN_FRAME } from './en/screen-frame';
 import { SCREEN_CALCULATORS } from './en/screen-calculators';
+import { SCREEN_DOSSIER } from './en/screen-dossier';
 import { SCREEN_LINE } from './en/screen-line';
 import { SCREEN_LOG } from './en/screen-log';
 import { SCREEN_NOW } from './en/screen-now';
@@ -47,6 +48,7 @@ export const EN = {
 	...SCREEN_LOG,
 	...SCREEN_NOW,
 	...SCREEN_PAGES,
+	...SCREEN_DOSSIER,
 	...SETTINGS,
 	...SCREEN_CALCULATORS,
 	...BEGIN,

@@ -31,7 +31,6 @@ export const SCENES = [
 	'watch',
 	'witness',
 	'review',
-	'earlier entries',
 	'sign',
 	'sign not ready',
 	'lapsed',
@@ -52,6 +51,10 @@ export const SCENES = [
 	'calculator with surfaces',
 	'calculator of data',
 	'archive',
+	'archive files',
+	'seal',
+	'seal open',
+	'dossier',
 	'storage',
 	'sketch',
 ] as const;

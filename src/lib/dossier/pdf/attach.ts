@@ -1,5 +1,6 @@
 import { PDFDict, PDFHexString, PDFName, PDFString, type PDFArray, type PDFDocument } from 'pdf-lib';
 import { toHex } from '../../base';
+import type { Progress } from '../input';
 
 /** A file that travels inside the dossier. */
 export type Attachment = {
@@ -13,12 +14,17 @@ export type Attachment = {
 };
 
 /** Puts files into the document as associated files (PDF/A-3: ISO 19005-3, 6.8), in the order of their names. */
-export function attach(pdf: PDFDocument, attachments: readonly Attachment[], date: string): void {
+export function attach(
+	pdf: PDFDocument,
+	attachments: readonly Attachment[],
+	{ date, progress }: { readonly date: string; readonly progress: Progress },
+): void {
 	const { context, catalog } = pdf;
 	const sorted = [...attachments].sort((a, b) => (a.name < b.name ? -1 : 1));
 	const names: PDFArray = context.obj([]);
 	const associated: PDFArray = context.obj([]);
-	for (const { name, mediaType, description, relation, bytes } of sorted) {
+	for (const [done, { name, mediaType, description, relation, bytes }] of sorted.entries()) {
+		progress('file', done, sorted.length);
 		if (!/^[A-Za-z0-9][A-Za-z0-9.-]*$/.test(name)) throw new TypeError(`no name for a file inside a PDF: ${name}`);
 		const stream = context.flateStream(bytes, {
 			Type: 'EmbeddedFile',

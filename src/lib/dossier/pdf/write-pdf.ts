@@ -1,5 +1,6 @@
 import { PDFDocument, PDFName, type PDFPage, type PDFRef } from 'pdf-lib';
 import { ok, utf8, type Result } from '../../base';
+import type { Progress } from '../input';
 import { FACES } from '../fonts/faces';
 import { INKS } from '../fonts/inks';
 import type { Sheet } from '../layout/sheet';
@@ -17,6 +18,7 @@ export type Document = {
 	readonly metadata: Metadata;
 	/** "Not signed", in the language of the dossier. */
 	readonly unsigned: string;
+	readonly progress: Progress;
 };
 
 /**
@@ -29,7 +31,8 @@ export async function writePdf(document: Document): Promise<Result<Uint8Array<Ar
 	const fonts: { [resource: string]: PDFRef } = {};
 	for (const [name, face] of Object.entries(FACES)) fonts[name] = embedFace(context, face);
 	const pages: { readonly page: PDFPage; readonly sheet: Sheet }[] = [];
-	for (const sheet of document.sheets) {
+	for (const [done, sheet] of document.sheets.entries()) {
+		document.progress('sheet', done, document.sheets.length);
 		const content = contentOf(sheet.shapes, PAPER.height);
 		if (!content.ok) return content;
 		const page = pdf.addPage([PAPER.width, PAPER.height]);
@@ -47,7 +50,7 @@ export async function writePdf(document: Document): Promise<Result<Uint8Array<Ar
 	);
 	const added = addSignatureFields(pdf, { fields, words: document.unsigned, inks: INKS, fonts });
 	if (!added.ok) return added;
-	attach(pdf, document.attachments, pdfDate(document.metadata.date));
+	attach(pdf, document.attachments, { date: pdfDate(document.metadata.date), progress: document.progress });
 	describe(pdf, document.metadata);
 	const bytes = await pdf.save({
 		useObjectStreams: false,

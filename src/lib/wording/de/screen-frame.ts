@@ -9,6 +9,7 @@ export const SCREEN_FRAME: { readonly [key in keyof typeof EN]: string } = {
 	'ui.frame.deviations': 'Abweichungen',
 	'ui.frame.log': 'Protokoll',
 	'ui.frame.hand-over': 'Übergabe',
+	'ui.frame.dossier': 'Dossier',
 	'ui.frame.happened': 'Etwas ist geschehen',
 	'ui.frame.about': 'Über die App',
 };

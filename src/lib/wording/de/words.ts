@@ -76,5 +76,6 @@ export const WORDS: { readonly [key in keyof typeof EN]: string } = {
 	'objection.no slot': 'keine fehlende Unterschrift dieser Stufe kann {person} geben',
 	'objection.no gate': 'die Anfahrvorschrift hat keine Stufe {gate}',
 	'objection.may not refuse': '{person} hat keine Rolle, die diese Stufe verweigern darf',
+	'objection.may not seal': '{person} hat keine Rolle, die versiegeln darf',
 	'objection.no releasing role': '{person} hat keine freigebende Rolle',
 };

@@ -7,6 +7,7 @@ export const SCREEN_FRAME = {
 	'ui.frame.deviations': 'Deviations',
 	'ui.frame.log': 'Log',
 	'ui.frame.hand-over': 'Hand-over',
+	'ui.frame.dossier': 'Dossier',
 	'ui.frame.happened': 'Something happened',
 	'ui.frame.about': 'About Gatehold',
 } as const;

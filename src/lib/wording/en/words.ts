@@ -74,5 +74,6 @@ export const WORDS = {
 	'objection.no slot': "no missing signature of this gate is {person}'s to give",
 	'objection.no gate': 'the procedure has no gate {gate}',
 	'objection.may not refuse': '{person} has no role that may refuse this gate',
+	'objection.may not seal': '{person} has no role that may seal',
 	'objection.no releasing role': '{person} has no releasing role',
 } as const;
