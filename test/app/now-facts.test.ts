@@ -1,47 +1,20 @@
-import { readFileSync } from 'node:fs';
-import { join } from 'node:path';
 import { beforeAll, describe, expect, test } from 'vitest';
 import { nowFacts } from '../../src/lib/app';
 import { MACHINES, plantStates } from '../../src/lib/app/now/plant-state';
 import { inertLeft } from '../../src/lib/app/now/inert-left';
 import { worstOxygen } from '../../src/lib/app/now/oxygen';
 import { whatBlocks } from '../../src/lib/app/now/what-blocks';
-import { playStartUp } from '../../src/lib/demo';
 import { LIBRARY } from '../../src/lib/procedure';
-import { allOf, millis, parseTrend, printInstant, standing } from '../../src/lib/record';
+import { standing } from '../../src/lib/record';
 import { momentsAt, speaker } from '../../src/lib/wording';
-import { value } from '../support/test-site';
+import { toldNight, type At } from '../support/told-night';
 
-const FOLDER = join(import.meta.dirname, '../../static/demo');
 const say = speaker('en');
 const moments = momentsAt(60, say);
 
-/** The start-up of the demonstration as it stood at a moment of its story. */
-type At = (moment: string) => Parameters<typeof nowFacts>[0];
 let at: At;
-
 beforeAll(async () => {
-	const { procedure, plant, tablets, play } = await playStartUp({
-		read: (name) => new Uint8Array(readFileSync(join(FOLDER, name))),
-	});
-	const held = play.tablets.flatMap((tablet) => tablets.held(tablet));
-	const all = [...new Map(held.map((event) => [event.id, event])).values()];
-	const trendOf = (file: string) => value(parseTrend(readFileSync(join(FOLDER, 'trends', file), 'utf8'), 60));
-	const trends = new Map(
-		allOf(all, 'series attached').map(({ body }) => [body.attachment.hash, trendOf(body.attachment.name)]),
-	);
-	at = (moment) => {
-		const until = millis(moment);
-		const events = all.filter(({ log, enteredAt }) => log === play.startUp && enteredAt <= until);
-		const siteLog = all.filter(({ log, enteredAt }) => log !== play.startUp && enteredAt <= until);
-		const opened = allOf(events, 'start-up opened')[0];
-		if (opened === undefined) throw new Error('the start-up was not opened by then');
-		return {
-			...{ procedure, plant, opened, events, siteLog, trends, device: 'T-1' },
-			standing: standing(procedure, events, siteLog, moment),
-			instant: (when = until) => printInstant(when, 60),
-		};
-	};
+	at = await toldNight();
 }, 120_000);
 
 const stateOf = (moment: string) =>

@@ -38,7 +38,7 @@ export async function tour(page: Page, address: string, visit: Visit): Promise<v
 	await visit('outline');
 	const startUp = startUpOf(page);
 	for (const path of topPlaces()) {
-		if (path !== '/' && (await leadsTo(page, path))) await visit(nameOf(path));
+		if (await leadsTo(page, path)) await visit(nameOf(path));
 	}
 	await go(page, '/calculators/purge-adequacy');
 	await settled(page);

@@ -88,3 +88,6 @@ export { asHash, fromHash, keptCases, type Shelf } from './calculator-shelf';
 export { sayPlan } from './say-plan';
 export { sweepable } from './sweep-curve';
 export { stepsThatUse, useInStep, type UsableStep } from './use-in-step';
+export { Overview, type Listed } from './overview.svelte';
+export { blockingOf } from './now/now-facts';
+export { runsOut, waitsFor, type RunsOut, type Waiting } from './waits';

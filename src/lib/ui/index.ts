@@ -24,6 +24,8 @@ export { default as PlotView } from './drawn/PlotView.svelte';
 export { default as LadderView } from './ladder/LadderView.svelte';
 export { default as LineView } from './ladder/LineView.svelte';
 export { default as OutlineView } from './ladder/OutlineView.svelte';
+export { gateMarks } from './ladder/gate-marks';
+export { default as StartUpRung } from './ladder/StartUpRung.svelte';
 export { rungInWork, shownRungs, stopsAt, type ShownRung } from './ladder/shown-rungs';
 export { leaderNotes, namesOf } from './ladder/leader-notes';
 
@@ -83,3 +85,5 @@ export { default as VerifyReport } from './pages/VerifyReport.svelte';
 
 export { default as PersonForm } from './site/PersonForm.svelte';
 export { default as PlantItem } from './site/PlantItem.svelte';
+export { default as WaitRows } from './pages/WaitRows.svelte';
+export type { WaitRow } from './pages/wait-row';

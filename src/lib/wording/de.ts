@@ -23,6 +23,7 @@ import { SCREEN_PAGES } from './de/screen-pages';
 import { SCREEN_STEPS } from './de/screen-steps';
 import { SETTINGS } from './de/settings';
 import { STATEMENTS } from './de/statements';
+import { SCREEN_TODAY } from './de/screen-today';
 import { STATES } from './de/states';
 import { WORDS } from './de/words';
 import type { EN } from './en';
@@ -58,6 +59,7 @@ export const DE: { readonly [key in keyof typeof EN]: string } = {
 	...HAND_OVER,
 	...PEOPLE,
 	...SCREEN_ENTRIES,
+	...SCREEN_TODAY,
 	...SCREEN_ACTS,
 	...SCREEN_LOG,
 	...SCREEN_NOW,

@@ -23,6 +23,7 @@ import { SCREEN_PAGES } from './en/screen-pages';
 import { SCREEN_STEPS } from './en/screen-steps';
 import { SETTINGS } from './en/settings';
 import { STATEMENTS } from './en/statements';
+import { SCREEN_TODAY } from './en/screen-today';
 import { STATES } from './en/states';
 import { WORDS } from './en/words';
 
@@ -44,6 +45,7 @@ export const EN = {
 	...HAND_OVER,
 	...PEOPLE,
 	...SCREEN_ENTRIES,
+	...SCREEN_TODAY,
 	...SCREEN_ACTS,
 	...SCREEN_LOG,
 	...SCREEN_NOW,

@@ -14,17 +14,23 @@ export function nowFacts(told: OpenRecord, say: Say, moments: Moments) {
 	const states = plantStates(told.events, told.standing);
 	const oxygen = saidOxygen(told, say, moments);
 	const inert = saidInert(told, states, say, moments);
-	const blocks = whatBlocks(told);
+	const blocks = blockingOf(told, say, moments);
 	const stale = saidStale(told, say);
 	return {
 		plant: (Object.keys(MACHINES) as Machine[]).map((machine) => saidMachine(machine, states, told, say, moments)),
 		...(oxygen === undefined ? {} : { oxygen }),
 		...(inert === undefined ? {} : { inert }),
-		...(blocks === undefined ? {} : { blocks: saidBlocking(blocks, told, say, moments) }),
+		...(blocks === undefined ? {} : { blocks }),
 		nextToLapse: nextToLapse(told, say, moments).slice(0, 3),
 		besides: besides(told, say, moments),
 		...(stale === undefined ? {} : { stale }),
 	};
+}
+
+/** The one thing at which the line of a start-up ends, in words. */
+export function blockingOf(told: OpenRecord, say: Say, moments: Moments) {
+	const blocks = whatBlocks(told);
+	return blocks === undefined ? undefined : saidBlocking(blocks, told, say, moments);
 }
 
 function saidMachine(
@@ -91,7 +97,8 @@ function saidInert(told: OpenRecord, states: readonly MachineState[], say: Say, 
 	};
 }
 
-function saidBlocking(blocks: Blocking, told: OpenRecord, say: Say, moments: Moments) {
+/** The one thing that blocks as a title, who is on it, and where to go on. */
+export function saidBlocking(blocks: Blocking, told: OpenRecord, say: Say, moments: Moments) {
 	const worked = (by: { readonly person: string; readonly at: string } | undefined, key: 'now.worked' | 'now.owned') =>
 		by === undefined
 			? say('now.nobody on it')

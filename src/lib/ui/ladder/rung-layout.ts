@@ -60,7 +60,7 @@ function withNames(
 }
 
 /** In lines of at most this width; the letters are the narrow ones. */
-function wrapped(label: string, width: number): readonly string[] {
+export function wrapped(label: string, width: number): readonly string[] {
 	const lines: string[] = [];
 	for (const word of label.split(' ')) {
 		const last = lines.at(-1);

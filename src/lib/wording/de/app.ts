@@ -85,7 +85,6 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'app.pin of demonstration': 'Vorführung: alle haben hier die PIN {pin}.',
 	'app.facts': '{id}. Anfahrvorschrift {procedure}, Revision {revision}. {at}.',
 	'app.opened': 'Eröffnet {at}, {n} Ereignisse',
-	'app.sealed': 'versiegelt',
 	'app.taken back': '{what} gespeichert.',
 	'app.held entry': 'Schritt {step}',
 	'app.held other': 'Dies',

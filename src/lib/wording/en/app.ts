@@ -71,7 +71,6 @@ export const APP = {
 	'app.pin of demonstration': 'Demonstration: everybody here has the PIN {pin}.',
 	'app.facts': '{id}. Procedure {procedure}, revision {revision}. {at}.',
 	'app.opened': 'Opened {at}, {n} events',
-	'app.sealed': 'sealed',
 	'app.taken back': '{what} saved.',
 	'app.held entry': 'Step {step}',
 	'app.held other': 'This',

@@ -1,0 +1,33 @@
+import type { SCREEN_TODAY as EN } from '../en/screen-today';
+
+/** Heute: was läuft, was auf den wartet, der das Tablet hat, und was abläuft. */
+export const SCREEN_TODAY: { readonly [key in keyof typeof EN]: string } = {
+	'today.waits for you': '{unit} wartet',
+	'today.nothing waits': 'Nichts wartet',
+	'today.running': 'Laufende Anfahrvorgänge: {n}',
+	'today.waits': 'Wartet',
+	'today.nothing': 'Kein Schritt, kein Haltepunkt, keine Verweigerung und keine Abweichung wartet.',
+	'today.who': 'Erst sagen, wer das Tablet hat; dann steht hier, was wartet.',
+	'today.stands': 'Gilt, aber nicht für immer',
+	'today.nothing runs out': 'Nichts Aufgezeichnetes läuft durch sein Alter ab.',
+	'today.in unit': '{what}, Anlage {unit}',
+	'today.release': 'Stufe {gate} freigeben',
+	'today.answer': 'Verweigerung der Stufe {gate} beantworten',
+	'today.lapsed': 'Neu zu führende Nachweise: {n}',
+	'today.begin with': 'Beginnen mit {step}',
+	'today.about': 'etwa {time}',
+	'today.deviation': 'Abweichung {deviation}',
+	'today.blocks gate': 'Sperrt Stufe {gate}',
+	'today.blocks hand-over': 'Sperrt die Übergabe',
+	'today.blocks nothing': 'Sperrt nichts',
+	'today.due': 'fällig {at}',
+	'today.calibration': 'Kalibrierung von {instrument}',
+	'today.ended': 'endete {day}',
+	'today.in days': 'in {n} Tagen',
+	'today.only here': 'Aufzeichnung ohne zweite Kopie',
+	'today.only here said': '{n} Ereignisse nur auf diesem Tablet',
+	'today.handed over': 'Übergeben',
+	'today.next': 'Weiter: {what}',
+	'today.older': 'Ältere zeigen: {n}',
+	'today.sealed': 'Versiegelt. {n} Ereignisse.',
+};
