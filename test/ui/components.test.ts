@@ -139,3 +139,31 @@ test('the tablet is taken by one touch, without a PIN; a destroyed key cannot ta
 	expect(await page.getByRole('button', { name: 'Tove Lindgren' }).isDisabled()).toBe(true);
 	expect(await told()).toEqual(['SupA takes', 'TechA ends']);
 });
+
+test('the power line runs on when more stands and is withdrawn when it lapses; who wants no motion sees none', async () => {
+	const { page, show } = gallery;
+	const moving = () => page.evaluate(() => document.getAnimations().map(({ effect }) => effect?.getTiming().duration));
+	await show('moving ladder', 'tablet');
+	expect(await moving()).toEqual([]);
+	await page.getByRole('button', { name: 'Move' }).click();
+	expect(new Set(await moving())).toEqual(new Set([500, 200]));
+	await page.waitForFunction(() => document.getAnimations().length === 0);
+	await page.getByRole('button', { name: 'Move' }).click();
+	expect(new Set(await moving())).toEqual(new Set([250]));
+	await page.waitForFunction(() => document.getAnimations().length === 0);
+	await page.emulateMedia({ reducedMotion: 'reduce' });
+	await page.getByRole('button', { name: 'Move' }).click();
+	expect(await moving()).toEqual([]);
+	await page.emulateMedia({ reducedMotion: null });
+});
+
+test('on a phone three words stand at the thumb; the third opens the other places and shuts again', async () => {
+	const { page, show } = gallery;
+	await show('start-up places', 'phone');
+	const places = page.getByRole('navigation', { name: 'Places of start-up FM-1/2026-03-14' });
+	expect(await places.getByRole('link').allTextContents()).toEqual(['Line', 'Something happened']);
+	await places.getByRole('button', { name: 'More' }).click();
+	expect(await places.getByRole('link', { name: 'Lapsed 14' }).getAttribute('aria-current')).toBe('page');
+	await page.keyboard.press('Escape');
+	expect(await places.getByRole('link', { name: 'Lapsed 14' }).isVisible()).toBe(false);
+});

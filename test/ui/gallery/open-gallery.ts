@@ -10,6 +10,9 @@ import type { GalleryPage } from './main';
 import { galleryData } from './moments-of-the-night';
 
 export const SCENES = [
+	'today',
+	'start-up places',
+	'moving ladder',
 	'start-up',
 	'line-up ladder',
 	'refused ladder',
