@@ -116,7 +116,7 @@ function deviations(told: OpenRecord, person: string, say: Say, moments: Moments
 			if (raised?.kind !== 'deviation raised' || (raised.body.owner ?? raised.person) !== person) return [];
 			const { title, due } = raised.body;
 			const what =
-				typeof blocks === 'number' ? say('today.blocks gate', { gate: blocks }) : say(`today.blocks ${blocks}`);
+				typeof blocks === 'number' ? say('today.blocks gate', { gate: blocks }) : say(`today.blocks.${blocks}`);
 			return [
 				{
 					id: deviation,
