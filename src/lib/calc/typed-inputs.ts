@@ -31,7 +31,7 @@ export function usualUnit({ typedIn, quantity: said }: Pick<InputPart, 'typedIn'
 }
 
 // A temperature in degC, an oxygen in %, a duct in mm. A fraction may be a factor: it says by itself what it is typed in.
-const USUAL = ['degC', '%', 'mm', 'm3(n)/h', 'm3/h', 'hPa(a)', 'min', 'mA', '%span'];
+const USUAL = ['degC', '%', 'mm', 'm3(n)/h', 'm3/h', 'hPa(a)', 'min', 'mA', '%span', '1/h'];
 
 /** An input, an output or a part of one in words, by the name that results and refusals use: "volumes.MILL", "leak.flow". */
 export function titleOf({ inputs, outputs }: Calculator, name: string): string {

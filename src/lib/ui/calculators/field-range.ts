@@ -20,10 +20,13 @@ export function rangeOf({ quantity, min, max }: InputPart, unit: string, say: Sa
 		return value.ok && Math.abs(value.value) < BEYOND_WORDS ? sayNumber(value.value, say) : undefined;
 	};
 	if (min === 0 && max === 1) return '';
-	const [from, to] = [shown(min), shown(max)];
+	const [from, to] = [min === 0 || !isTiny(min) ? shown(min) : undefined, shown(max)];
 	if (from !== undefined && to !== undefined) return say('ui.calc.range', { from, to });
 	if (from !== undefined) return min === 0 ? '' : say('ui.calc.range from', { from });
 	return to === undefined ? '' : say('ui.calc.range to', { to });
 }
+
+/** A lower end that only keeps zero out goes without saying. */
+const isTiny = (min: number | undefined): boolean => min !== undefined && min > 0 && min <= 1e-3;
 
 const BEYOND_WORDS = 1e6;
