@@ -6,6 +6,8 @@ export default {
 	preprocess: vitePreprocess(),
 	kit: {
 		adapter: adapter({ out: 'build/app' }),
+		// The same sources are the same version: a tablet is offered nothing new where nothing is.
+		version: { name: process.env.GATEHOLD_BUILD ?? 'unbuilt' },
 		// A deep link must find its files without the server that it came from.
 		paths: { relative: false },
 		// Written into each page as a meta element with the hash of the one inline script that starts it;

@@ -56,7 +56,7 @@ function build(product, { quiet }) {
 			stdio: quiet ? 'pipe' : 'inherit',
 			encoding: 'utf8',
 			// Whoever starts us: a test runner's own setting would make a build for development.
-			env: { ...process.env, NODE_ENV: 'production' },
+			env: { ...process.env, NODE_ENV: 'production', GATEHOLD_BUILD: sources.slice(0, 12) },
 		},
 	);
 	if (status !== 0) throw new Error(`The build failed.\n${quiet ? stdout + stderr : ''}`);

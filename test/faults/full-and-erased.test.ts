@@ -29,6 +29,30 @@ test('when storage is full a photo is refused whole, readings are still saved, a
 	);
 });
 
+test('when photos have filled a tablet, the entries of a whole night still fit into the room set aside', async () => {
+	await servedTablet(async ({ address }) =>
+		withChromium(async (browser) => {
+			const page = await browser.newPage();
+			await page.goto(address.replace('localhost', '127.0.0.1'));
+			const cdp = await browser.newCDPSession(page);
+			const origin = new URL(address).origin;
+			await cdp.send('Storage.overrideQuotaForOrigin', { origin, quotaSize: 20_000_000 });
+			const tab = await openTab(browser, address);
+			expect(await tab.ask('keepReserve')).toBe('kept');
+			for (const kilobytes of [1000, 100, 10]) {
+				let said: unknown = 'saved';
+				while (said === 'saved') said = await tab.ask('photo', kilobytes);
+				expect(said).toEqual({ kind: 'storage-full' });
+			}
+			expect(await tab.ask('reserveIsSpent')).toBe(false);
+			// The demonstration's night has 130 events.
+			expect(await tab.ask('write', 'technician', 130, 1000)).toBe('written');
+			expect(await tab.ask('reserveIsSpent')).toBe(true);
+			expect((await tab.ask('look')).ids).toHaveLength(130);
+		}),
+	);
+});
+
 test('a database that the browser erases under the app is noticed at once, and told after the next start', async () => {
 	await servedTablet(async ({ address }) =>
 		withChromium(async (browser) => {

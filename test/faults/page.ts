@@ -104,6 +104,8 @@ const page = {
 	},
 
 	health: async () => (await store()).health.look(),
+	keepReserve: async () => (await store()).reserve.keep(),
+	reserveIsSpent: async () => (await store()).reserve.isSpent(),
 	askToPersist: async () => (await store()).health.askToPersist(),
 	closed: () => closed,
 

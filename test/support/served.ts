@@ -15,7 +15,7 @@ export async function served<T>(
 	const child = start({ PORT: String(port), ...env });
 	try {
 		const { said, exitCode } = await untilItSpeaks(child);
-		const address = /https?:\/\/\S+/.exec(said)?.[0];
+		const address = /Gatehold is at (\S+)/.exec(said)?.[1];
 		if (address === undefined) throw new Error(`npm start said "${said}" and ended with ${exitCode}`);
 		return await use(address);
 	} finally {

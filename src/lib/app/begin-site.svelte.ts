@@ -106,6 +106,12 @@ export class BeginSite {
 			this.problem = store.error;
 			return false;
 		}
+		const held = await store.value.site.read('tablet');
+		if (!held.ok || held.value !== undefined) {
+			store.value.close();
+			this.problem = held.ok ? { kind: 'site-exists' } : held.error;
+			return false;
+		}
 		const asked = {
 			site: this.site,
 			unit: this.unit,

@@ -14,6 +14,7 @@ export { BeginSite } from './begin-site.svelte';
 export type { SiteObjection } from './own-site';
 export { OpenDesk } from './open-desk.svelte';
 export { PlantBook } from './plant-book.svelte';
+export { AppUpdate, holdRecord } from './app-update.svelte';
 export { Preferences } from './preferences.svelte';
 export { lookAtStorage, sayBytes, type StorageFacts } from './storage-facts';
 export { OpenStartUp, type Held } from './open-start-up.svelte';

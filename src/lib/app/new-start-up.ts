@@ -80,7 +80,7 @@ export async function openNewStartUp(
 	const body: BodyOf<'start-up opened'> = {
 		procedure: pinnedProcedure(procedure),
 		plant: pinned(plant),
-		fuel: { id: plant.fuel.title.slice(0, 128), hash: sha256Hex(canonicalJson(plant.fuel as unknown as Json)) },
+		fuel: { id: plant.fuel.title.slice(0, 128), hash: sha256Hex(canonicalJson(plant.fuel)) },
 		documents: { procedure, plant },
 		startType,
 		title: title.trim(),

@@ -1,4 +1,4 @@
-import { canonicalJson, fail, ok, sha256Hex, toBase64, type Json, type Result } from '../base';
+import { canonicalJson, fail, ok, sha256Hex, toBase64, type Result } from '../base';
 import {
 	checkPin,
 	enrolDevice,
@@ -273,7 +273,7 @@ async function firstEvents(of: {
 export const pinned = (plant: Plant) => ({
 	id: plant.unit,
 	revision: plant.revision,
-	hash: sha256Hex(canonicalJson(plant as unknown as Json)),
+	hash: sha256Hex(canonicalJson(plant)),
 });
 
 async function keepSite(

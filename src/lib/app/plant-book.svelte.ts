@@ -1,4 +1,4 @@
-import { canonicalJson, fail, ok, type Json, type Result } from '../base';
+import { canonicalJson, fail, ok, type Result } from '../base';
 import { may, rolesWith } from '../identity';
 import { changedPoints, checkPlant, parsePlant, replacedBy, withValues, type Plant, type PlantFinding } from '../plant';
 import { allOf, printInstant } from '../record';
@@ -17,7 +17,7 @@ export class PlantBook {
 	#changes = $state.raw<PlantChanges>({});
 	problem = $state.raw<Problem>();
 	/** As it would be approved now. */
-	readonly plant: Plant = $derived.by(() => withChanges(this.#approved as Plant, this.#changes));
+	readonly plant: Plant = $derived.by(() => withChanges(this.#approved!, this.#changes));
 
 	private constructor(tablet: Tablet, approved: Plant, changes: PlantChanges) {
 		this.#tablet = tablet;
@@ -35,7 +35,7 @@ export class PlantBook {
 
 	/** As it was approved last. */
 	get approved(): Plant {
-		return this.#approved as Plant;
+		return this.#approved!;
 	}
 
 	get changes(): PlantChanges {
@@ -84,7 +84,7 @@ export class PlantBook {
 		const entered = printInstant(Math.floor(clock.now() / 1000) * 1000, before.utcOffsetMinutes);
 		const items = Object.keys(this.#changes);
 		const after = replacedBy({ ...this.plant, revision: before.revision + 1 }, items, person.person, entered);
-		const shape = parsePlant(JSON.parse(canonicalJson(after as unknown as Json)));
+		const shape = parsePlant(JSON.parse(canonicalJson(after)));
 		if (!shape.ok) return fail({ kind: 'plant-refused', at: shape.error[0]?.path ?? '' });
 		const key = await this.#tablet.openKey(person.person, pin);
 		if (!key.ok) return key;
@@ -113,7 +113,7 @@ export class PlantBook {
 	async #keep(changes: PlantChanges): Promise<void> {
 		this.#changes = changes;
 		const saved = printInstant(this.#tablet.clock.now(), 0);
-		const kept = await this.#tablet.store.drafts.save({ ...KEY, typed: changes as unknown as Json, saved });
+		const kept = await this.#tablet.store.drafts.save({ ...KEY, typed: changes, saved });
 		this.problem = kept.ok ? undefined : kept.error;
 	}
 }

@@ -12,6 +12,8 @@ export type Problem =
 	| SeriesError
 	| TrendError
 	| ResumeCodeError
+	/** One tablet holds one site of its own. */
+	| { readonly kind: 'site-exists' }
 	/** What was typed about a new site is not complete. */
 	| { readonly kind: 'site-incomplete'; readonly n: number }
 	/** The identity room refused a key or a certificate of a new site. */

@@ -16,6 +16,7 @@ export function sayProblem(problem: Problem, say: Say): string {
 		case 'destroyed':
 		case 'no-site':
 		case 'no-plant':
+		case 'site-exists':
 		case 'nobody-chosen':
 		case 'sheet-changed':
 		case 'weak-wrap':

@@ -46,7 +46,7 @@ export async function lookAtStorage(here: ThisTablet): Promise<Result<StorageFac
 		...(usage === undefined ? {} : { usage }),
 		...(quota === undefined ? {} : { quota }),
 		...(store.erased === undefined ? {} : { erased: store.erased.made }),
-		isScarce: isScarce(usage, quota),
+		isScarce: isScarce(usage, quota) || store.reserve.isSpent(),
 		copies,
 	});
 }

@@ -40,6 +40,7 @@ export class ThisTablet {
 	static async on(store: Store, clock: Clock, isOwn = false): Promise<ThisTablet> {
 		const here = new ThisTablet(store, clock, isOwn);
 		await here.lookAgain();
+		void store.reserve.keep();
 		return here;
 	}
 

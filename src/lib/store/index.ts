@@ -14,6 +14,7 @@ export type { ShiftKeys } from './shift-keys';
 export type { SiteStore } from './site';
 export type { CopiedChain, Health, HealthStore } from './health';
 export type { Memory } from './memory';
+export type { Reserve } from './reserve';
 export type {
 	Attachment,
 	Copy,

@@ -7,6 +7,7 @@ import { eventStore, type EventStore } from './events';
 import { gateKeys, type GateKeys } from './gate-keys';
 import { healthStore, type HealthStore } from './health';
 import { erasedBefore, pageMemory, type Memory } from './memory';
+import { orFromReserve, reserveOf, type Reserve } from './reserve';
 import type { Birth } from './rows';
 import { shiftKeys, type ShiftKeys } from './shift-keys';
 import { readSite, siteStore, type SiteStore } from './site';
@@ -21,6 +22,8 @@ export type Store = {
 	readonly shiftKeys: ShiftKeys;
 	readonly site: SiteStore;
 	readonly health: HealthStore;
+	/** Room for what must still fit when nothing else does; whoever opens the store for a person has it kept. */
+	readonly reserve: Reserve;
 	/** Set when the browser has erased what this tablet held: to be told, and the tablet enrolled anew. */
 	readonly erased?: { readonly made: string; readonly acknowledge: () => void };
 	/** Calls back when the storage closes under the app: erased, or taken over by a newer version in another tab. */
@@ -53,14 +56,18 @@ function storeOn(db: Database, birth: Birth, memory: Memory | undefined): Store 
 	const gone = memory === undefined ? undefined : erasedBefore(memory, birth);
 	let closedByUs = false;
 	const acknowledge = () => memory?.write(JSON.stringify(birth));
+	const reserve = reserveOf(db.name);
+	const [events, typed, keys, health] = [eventStore(db), drafts(db), gateKeys(db), healthStore(db)];
 	return {
-		events: eventStore(db),
+		events: { ...events, append: orFromReserve(reserve, events.append) },
 		attachments: attachments(db),
-		drafts: drafts(db),
-		gateKeys: gateKeys(db),
+		drafts: { ...typed, save: orFromReserve(reserve, typed.save) },
+		// A try is counted before it is made, and the count is a write.
+		gateKeys: { ...keys, open: orFromReserve(reserve, keys.open) },
 		shiftKeys: shiftKeys(db),
 		site: siteStore(db),
-		health: healthStore(db),
+		health: { ...health, copyMade: orFromReserve(reserve, health.copyMade) },
+		reserve,
 		...(gone === undefined ? {} : { erased: { made: gone.made, acknowledge } }),
 		onClosed: (closed) => {
 			db.on('close', () => {

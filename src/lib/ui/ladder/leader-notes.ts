@@ -25,6 +25,7 @@ export function leaderNotes(
 		const { id, label, state, of } = contact;
 		if (of === 'gate' && state !== 'stands')
 			return [{ contact: id, word: say('ui.lead.waits'), text: say('ui.lead.for gate', { gate: label }) }];
+		if (of === 'plant') return [{ contact: id, word: label, text: plantText(rung.gate, standing, say) }];
 		if (state === 'blocks')
 			return [{ contact: id, word: say('ui.lead.deviation', { id }), text: deviations?.get(id) ?? say('ui.blocks') }];
 		if (state === 'next') return stepNote(contact, rung, say('ui.lead.next'), around, () => true);
@@ -35,6 +36,12 @@ export function leaderNotes(
 			return [{ contact: id, word: say('ui.lead.condition'), subject: label, text: contact.word }];
 		return [];
 	});
+}
+
+/** "still of FM-1, Demonstration lime works, revision 4: 123" */
+function plantText(gate: number, { gates }: Standing, say: Say): string {
+	const why = gates.find((each) => each.gate === gate)?.why.find(({ kind }) => kind === 'values to replace');
+	return why?.kind === 'values to replace' ? say('ui.lead.plant', { from: why.from, n: why.items.length }) : '';
 }
 
 /** On a drawing one fact is said once, for everything that it took. */

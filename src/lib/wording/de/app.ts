@@ -27,6 +27,8 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'problem.wrong-pin': 'Diese PIN ist falsch. Es bleiben {left} Versuche. Es wurde nichts unterschrieben.',
 	'problem.no-plant':
 		'Dieses Tablet kennt noch keine Anlagenbeschreibung. Sehen Sie die Vorführung an oder beginnen Sie ein eigenes Werk.',
+	'problem.site-exists':
+		'Dieses Tablet hat schon ein eigenes Werk. Es wurde nichts angelegt; die Einstellungen führen dorthin.',
 	'problem.site-incomplete':
 		'Das Werk wurde nicht angelegt: {n} Angaben fehlen oder stimmen nicht. Es wurde nichts aufbewahrt.',
 	'problem.site-refused':

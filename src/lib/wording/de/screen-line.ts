@@ -61,5 +61,6 @@ export const SCREEN_LINE: { readonly [key in keyof typeof EN]: string } = {
 	'ui.error.do': 'Zu tun:',
 	'ui.warn.inert':
 		'Stickstoff und Kohlendioxid ersticken ohne Warnung; Kohlenmonoxid vergiftet. Kein Einstieg ohne Freigabe und Gasmessung.',
+	'ui.lead.plant': 'noch die von {from}: {n}. Unter Anlage ersetzen, dann einen neuen Anfahrvorgang eröffnen',
 	'ui.plant values': 'Anlagenwerte',
 };

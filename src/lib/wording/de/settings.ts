@@ -54,4 +54,8 @@ export const SETTINGS = {
 	'settings.version': 'Programmstand',
 	'settings.version is': '{writer}, Fassung {build}',
 	'settings.version about': 'Was Gatehold ist und was nicht',
+	'settings.update': 'Eine neue Fassung ist bereit.',
+	'settings.update does': 'Laden',
+	'settings.update waits':
+		'Eine neue Fassung ist bereit. Sie wird geladen, wenn Sie es sagen und kein Tab einen Anfahrvorgang zeigt: verlassen Sie die offenen Anfahrvorgänge, dann laden Sie sie.',
 } as const;

@@ -21,6 +21,7 @@ export const APP = {
 	'problem.wait': 'Too many wrong PINs. Wait {time}; {left} tries are left.',
 	'problem.wrong-pin': 'That PIN is wrong. {left} tries are left. Nothing was signed.',
 	'problem.no-plant': 'This tablet knows no plant description yet. See the demonstration, or start your own site.',
+	'problem.site-exists': 'This tablet holds a site of its own already. Nothing was made; Settings goes there.',
 	'problem.site-incomplete': 'The site was not made: {n} things are still missing or wrong. Nothing was kept.',
 	'problem.site-refused': 'The site was not made ({because}). Nothing can have been signed with it; begin again.',
 	'problem.no-right': '{person} may not sign this. It needs one of: {roles}. Nothing was signed.',

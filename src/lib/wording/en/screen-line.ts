@@ -59,5 +59,6 @@ export const SCREEN_LINE = {
 	'ui.error.do': 'What to do:',
 	'ui.warn.inert':
 		'Nitrogen and carbon dioxide suffocate without warning; carbon monoxide poisons. No entry without permit and gas test.',
+	'ui.lead.plant': 'still those of {from}: {n}. Replace them under Plant, then open a start-up anew',
 	'ui.plant values': 'Plant values',
 } as const;

@@ -53,4 +53,8 @@ export const SETTINGS = {
 	'settings.version': 'Version',
 	'settings.version is': '{writer}, build {build}',
 	'settings.version about': 'What Gatehold is and is not',
+	'settings.update': 'A new version is ready.',
+	'settings.update does': 'Load it',
+	'settings.update waits':
+		'A new version is ready. It is loaded when you say so and no tab shows a start-up: leave the start-ups that are open, then load it.',
 } as const;
