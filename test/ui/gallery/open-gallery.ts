@@ -26,6 +26,7 @@ export const SCENES = [
 	'line-up',
 	'quick sheet',
 	'series',
+	'series unreadable',
 	'calculation',
 	'coverage',
 	'choice',
