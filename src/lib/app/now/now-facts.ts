@@ -73,7 +73,11 @@ function saidOxygen(told: OpenRecord, say: Say, moments: Moments) {
 		against:
 			limit === undefined
 				? say('now.no limit')
-				: say('now.against', { limit: limit.value, guard: limit.guard, margin: sayNumber(limit.margin, say) }),
+				: say('now.against', {
+						limit: withMark(limit.value, say),
+						guard: withMark(limit.guard, say),
+						margin: sayNumber(limit.margin, say),
+					}),
 	};
 }
 

@@ -34,7 +34,7 @@ export const SCREEN_NOW: { readonly [key in keyof typeof EN]: string } = {
 	'now.in': 'noch {time}',
 	'now.at': 'um {at}',
 	'now.until': 'bis {at}',
-	'now.temporary': 'Vorübergehendes',
+	'now.temporary': 'Zeitweilig',
 	'now.people': 'In Schicht',
 	'now.open': 'Offen',
 	'now.tablets': 'Geräte',
