@@ -62,7 +62,7 @@ function withNames(
 /** In lines of at most this width; the letters are the narrow ones. */
 export function wrapped(label: string, width: number): readonly string[] {
 	const lines: string[] = [];
-	for (const word of label.split(' ')) {
+	for (const word of label.split(' ').flatMap((each) => divided(each, width))) {
 		const last = lines.at(-1);
 		const joined = last === undefined ? word : `${last} ${word}`;
 		if (last !== undefined && narrow(joined) <= width) lines[lines.length - 1] = joined;
@@ -70,6 +70,20 @@ export function wrapped(label: string, width: number): readonly string[] {
 	}
 	const shown = lines.length > 2 ? [...lines.slice(0, 1), lines.slice(1).join(' ')] : lines;
 	return (lines.length > 2 && narrow(shown[1] ?? '') <= width ? lines : shown).map((line) => shortened(line, width));
+}
+
+/** A word too long for a line, at its hyphens and where a soft hyphen allows it; long words are built of short ones. */
+function divided(word: string, width: number): readonly string[] {
+	const whole = word.replaceAll('\u00ad', '');
+	if (narrow(whole) <= width) return [whole];
+	const [first = '', ...parts] = word.split(/(?<=-)|\u00ad/);
+	const lines = [first];
+	for (const part of parts) {
+		const line = lines.at(-1) ?? '';
+		if (narrow(`${line}${part}-`) <= width) lines[lines.length - 1] = line + part;
+		else lines.splice(-1, 1, line.endsWith('-') ? line : `${line}-`, part);
+	}
+	return lines;
 }
 
 function shortened(line: string, width: number): string {

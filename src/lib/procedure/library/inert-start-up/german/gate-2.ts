@@ -218,7 +218,7 @@ export const GATE_2 = {
 		'Eine abgelaufene Uhr beweist eine Uhr. Messwerte, Abdeckung und Strom ohne Lücke beweisen ein Spülen.',
 	'Stop the feed, inert gas on: the circuit has to be purged again.':
 		'Aufgabe stoppen, Inertgas an: der Kreislauf muss neu gespült werden.',
-	'Oxygen watch': 'Sauerstoffüberwachung',
+	'Oxygen watch': 'Sauerstoff\u00adüberwachung',
 	'Oxygen watch at all places': 'Sauerstoffüberwachung an allen Stellen',
 	'Read all four places again and see that fan and inert gas flow never broke.':
 		'Alle vier Stellen noch einmal ablesen und sehen, dass Ventilator- und Inertgasstrom nie abrissen.',
