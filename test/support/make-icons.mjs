@@ -1,4 +1,4 @@
-/** Draws the icons that a browser wants as pictures from `static/icon.svg`: `node test/support/make-icons.mjs`. */
+/** Draws the icons that a browser wants as pictures from `static/icon.svg`: `npm run icons`. */
 import { readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { withChromium } from './chromium.mjs';
