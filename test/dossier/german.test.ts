@@ -40,6 +40,7 @@ describe('the dossier of the night in German', () => {
 	});
 
 	test('says what a person typed as it was typed, and a signed sentence in the language in which it was signed', () => {
-		expect(words).toContain('This is a statement about what was recorded.');
+		expect(words).toContain('I release gate 0, Authority and area.');
+		expect(words).toContain('seen at the plant');
 	});
 });
