@@ -1,9 +1,10 @@
-// Draws the pictures of the README from the demonstration dossier: `npm run pictures`.
+// Draws the pictures of the README from the demonstration's dossier and from the app's screens: `npm run pictures`.
 import { spawnSync } from 'node:child_process';
-import { mkdtempSync, renameSync, rmSync } from 'node:fs';
+import { copyFileSync, mkdtempSync, renameSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import { runnerImport } from 'vite';
 
 const HOUSE = fileURLToPath(new URL('../..', import.meta.url));
 const folder = mkdtempSync(join(tmpdir(), 'gatehold-pictures-'));
@@ -38,4 +39,13 @@ for (const { name, on } of PICTURES) {
 	run('pdftoppm', ['-r', '80', '-f', at, '-l', at, '-singlefile', '-png', file, join(folder, name)]);
 	renameSync(join(folder, `${name}.png`), join(HOUSE, 'static/pictures', `${name}.png`));
 }
+/** Screens by the stop of the tour where they are taken. */
+const SCREENS = { 'app-line': 'line.tablet.day', 'app-phone': 'line.phone.day' };
+
+process.chdir(HOUSE);
+/** @type {{ module: typeof import('./screens.ts') }} */
+const { module } = await runnerImport(join(HOUSE, 'test/support/screens.ts'), { root: HOUSE });
+await module.takeScreens({ folder, sizes: ['tablet', 'phone'], looks: ['day'], only: 'line' });
+for (const [name, screen] of Object.entries(SCREENS))
+	copyFileSync(join(folder, `${screen}.png`), join(HOUSE, 'static/pictures', `${name}.png`));
 rmSync(folder, { recursive: true });
