@@ -105,7 +105,7 @@ export const CHAPTERS: { readonly [key in keyof typeof EN]: string } = {
 	'instruments.accuracy': 'Genauigkeit',
 	'instruments.certificate': 'Kalibrierschein',
 	'instruments.values': 'Werte',
-	'instruments.not listed': 'nicht in der Anlagenbeschreibung',
+	'instruments.not listed': 'nicht beschrieben',
 	'instruments.due': '{certificate}, fällig {due}',
 	'instruments.U': 'U {value} {unit} (k = 2)',
 	'findings.title': 'Prüfungen und Befunde',

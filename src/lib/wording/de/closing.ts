@@ -44,5 +44,5 @@ export const CLOSING: { readonly [key in keyof typeof EN]: string } = {
 	'cautions.adequate':
 		'Ein errechnetes „ausreichend“ ist eine Aussage über Messwerte und ein Modell, keine Erlaubnis: die Freigabe erteilt ein Mensch.',
 	'cautions.electronic':
-		'Unterschriften sind elektronische Signaturen unter der eigenen Wurzel des Werks; sie sind keine qualifizierten Signaturen im Sinne von eIDAS. Dass die Datei unverändert ist, zeigt nicht, dass Messwerte, Uhren oder Menschen recht hatten.',
+		'Unterschriften sind elektronische Signaturen unter der eigenen Wurzel des Werks, keine qualifizierten im Sinne von eIDAS. Eine unveränderte Datei zeigt nicht, dass Messwerte, Uhren oder Menschen recht hatten.',
 };
