@@ -52,6 +52,28 @@ test('a step that does not apply is said so with its reason, and as nothing else
 	expect(await told()).toEqual(['not applicable: Not fitted on this unit', 'cannot do: No access']);
 });
 
+test('an act on an entry needs a reason and the PIN of who signs it', async () => {
+	const { page, show, told } = gallery;
+	await show('earlier entries', 'tablet');
+	const sign = page.getByRole('button', { name: 'Withdraw with PIN' });
+	await page.getByLabel('PIN').fill('73905284');
+	expect(await sign.isDisabled()).toBe(true);
+	await page.getByRole('button', { name: 'Mistyped' }).click();
+	await page.getByRole('button', { name: 'Imre Castellvor' }).click();
+	await sign.click();
+	expect(await told()).toEqual(['SupA: Mistyped']);
+	expect(await page.getByLabel('PIN').inputValue()).toBe('');
+});
+
+test('a column of a trend is said to be another point, or left out', async () => {
+	const { page, show, told } = gallery;
+	await show('series', 'tablet');
+	await page.getByLabel('AT-211 is').selectOption('');
+	await page.getByText('Read as it was found').click();
+	await page.getByRole('button', { name: '1.5' }).click();
+	expect(await told()).toEqual(['columns 5', 'reading']);
+});
+
 test('a line-up row is kept by one touch, the next row follows, and no choice is marked before', async () => {
 	const { page, show, told } = gallery;
 	await show('line-up', 'tablet');

@@ -35,6 +35,7 @@ export const SCENES = [
 	'watch',
 	'witness',
 	'review',
+	'earlier entries',
 	'sign',
 	'sign not ready',
 	'lapsed',
