@@ -1,6 +1,6 @@
 import { shownUnit } from '../../quantity';
 import { MINUTE, millis } from '../../record';
-import { sayNumber, sayWord, shownText, type Moments, type Say } from '../../wording';
+import { sayNumber, sayWord, shownText, withMark, type Moments, type Say } from '../../wording';
 import { ageOf, nameOf, type OpenRecord } from '../record-words';
 import { besides } from './besides';
 import { inertLeft } from './inert-left';
