@@ -24,6 +24,29 @@ async function atTheDemonstration(use: (scene: Scene) => Promise<void>): Promise
 	);
 }
 
+test("a stranger's file is no trend: the sheet says why, and keeps the file that belongs to it", async () => {
+	await atTheDemonstration(async ({ page }) => {
+		await toStep(page, '2.21');
+		await shiftIfAsked(page);
+		const bring = (name: string, text: string): Promise<void> =>
+			page
+				.locator('input[type=file][accept*=csv]')
+				.setInputFiles({ name, mimeType: 'text/csv', buffer: Buffer.from(text) });
+		await bring('shopping.csv', 'bread;2\nmilk;1\n');
+		await page.getByText('Cannot be read.').waitFor();
+		await page.getByText(/milk/).first().waitFor();
+		expect(await page.getByRole('button', { name: 'Keep this series' }).count()).toBe(0);
+		await bring('another-plant.csv', `time,TI-9 [degC]\n${minutes(20, () => '41.5')}`);
+		await page.getByText('another-plant.csv').waitFor();
+		expect(await page.getByRole('button', { name: 'Keep this series' }).count()).toBe(0);
+		expect(await page.locator('button.do:enabled').count()).toBe(0);
+		await page.getByRole('button', { name: 'Trends supplied with the demonstration' }).click();
+		await page.getByRole('button', { name: 'purge-1.csv' }).click();
+		await page.getByRole('button', { name: 'Keep this series' }).click();
+		await page.waitForURL((url) => !url.pathname.endsWith('/step/2.21'));
+	});
+}, 180_000);
+
 test('two tabs of one tablet show the same record, and both go on writing it', async () => {
 	await atTheDemonstration(async ({ page }) => {
 		const other = await page.context().newPage();
@@ -64,3 +87,12 @@ test('storage that is erased under the app is told at once, what is typed stays 
 		await page.getByRole('button', { name: 'Show the demonstration' }).waitFor();
 	});
 }, 180_000);
+
+/** Lines of a trend, one a minute, up to a minute ago. */
+function minutes(count: number, values: (n: number) => string): string {
+	const last = Date.now() - 60_000;
+	return Array.from({ length: count }, (_, n) => {
+		const at = new Date(last - (count - 1 - n) * 60_000).toISOString().replace(/\.\d+Z/, 'Z');
+		return `${at},${values(n)}\n`;
+	}).join('');
+}

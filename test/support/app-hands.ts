@@ -58,8 +58,9 @@ export async function takeTablet(page: Page, name: string): Promise<void> {
 	const holds = holder.filter({ hasText: name });
 	if ((await holds.count()) > 0) return;
 	await press(holder);
-	await press(page.getByRole('region', { name: 'Who holds the tablet?' }).getByRole('button', { name }));
-	await header.getByText(name).first().waitFor({ state: 'attached' });
+	const people = page.getByRole('region', { name: 'Who holds the tablet?' });
+	await press(people.getByRole('button', { name }));
+	await people.waitFor({ state: 'detached' });
 }
 
 export async function beginShift(page: Page, pin: string = DEMONSTRATION_PIN): Promise<void> {
