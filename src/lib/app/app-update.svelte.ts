@@ -41,7 +41,10 @@ export class AppUpdate {
 	async load(): Promise<void> {
 		const waiting = this.#waiting;
 		if (waiting === undefined) return;
-		if (this.#locks === undefined) return waiting.postMessage(TAKE_OVER);
+		if (this.#locks === undefined) {
+			waiting.postMessage(TAKE_OVER);
+			return;
+		}
 		await this.#locks.request(RECORD, { mode: 'exclusive', ifAvailable: true }, async (lock) => {
 			this.#isHeld = lock === null;
 			if (lock === null) return;

@@ -97,9 +97,9 @@ export class DossierDesk {
 
 	/** Who may give the next signature: holds a role that is asked for, and gave none of the others. */
 	mayGive(required: RequiredSignature): readonly TabletPerson[] {
-		const gave = new Set(this.#draft?.updates.map(({ person }) => person));
+		const gave = this.#draft?.updates.map(({ person }) => person) ?? [];
 		return this.#startUp.tablet.people.filter(
-			({ person, roles, hasKey }) => hasKey && !gave.has(person) && roles.some((role) => required.roles.includes(role)),
+			({ person, roles, hasKey }) => hasKey && !gave.includes(person) && roles.some((role) => required.roles.includes(role)),
 		);
 	}
 

@@ -13,16 +13,17 @@ export type PlantChanges = { readonly [item: string]: { readonly [path: string]:
 /** The description of the unit on this tablet, and what is being replaced in it. Typed values outlive a reload. */
 export class PlantBook {
 	readonly #tablet: Tablet;
-	#approved = $state.raw<Plant>();
+	#approved: Plant;
 	#changes = $state.raw<PlantChanges>({});
 	problem = $state.raw<Problem>();
 	/** As it would be approved now. */
-	readonly plant: Plant = $derived.by(() => withChanges(this.#approved!, this.#changes));
+	readonly plant: Plant;
 
 	private constructor(tablet: Tablet, approved: Plant, changes: PlantChanges) {
 		this.#tablet = tablet;
-		this.#approved = approved;
+		this.#approved = $state.raw(approved);
 		this.#changes = changes;
+		this.plant = $derived(withChanges(this.#approved, this.#changes));
 	}
 
 	static async open(tablet: Tablet): Promise<Result<PlantBook, Problem>> {
@@ -35,7 +36,7 @@ export class PlantBook {
 
 	/** As it was approved last. */
 	get approved(): Plant {
-		return this.#approved!;
+		return this.#approved;
 	}
 
 	get changes(): PlantChanges {
