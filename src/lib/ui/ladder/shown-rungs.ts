@@ -36,7 +36,7 @@ export const shownRungs = ({ procedure, standing }: Told, say: Say, moments: Mom
 		const steps = procedure.steps.filter((step) => step.gate === rung.gate);
 		const contacts = rung.contacts.map((contact, i): ShownContact => {
 			const state = stateOf(contact, rung.reached && i === rung.passes && rung.coil !== 'released');
-			const label = contact.of === 'plant' ? say('ui.plant values') : shownText(contact.label, say);
+			const label = labelOf(contact, say);
 			return { ...contact, label, state, word: wordOf(contact, state, { steps, standing, say, moments }) };
 		});
 		return {
@@ -50,6 +50,12 @@ export const shownRungs = ({ procedure, standing }: Told, say: Say, moments: Mom
 			caption: captionOf(rung, steps, standing, say, moments),
 		};
 	});
+
+function labelOf({ of, label }: Contact, say: Say): string {
+	if (of === 'plant') return say('ui.plant values');
+	const gate = of === 'gate' ? /\d+/.exec(label)?.[0] : undefined;
+	return gate === undefined ? shownText(label, say) : say('ui.gate', { gate });
+}
 
 function stateOf({ of, state, word }: Contact, isFirstOpen: boolean): ContactState {
 	if (of === 'permissive' && word === 'unknown') return 'unknown';
@@ -66,7 +72,7 @@ type Around = {
 
 function wordOf(contact: Contact, state: ContactState, { steps, standing, say, moments }: Around): string {
 	if (contact.of === 'permissive') return contact.word === 'unknown' ? say('ui.undecided') : sayWord(contact.word, say);
-	if (contact.of === 'gate') return say(`ui.coil.${contact.word as CoilState}`);
+	if (contact.of === 'gate') return say(`ui.under.${contact.word as CoilState}`);
 	if (state === 'blocks') return say('ui.blocks');
 	if (state === 'failed') return say('state.failed');
 	if (state === 'not applicable') return say('state.not applicable');

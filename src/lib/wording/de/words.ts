@@ -15,6 +15,8 @@ export const WORDS: { readonly [key in keyof typeof EN]: string } = {
 	'word.try': 'Versuch',
 	'word.cannot do': 'nicht möglich',
 	'word.not applicable': 'entfällt',
+	'word.TRUE': 'erfüllt',
+	'word.FALSE': 'nicht erfüllt',
 	'word.true': 'wahr',
 	'word.false': 'falsch',
 	'word.unknown': 'unbekannt',

@@ -13,6 +13,8 @@ export const WORDS = {
 	'word.try': 'try',
 	'word.cannot do': 'cannot do',
 	'word.not applicable': 'not applicable',
+	'word.TRUE': 'TRUE',
+	'word.FALSE': 'FALSE',
 	'word.true': 'true',
 	'word.false': 'false',
 	'word.unknown': 'unknown',
