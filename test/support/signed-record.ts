@@ -50,6 +50,8 @@ export type Bent = {
 	readonly people?: BodyOf<'start-up opened'>['people'];
 	readonly opening?: (body: BodyOf<'start-up opened'>) => BodyOf<'start-up opened'>;
 	readonly statement?: (statement: Statement, sheet: GateSheet) => Statement;
+	/** When the sheet of a gate was made, if earlier than it was signed. */
+	readonly shownAt?: (gate: number) => string | undefined;
 	readonly release?: { readonly person: string; readonly with?: 'shift key' };
 	readonly stopAfter?: 'entries' | 'gate 1';
 	readonly calculation?: (stored: { [name: string]: unknown }) => { [name: string]: unknown };
@@ -168,7 +170,7 @@ async function release(
 	entered: string,
 	bent: Bent,
 ): Promise<void> {
-	const { shown, sheet } = shownTo(tablets, gate, entered);
+	const { shown, sheet } = shownTo(tablets, gate, bent.shownAt?.(gate) ?? entered);
 	const statement = bent.statement?.(shown, sheet) ?? shown;
 	await tablets.say('gate released', { gate, statement }, { person, device: 'T-1', entered, ...how });
 }

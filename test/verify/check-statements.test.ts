@@ -73,3 +73,38 @@ describe('the words of a signed statement are said again in their own language',
 		}
 	});
 });
+
+/** Gate 1 of the signed record is released at 08:40:00. */
+describe('[R11] a sheet that was read for a while is judged by the moment for which it was made', () => {
+	const readSince =
+		(shownAt: string, says: { readonly shownAt?: string } = { shownAt }) =>
+		(): Promise<Report> =>
+			makeSignedRecord(
+				{
+					shownAt: (gate) => (gate === 1 ? shownAt : undefined),
+					statement: (said, sheet) => (sheet.gate === 1 ? { ...said, ...says } : said),
+				},
+				site,
+			).then((record) => judge(record));
+
+	test('its ages are those of that moment, a minute less than when it was signed', async () => {
+		const report = await readSince('2026-05-14T08:39:20+02:00')();
+		expect(bad(report)).toEqual([]);
+		expect(report.class).toBe('TOTAL-PASSED');
+	});
+
+	test('a sheet that does not say its moment is taken for one of the moment of signing, and its ages are wrong', async () => {
+		const report = await readSince('2026-05-14T08:39:20+02:00', {})();
+		expect(report.class).toBe('TOTAL-FAILED');
+		expect(bad(report)[0]!.because).toContain('shows {"ageMinutes":29');
+	});
+
+	test.each(['2026-05-14T08:40:01+02:00', '2026-05-14T07:39:59+02:00'])(
+		'a sheet of %s is not what a signer of 08:40 was shown',
+		async (shownAt) => {
+			const report = await readSince('2026-05-14T08:40:00+02:00', { shownAt })();
+			expect(report.class).toBe('TOTAL-FAILED');
+			expect(bad(report)[0]!.because).toContain(`says that it was shown at ${shownAt}`);
+		},
+	);
+});

@@ -51,6 +51,7 @@ export function sheetOf(startUp: OpenStartUp, gate: number, meaning: Meaning, sa
 		textVersion: statementVersion(say),
 		build: BUILD,
 		declaration: declarationOf(say),
+		shownAt: standing.at,
 		...(copy === undefined ? {} : { copy }),
 	});
 	return { sheet, statement, events: events.length };

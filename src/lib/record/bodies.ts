@@ -123,6 +123,8 @@ export const StatementSchema = v.strictObject({
 	),
 	clock: v.picklist(['agreed', 'not agreed']),
 	declaration: Words,
+	/** For which moment the sheet was made; absent: for the moment of the act itself. */
+	shownAt: v.exactOptional(InstantSchema),
 	answersRefusal: v.exactOptional(Text),
 	copy: v.exactOptional(v.union([v.strictObject({ made: EventId }), v.strictObject({ skipped: Words })])),
 });

@@ -91,7 +91,7 @@ export type Statement = NonNullable<BodyOf<'gate released'>['statement']>;
 /** What goes into the signed bytes of an act: the words that were shown and everything that was shown beside them. */
 export function statementOf(
 	sheet: GateSheet,
-	words: Pick<Statement, 'text' | 'language' | 'textVersion' | 'build' | 'declaration'> & Pick<Statement, 'copy'>,
+	words: Pick<Statement, 'text' | 'language' | 'textVersion' | 'build' | 'declaration' | 'copy' | 'shownAt'>,
 ): Statement {
 	return {
 		...words,

@@ -3,6 +3,7 @@ import {
 	allOf,
 	gateSheet,
 	Knowledge,
+	millis,
 	standing,
 	statementOf,
 	type EventOf,
@@ -37,10 +38,15 @@ export function checkStatements(replayed: Replayed, restate?: Restate): readonly
 		if (statement === undefined)
 			return [undecided(SHOWN, `${nameOf(act)} does not keep what was shown.`, { facts: aboutEvent(act) })];
 		if (!procedure.gates.some(({ number }) => number === act.body.gate)) return [];
+		const shownAt = statement.shownAt ?? act.entered;
+		if (!isFresh(shownAt, act)) {
+			const what = `${nameOf(act)} says that it was shown at ${shownAt}; it was signed at ${act.entered}.`;
+			return [failed(SHOWN, what, { facts: aboutEvent(act) })];
+		}
 		const past = knowledge.past(act);
 		const known = startUp.filter(({ id }) => past.has(id));
 		const found = knownSite(site, act, known).map((then) => {
-			const stood = standing(procedure, known, then, act.entered);
+			const stood = standing(procedure, known, then, shownAt);
 			return differencesOf(act, statement, stood, { ...replayed, startUp: known, site: then, restate });
 		});
 		const wrong = found.some((differences) => differences.length === 0) ? [] : (found[0] ?? []);
@@ -59,6 +65,12 @@ export function checkStatements(replayed: Replayed, restate?: Restate): readonly
 		`${acts.length} gate acts: words, steps with state and proof, counts, deviations, tablets.`,
 	);
 }
+
+/** [R11] Time to read a sheet, and no more. */
+const isFresh = (shownAt: string, { enteredAt }: Act): boolean =>
+	millis(shownAt) <= enteredAt && enteredAt - millis(shownAt) <= HOUR;
+
+const HOUR = 3_600_000;
 
 function differencesOf(
 	{ kind, body, device }: Act,
