@@ -99,7 +99,8 @@ export class DossierDesk {
 	mayGive(required: RequiredSignature): readonly TabletPerson[] {
 		const gave = this.#draft?.updates.map(({ person }) => person) ?? [];
 		return this.#startUp.tablet.people.filter(
-			({ person, roles, hasKey }) => hasKey && !gave.includes(person) && roles.some((role) => required.roles.includes(role)),
+			({ person, roles, hasKey }) =>
+				hasKey && !gave.includes(person) && roles.some((role) => required.roles.includes(role)),
 		);
 	}
 
