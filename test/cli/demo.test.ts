@@ -3,7 +3,9 @@ import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import { sha256Hex } from '../../src/lib/base';
 import { fromPem } from '../../src/lib/identity';
+import { findVeraPdf } from '../support/judges.mjs';
 import { appendUnsigned, findObjects, flip, latin1, stream } from '../support/tamper';
 import { PdfJudges } from '../support/pdf-judges';
 import { value } from '../support/test-site';
@@ -71,6 +73,23 @@ describe('the dossier of the demonstration start-up', () => {
 		expect(page).toMatch(/AT-213/);
 		expect(stdout).toMatch(/asphyxiate/);
 	});
+
+	test('both photos of the story are drawn as they are attached, each with its hash, and the file keeps to PDF/A-3b', () => {
+		const { stdout: images } = spawnSync('pdfimages', ['-list', FILE], { encoding: 'utf8' });
+		const rows = images.trim().split('\n').slice(2);
+		expect(rows).toHaveLength(2);
+		for (const row of rows) expect(row).toMatch(/image\s+640\s+480\s+rgb\s+3\s+8\s+jpeg/);
+		const { stdout } = spawnSync('pdftotext', ['-raw', FILE, '-'], { encoding: 'utf8', maxBuffer: 64 << 20 });
+		for (const name of ['fire-fighting-and-vent.jpg', 'emergency-inerting-valve.jpg']) {
+			const hash = sha256Hex(new Uint8Array(readFileSync(join(HOUSE, 'static/demo/photos', name))));
+			// In two lines under its picture; again in the list of files.
+			expect(stdout).toContain(`${hash.slice(0, 32)}\n${hash.slice(32)}`);
+		}
+		const [java, ...args] = findVeraPdf() ?? [];
+		if (java === undefined) return;
+		const judged = spawnSync(java, [...args, '--flavour', '3b', '--format', 'text', FILE], { encoding: 'utf8' });
+		expect(judged.stdout).toMatch(/^PASS/m);
+	}, 120_000);
 
 	test('every page of it is marked as a demonstration or stands in a file that is', () => {
 		const { stdout } = spawnSync('pdftotext', ['-l', '1', FILE, '-'], { encoding: 'utf8' });

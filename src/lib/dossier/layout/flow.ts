@@ -1,5 +1,5 @@
 import { lettering, placed, segment, stroke, type Box, type Drawing, type Shape, type Tone } from '../../drawing';
-import { AREA, type FieldBox, type Sheet } from './sheet';
+import { AREA, type FieldBox, type PictureBox, type Sheet } from './sheet';
 import { wrap, type Setting } from './wrap';
 
 export type Style = Setting & { readonly lead: number; readonly tone: Tone };
@@ -16,7 +16,7 @@ export const STYLES = {
 	signed: { voice: 'signed', size: 10.4, lead: 15.6, tone: 'ink' },
 } as const satisfies { readonly [name: string]: Style };
 
-type Draft = { title: string; shapes: Shape[]; fields: FieldBox[] };
+type Draft = { title: string; shapes: Shape[]; fields: FieldBox[]; pictures: PictureBox[] };
 
 /** Writes down a column, sheet after sheet. What does not fit goes on at the top of the next sheet of the same title. */
 export class Flow {
@@ -38,7 +38,7 @@ export class Flow {
 
 	/** A new sheet; `title` goes into its title block. */
 	newSheet(title: string): void {
-		this.#sheets.push({ title, shapes: [], fields: [] });
+		this.#sheets.push({ title, shapes: [], fields: [], pictures: [] });
 		this.#y = AREA.y;
 	}
 
@@ -54,6 +54,10 @@ export class Flow {
 
 	addField(field: FieldBox): void {
 		this.#sheet.fields.push(field);
+	}
+
+	addPicture(picture: PictureBox): void {
+		this.#sheet.pictures.push(picture);
 	}
 
 	space(height: number): void {

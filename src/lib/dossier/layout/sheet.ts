@@ -21,8 +21,20 @@ export const AREA: Box = {
 /** The place of a signature. */
 export type FieldBox = { readonly name: string; readonly title: string; readonly box: Box };
 
+/** A photo as it lies among the attachments, drawn small. */
+export type PictureBox = {
+	readonly hash: string;
+	readonly bytes: Uint8Array<ArrayBuffer>;
+	/** In its own pixels. */
+	readonly width: number;
+	readonly height: number;
+	readonly colours: 'DeviceGray' | 'DeviceRGB';
+	readonly box: Box;
+};
+
 export type Sheet = {
 	readonly title: string;
 	readonly shapes: readonly Shape[];
 	readonly fields: readonly FieldBox[];
+	readonly pictures: readonly PictureBox[];
 };

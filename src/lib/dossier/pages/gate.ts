@@ -10,6 +10,7 @@ import { linesOf } from '../story/act-lines';
 import { releasesOf } from '../story/releases';
 import type { Act, Story } from '../story/story';
 import { entriesOfGate } from './entries';
+import { photosOfGate } from './photos';
 
 /** One gate: every act at its hold point, with what stood then by two kinds of knowledge, and every entry under it. */
 export function gatePages(flow: Flow, story: Story, gate: number): void {
@@ -23,6 +24,7 @@ export function gatePages(flow: Flow, story: Story, gate: number): void {
 	if (acts.length === 0) flow.write(say('gate.no act'), STYLES.body);
 	for (const act of acts) actOf(flow, story, act);
 	entriesOfGate(flow, story, gate);
+	photosOfGate(flow, story, gate);
 }
 
 function actOf(flow: Flow, story: Story, act: Act): void {

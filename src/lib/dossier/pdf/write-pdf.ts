@@ -3,12 +3,12 @@ import { ok, utf8, type Result } from '../../base';
 import type { Progress } from '../input';
 import { FACES } from '../fonts/faces';
 import { INKS } from '../fonts/inks';
-import type { Sheet } from '../layout/sheet';
+import type { PictureBox, Sheet } from '../layout/sheet';
 import { PAPER } from '../layout/sheet';
 import type { NoGlyph } from '../sign/ink';
 import { addSignatureFields } from '../sign/signature-fields';
 import { attach, type Attachment } from './attach';
-import { contentOf } from './content';
+import { contentOf, number } from './content';
 import { embedFace } from './fonts';
 import { describe, pdfDate, type Metadata } from './metadata';
 
@@ -30,14 +30,39 @@ export async function writePdf(document: Document): Promise<Result<Uint8Array<Ar
 	const { context } = pdf;
 	const fonts: { [resource: string]: PDFRef } = {};
 	for (const [name, face] of Object.entries(FACES)) fonts[name] = embedFace(context, face);
+	const taken = new Map<string, PDFRef>();
+	/** Once, however often it is drawn; the bytes as they came. */
+	const imageOf = ({ hash, bytes, width, height, colours }: PictureBox): PDFRef => {
+		const held = taken.get(hash);
+		if (held !== undefined) return held;
+		const ref = context.register(
+			context.stream(bytes, {
+				Type: 'XObject',
+				Subtype: 'Image',
+				Width: width,
+				Height: height,
+				ColorSpace: colours,
+				BitsPerComponent: 8,
+				Filter: 'DCTDecode',
+			}),
+		);
+		taken.set(hash, ref);
+		return ref;
+	};
 	const pages: { readonly page: PDFPage; readonly sheet: Sheet }[] = [];
 	for (const [done, sheet] of document.sheets.entries()) {
 		document.progress('sheet', done, document.sheets.length);
 		const content = contentOf(sheet.shapes, PAPER.height);
 		if (!content.ok) return content;
 		const page = pdf.addPage([PAPER.width, PAPER.height]);
-		page.node.set(PDFName.of('Resources'), context.obj({ Font: fonts }));
-		page.node.set(PDFName.of('Contents'), context.register(context.flateStream(utf8(content.value))));
+		const drawn = sheet.pictures.map((picture) => ({ ...picture, name: `P${picture.hash.slice(0, 16)}` }));
+		const images = Object.fromEntries(drawn.map((picture) => [picture.name, imageOf(picture)]));
+		page.node.set(
+			PDFName.of('Resources'),
+			context.obj(drawn.length === 0 ? { Font: fonts } : { Font: fonts, XObject: images }),
+		);
+		const written = [...drawn.map(placePicture), content.value].join('\n');
+		page.node.set(PDFName.of('Contents'), context.register(context.flateStream(utf8(written))));
 		pages.push({ page, sheet });
 	}
 	const fields = pages.flatMap(({ page, sheet }) =>
@@ -60,3 +85,7 @@ export async function writePdf(document: Document): Promise<Result<Uint8Array<Ar
 	});
 	return ok(new Uint8Array(bytes));
 }
+
+/** An image fills the unit square, turned over like everything else. */
+const placePicture = ({ name, box }: { readonly name: string; readonly box: PictureBox['box'] }): string =>
+	`q ${[box.width, 0, 0, box.height, box.x, PAPER.height - box.y - box.height].map(number).join(' ')} cm /${name} Do Q`;

@@ -75,6 +75,8 @@ export const GATES: { readonly [key in keyof typeof EN]: string } = {
 	'calc.made from': 'Eingaben',
 	'calc.inputs':
 		'Gerechnet mit {constants}. Eine Messreihe ist mit ihrer Länge genannt; die Aufzeichnung enthält sie ganz.',
+	'photos.title': 'Fotos, wie angehängt',
+	'photos.of': 'Schritt {step}, {name}; {person}, {seen}',
 	'coverage.title': 'Wie jeder eingeschlossene Raum abgedeckt war',
 	'coverage.volume': 'Raum',
 	'coverage.how': 'Wie abgedeckt',

@@ -71,6 +71,8 @@ export const GATES = {
 	'calc.notes': 'Notes of the calculation',
 	'calc.made from': 'Inputs',
 	'calc.inputs': 'Calculated with {constants}. A series is told by its length; the record holds it whole.',
+	'photos.title': 'Photos, as attached',
+	'photos.of': 'Step {step}, {name}; {person}, {seen}',
 	'coverage.title': 'How every enclosed volume was covered',
 	'coverage.volume': 'Volume',
 	'coverage.how': 'Covered how',
