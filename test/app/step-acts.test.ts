@@ -88,6 +88,8 @@ describe('a witness point', () => {
 		expect(noticeHasRunOut(startUp, due)).toBe(false);
 		await later(121);
 		expect(noticeHasRunOut(startUp, due)).toBe(true);
+		// The screen was covered meanwhile.
+		value(await beginShift(startUp, pin));
 	});
 
 	test('is attended: the witness signs with a PIN of their own where they are enrolled', async () => {
