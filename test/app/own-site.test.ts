@@ -1,6 +1,6 @@
 import 'fake-indexeddb/auto';
 import { beforeAll, describe, expect, test } from 'vitest';
-import { OpenDesk, OpenStartUp, PlantBook, Tablet } from '../../src/lib/app';
+import { BeginSite, OpenDesk, OpenStartUp, PlantBook, Tablet } from '../../src/lib/app';
 import { beginSite, objectionsToSite, personId, type NewSite } from '../../src/lib/app/own-site';
 import { nextStartUpId } from '../../src/lib/app/new-start-up';
 import { plantOn } from '../../src/lib/app/plant-book.svelte';
@@ -91,6 +91,13 @@ describe('a site begun on this tablet', () => {
 		expect(book.left).toHaveLength(book.plant.copied?.toReplace.length ?? 0);
 		expect(book.left.length).toBeGreaterThan(100);
 	});
+});
+
+test('the time of the plant is said by its distance from UTC, whatever the millisecond', async () => {
+	for (const past of [0, 381]) {
+		const begin = new BeginSite(await tab(name), new TestClock(NOW + past));
+		expect(begin.plantTime).toMatch(/^[+-]\d\d:\d\d$/);
+	}
 });
 
 describe('what is wrong with a new site is said before anything is made', () => {

@@ -49,8 +49,9 @@ export class BeginSite {
 		return localOffset(this.#clock.now());
 	}
 
+	/** "+01:00" */
 	get plantTime(): string {
-		return printInstant(this.#clock.now(), this.utcOffsetMinutes).slice(19);
+		return printInstant(this.#clock.now(), this.utcOffsetMinutes).slice(-'+00:00'.length);
 	}
 
 	get objections(): readonly SiteObjection[] {
