@@ -46,6 +46,7 @@ export class OpenStartUp {
 	#held = $state.raw<Held>();
 	#now = $state.raw(0);
 	#saved = $state.raw<string>();
+	#told = $state.raw('');
 	#stops: (() => void)[] = [];
 	#letGo: (() => void) | undefined;
 	#keeping: Promise<Result<'kept', Problem>> | undefined;
@@ -108,6 +109,15 @@ export class OpenStartUp {
 	/** What can still be taken back. */
 	get held(): Held | undefined {
 		return this.#held;
+	}
+
+	/** What was done last, in words, for whatever page comes next. */
+	get told(): string {
+		return this.#told;
+	}
+
+	tell(words: string): void {
+		this.#told = words;
 	}
 
 	/** When something was last made durable, in this session. */
