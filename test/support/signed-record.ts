@@ -13,6 +13,7 @@ import {
 	type Statement,
 } from '../../src/lib/record';
 import { verifyRecord, type Report } from '../../src/lib/verify';
+import { restate, type Language } from '../../src/lib/wording';
 import { asText, SigningTablets } from './signing-tablets';
 import { PURGE_INPUTS, SMALL_PROCEDURE } from './small-procedure';
 import { makeTestSite, testTrustList, value, type TestSite } from './test-site';
@@ -194,6 +195,17 @@ function shownTo(
 	});
 	return { shown, sheet };
 }
+
+const titleOf = (what: string): string => SMALL_PROCEDURE.plantEvents.find(({ id }) => id === what)?.title ?? what;
+
+/** As the app words it, in a language, before it is signed. */
+export const worded =
+	(language: Language) =>
+	(said: Statement, sheet: GateSheet): Statement => {
+		const textVersion = `statement-${language}/1`;
+		const words = restate({ language, textVersion }, { sheet, meaning: 'released', event: titleOf });
+		return statementOf(sheet, { ...said, language, textVersion, ...words! });
+	};
 
 /** As the judge gets it: lines that may have been tampered with, and the root that the judge knows. */
 export const judge = (

@@ -1,10 +1,9 @@
 import { beforeAll, describe, expect, test } from 'vitest';
 import { readableCode, sha256Hex } from '../../src/lib/base';
-import { statementOf, type GateSheet, type Statement } from '../../src/lib/record';
+import type { GateSheet, Statement } from '../../src/lib/record';
 import type { Check, Report } from '../../src/lib/verify';
-import { restate, type Language } from '../../src/lib/wording';
-import { judge, makeSignedRecord } from '../support/signed-record';
-import { SMALL_PROCEDURE } from '../support/small-procedure';
+import { restate } from '../../src/lib/wording';
+import { judge, makeSignedRecord, worded } from '../support/signed-record';
 import { makeTestSite, type TestSite } from '../support/test-site';
 
 let site: TestSite;
@@ -13,17 +12,6 @@ beforeAll(async () => {
 });
 
 const bad = (report: Report): readonly Check[] => report.checks.filter(({ outcome }) => outcome !== 'passed');
-
-const event = (what: string): string => SMALL_PROCEDURE.plantEvents.find(({ id }) => id === what)?.title ?? what;
-
-/** As the app words it, in a language, before it is signed. */
-const worded =
-	(language: Language) =>
-	(said: Statement, sheet: GateSheet): Statement => {
-		const textVersion = `statement-${language}/1`;
-		const words = restate({ language, textVersion }, { sheet, meaning: 'released', event });
-		return statementOf(sheet, { ...said, language, textVersion, ...words! });
-	};
 
 const judged = async (statement: (said: Statement, sheet: GateSheet) => Statement): Promise<Report> =>
 	judge(await makeSignedRecord({ statement }, site), undefined, { restate });

@@ -4,13 +4,13 @@ import { toPem } from '../../../src/lib/identity';
 import { aFolder } from '../../support/files';
 import { heard } from '../../support/heard';
 import { makeSignedDossier } from '../../support/signed-dossier';
-import { makeSignedRecord } from '../../support/signed-record';
+import { makeSignedRecord, worded } from '../../support/signed-record';
 
 const folder = aFolder();
 let [dossier, root, damaged, record, cut] = ['', '', '', '', ''];
 
 beforeAll(async () => {
-	const signed = await makeSignedRecord();
+	const signed = await makeSignedRecord({ statement: worded('en') });
 	const pdf = await makeSignedDossier(signed);
 	dossier = folder.put('dossier.pdf', pdf);
 	root = folder.put('root.pem', toPem(signed.site.root.certificate.der));
