@@ -145,18 +145,14 @@ export async function goOn(
 
 const SHIFT = 12 * 3_600_000;
 
-/** A copy lies in a second place, read back and compared or seen there by a person: number and head code of every chain stand in the record. */
-export async function noteCopy(
-	startUp: OpenStartUp,
-	to: string,
-	how: { readonly compared?: true } = {},
-): Promise<Result<string, Problem>> {
+/** A copy in a second place was made and compared: number and head code of every chain stand in the record. */
+export async function noteCopy(startUp: OpenStartUp, to: string): Promise<Result<string, Problem>> {
 	const signer = startUp.entrySigner();
 	if (!signer.ok) return signer;
 	const heads = [...headsOf(startUp.log)].map(
 		([tablet, head]) => [tablet, { number: head.number, code: headCode(head) }] as const,
 	);
-	const body = { to, way: 'file', heads: Object.fromEntries(heads), ...how } as const;
+	const body = { to, way: 'file', heads: Object.fromEntries(heads) } as const;
 	const written = await startUp.write('copy made', body, signer.value);
 	if (!written.ok) return written;
 	const chains = heads.map(([device, { number }]) => ({ log: startUp.id, device, number }));

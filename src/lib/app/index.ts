@@ -73,7 +73,6 @@ export { shiftTimes } from './shift-times';
 export { nextStep, StepDesk, type TypedSoFar } from './step-desk.svelte';
 export { previewCalculation, type CalculationPreview } from './calculation-preview';
 export { objectionsNow } from './objections';
-export { waysOut } from './ways-out';
 export { copyFile } from './copy-file';
 export { objectionsToSeal, seal, sealSheetOf, type ShownSeal } from './seal-act';
 export { leftOnTablet, stillOpen, type StillOpen } from './still-open';

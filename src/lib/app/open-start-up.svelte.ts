@@ -46,7 +46,6 @@ export class OpenStartUp {
 	#held = $state.raw<Held>();
 	#now = $state.raw(0);
 	#saved = $state.raw<string>();
-	#told = $state.raw('');
 	#stops: (() => void)[] = [];
 	#letGo: (() => void) | undefined;
 	#keeping: Promise<Result<'kept', Problem>> | undefined;
@@ -109,15 +108,6 @@ export class OpenStartUp {
 	/** What can still be taken back. */
 	get held(): Held | undefined {
 		return this.#held;
-	}
-
-	/** What was done last, in words, for whatever page comes next. */
-	get told(): string {
-		return this.#told;
-	}
-
-	tell(words: string): void {
-		this.#told = words;
 	}
 
 	/** When something was last made durable, in this session. */

@@ -56,7 +56,6 @@ export { default as SigningSheet } from './acts/SigningSheet.svelte';
 export { default as DeviationSheet } from './acts/DeviationSheet.svelte';
 export { default as HappenedSheet } from './acts/HappenedSheet.svelte';
 export { default as FindingSheet } from './acts/FindingSheet.svelte';
-export { default as GateWhy } from './acts/GateWhy.svelte';
 export { default as HandOverSheet } from './acts/HandOverSheet.svelte';
 export { default as PersonSwitch } from './acts/PersonSwitch.svelte';
 

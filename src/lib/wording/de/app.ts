@@ -106,7 +106,6 @@ export const APP: { readonly [key in keyof typeof EN]: string } = {
 	'app.disposition.use as is': 'so belassen',
 	'app.disposition.not a deviation': 'keine Abweichung',
 	'app.disposition reason': 'Was getan und gesehen wurde',
-	'app.disposition expires': 'Wird so benutzt, längstens bis',
 	'app.disposition does': 'Entscheidung unterschreiben',
 	'app.nothing': 'nichts',
 	'app.nothing here': 'Unter dieser Adresse ist nichts',

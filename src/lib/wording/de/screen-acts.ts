@@ -3,29 +3,6 @@ import type { SCREEN_ACTS as EN } from '../en/screen-acts';
 /** Was Menschen unterschreiben, verweigern, beantworten und melden. */
 export const SCREEN_ACTS: { readonly [key in keyof typeof EN]: string } = {
 	'ui.pin': 'PIN',
-	'ui.sign.title': 'Stufe {gate}, {title}:',
-	'ui.sign.not by you': '{person} kann sie nicht freigeben:',
-	'ui.sign.way repeat': 'Ausweg: {person} wiederholt {steps}.',
-	'ui.sign.way other': 'Ausweg: {person} gibt sie frei.',
-	'ui.sign.no way':
-		'Niemand sonst auf diesem Tablet darf sie freigeben: auf jemanden warten, der darf, oder die Anlage halten.',
-	'ui.sign.why': 'Warum, und wohin',
-	'ui.sign.why none': 'Nichts steht im Weg.',
-	'ui.sign.released by': '{person}, {at}',
-	'ui.sign.held':
-		'Sie kommt von selbst zurück, sobald die Stufe darunter freigegeben ist; niemand unterschreibt sie neu.',
-	'ui.sign.released now': 'Stufe {gate} wurde von {person} freigegeben, {at}.',
-	'ui.sign.accepted now': 'Stufe {gate} wurde von {person} abgenommen, {at}.',
-	'ui.sign.refused now':
-		'Stufe {gate} wurde von {person} verweigert, {at}. Jeder Nachweis bleibt; die Stufe bleibt zu, bis die Verweigerung beantwortet ist.',
-	'ui.sign.answered now': 'Die Verweigerung von Stufe {gate} wurde von {person} beantwortet, {at}.',
-	'ui.sign.why step': '{step} {title}: {state}',
-	'ui.sign.why deviation': 'Abweichung {deviation} sperrt sie',
-	'ui.sign.why permissive': 'Bedingung nicht erfüllt: {title}',
-	'ui.sign.why refusal': 'Verweigert: {reason}',
-	'ui.sign.why values': 'Werte einer anderen Anlage, in der Anlagenbeschreibung zu ersetzen: {items}',
-	'ui.sign.why again': 'Sie war schon freigegeben und braucht ihre Unterschrift neu',
-	'ui.sign.why gate': 'Stufe {gate}: {state}',
 	'ui.sign.covers': 'Dies umfasst, wie hier gezeigt und nichts sonst:',
 	'ui.sign.deviation': '{n} offene Abweichung.',
 	'ui.sign.deviations': '{n} offene Abweichungen.',
@@ -61,17 +38,11 @@ export const SCREEN_ACTS: { readonly [key in keyof typeof EN]: string } = {
 	'ui.copy.skip': 'Ohne freigeben',
 	'ui.copy.reason': 'Warum ohne Kopie?',
 	'ui.copy.without': 'Ohne Kopie weiter',
-	'ui.copy.there': 'Liegt die Datei {file} am zweiten Ort?',
-	'ui.copy.is there': 'Ja, sie liegt dort',
-	'ui.copy.is not': 'Nein',
-	'ui.copy.differs':
-		'Die Datei am zweiten Ort ist nicht, was geschrieben wurde. Nichts wurde vermerkt; nehmen Sie einen anderen Ort.',
 	'ui.copy.made': 'gemacht: {where}',
 	'ui.copy.skipped': 'keine: {reason}',
 	'ui.refused': 'Stufe {gate} wurde verweigert',
 	'ui.refused by': '{by}, {at}',
 	'ui.refused.first': 'Muss sich erst ändern: {names}',
 	'ui.refused.answer': 'Die Antwort, in Worten',
-	'ui.refused.pin': 'PIN für die Antwort',
 	'ui.refused.send': 'Verweigerung beantworten',
 };

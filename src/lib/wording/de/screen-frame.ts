@@ -8,7 +8,6 @@ export const SCREEN_FRAME: { readonly [key in keyof typeof EN]: string } = {
 	'ui.frame.lapsed': 'Verfallen',
 	'ui.frame.deviations': 'Abweichungen',
 	'ui.frame.log': 'Protokoll',
-	'ui.frame.seen': 'Gesehen',
 	'ui.frame.hand-over': 'Übergabe',
 	'ui.frame.dossier': 'Dossier',
 	'ui.frame.happened': 'Etwas ist geschehen',

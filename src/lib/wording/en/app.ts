@@ -91,7 +91,6 @@ export const APP = {
 	'app.disposition.use as is': 'use as is',
 	'app.disposition.not a deviation': 'not a deviation',
 	'app.disposition reason': 'What was done and seen',
-	'app.disposition expires': 'Used as it is until, at the latest',
 	'app.disposition does': 'Sign the disposition',
 	'app.nothing': 'nothing',
 	'app.nothing here': 'There is nothing at this address',

@@ -6,7 +6,6 @@ export const SCREEN_FRAME = {
 	'ui.frame.lapsed': 'Lapsed',
 	'ui.frame.deviations': 'Deviations',
 	'ui.frame.log': 'Log',
-	'ui.frame.seen': 'Seen',
 	'ui.frame.hand-over': 'Hand-over',
 	'ui.frame.dossier': 'Dossier',
 	'ui.frame.happened': 'Something happened',
