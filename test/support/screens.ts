@@ -55,12 +55,14 @@ export async function takeScreens({ folder, sizes, looks, only = '' }: Wanted): 
 
 /** The look by its attribute, as the app puts it on; the drawing follows in the next frame. */
 export async function wear(page: Page, look: Look): Promise<void> {
-	await page.evaluate(async (worn) => {
-		document.documentElement.dataset.look = worn;
+	await page.evaluate(async (nth) => {
+		// Without a pointer, so that what has the focus and what is typed stay as they are.
+		document.querySelectorAll<HTMLButtonElement>('header [role="group"] button')[nth]?.click();
 		scrollTo(0, 0);
 		await document.fonts.ready;
 		await new Promise((resolve) => requestAnimationFrame(() => requestAnimationFrame(resolve)));
-	}, look);
+	}, LOOKS.indexOf(look));
+	await page.locator(`html[data-look="${look}"]`).waitFor();
 }
 
 /** A screen as long as the page: a picture of a part would show bars that stick to its edge in the middle. */

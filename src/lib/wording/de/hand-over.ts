@@ -34,6 +34,7 @@ export const HAND_OVER = {
 	'handover.confirmed now': 'Sie sind jetzt gelesen und bestätigt',
 	'impact.none': 'Nichts, was gilt, fällt damit.',
 	'impact.gate': 'freigegeben {at}; dann {state}',
+	'impact.back one': 'Der Weg zurück: {n} Schritt, {minutes} min Arbeit, frühestens {earliest} min.',
 	'impact.back': 'Der Weg zurück: {n} Schritte, {minutes} min Arbeit, frühestens {earliest} min.',
 	'finding.title': 'Ein Messgerät wurde fehlerhaft befunden',
 	'finding.title of': '{instrument} wurde fehlerhaft befunden',

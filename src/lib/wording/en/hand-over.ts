@@ -34,6 +34,7 @@ export const HAND_OVER = {
 	'handover.confirmed now': 'They are read and confirmed now',
 	'impact.none': 'Nothing that stands falls with it.',
 	'impact.gate': 'released {at}; then {state}',
+	'impact.back one': 'The way back: {n} step, {minutes} min of work, {earliest} min at the earliest.',
 	'impact.back': 'The way back: {n} steps, {minutes} min of work, {earliest} min at the earliest.',
 	'finding.title': 'An instrument was found bad',
 	'finding.title of': '{instrument} was found bad',
